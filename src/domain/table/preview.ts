@@ -1,0 +1,45 @@
+import type { SolidFields, Vec3 } from '../tank/solid';
+import type { TableRow } from './request';
+
+/** A closed triangle mesh in the tank's frame, mm. Triangles index `positions` in threes, outward. */
+export interface TankMesh {
+  positions: Float64Array;
+  triangles: Uint32Array;
+}
+
+/**
+ * How a reading along the stick becomes a plumb level and back. "Level" is u·p, mm, with u the
+ * unit up vector in the tank's frame: constant over a liquid surface.
+ * level = zeroLevelMm + readingMm × levelPerReading.
+ */
+export interface ReadingFrame {
+  up: Vec3;
+  zeroLevelMm: number;
+  /** u·z with a stick (1 when level), 1 without one. */
+  levelPerReading: number;
+  /** Highest reading, mm. */
+  heightMm: number;
+  /** Where the stick stands, its zero and the roof above it, in the tank's frame; null without one. */
+  stick: { at: readonly [number, number]; zeroZ: number; roofZ: number } | null;
+  /** Levels of the lowest and highest point of the liquid space. */
+  lowestLevelMm: number;
+  highestLevelMm: number;
+}
+
+/** All that the bench and the front page draw and read from, computed at once in a worker. */
+export interface Preview {
+  space: TankMesh;
+  /** Each solid alone, placed and turned, for balloons, picking and hatching; document order. */
+  solids: readonly (TankMesh & Pick<SolidFields, 'id' | 'role'>)[];
+  frame: ReadingFrame;
+  capacityL: number;
+  errorL: number;
+  undrainableL: number;
+  trappedL: number;
+  /** Separate pieces of liquid space; more than 1 cannot be issued. */
+  pieces: number;
+  /** Evenly spaced over 0…heightMm, fine enough for the eye and the Hermite curve between (about 200). */
+  rows: readonly TableRow[];
+  /** Plain sentences worth reading: "The liquid space is in 2 pieces." */
+  notices: readonly string[];
+}

@@ -1,0 +1,39 @@
+import type { z } from 'zod/v4';
+import type { Shape } from '../../../geometry/shape';
+import type { SolidFields, Vec3 } from '../solid';
+
+/** One size of a solid, as the parts list shows it and lets it be typed. */
+export interface Size {
+  /** Path inside the solid's entry of the document, e.g. `['length']`. */
+  path: readonly string[];
+  /** The trade's word for it: "length", "diameter". */
+  label: string;
+  unit: 'mm';
+}
+
+/**
+ * A kind of solid: everything Dipwright knows about it, gathered in its folder and named once in
+ * registry.ts. Lengths mm. "Own frame": the solid's upright box centred on the origin, not turned.
+ */
+export interface Kind<S extends SolidFields & { kind: string }> {
+  kind: S['kind'];
+  /** Word in the parts list and in the "add" line. */
+  label: string;
+  schema: z.ZodType<S>;
+  /** Extent of the upright box along x, y, z, mm. */
+  extent(solid: S): Vec3;
+  /** The sizes that are typed, in drawing order. */
+  sizes(solid: S): readonly Size[];
+  /** The sizes in one phrase for the list: "900 × 500 × 300". */
+  words(solid: S): string;
+  /** Closed mesh in the own frame; `facets` chords to a full turn where the kind is curved. The caller disposes of it. */
+  shape(solid: S, facets: number, worldX: Vec3): Shape;
+  /** Greatest u·p over the solid in its own frame, closed form; `up` a unit vector in that frame. */
+  support(solid: S, up: Vec3): number;
+  /** Exact volume, mm³ (for tests and for the list). */
+  volume(solid: S): number;
+  /** Faults the schema cannot see: degenerate sizes, by field. */
+  faults(solid: S): readonly { path: readonly string[]; detail: string }[];
+  /** A new one, of a size that suits the bench. */
+  blank(id: string): S;
+}
