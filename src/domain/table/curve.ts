@@ -31,7 +31,7 @@ export function curveFromRows(
 export function volumeAt(curve: Curve, depthMm: number): number {
   const { depthMm: xs, volumeL: vs, slopeLPerMm: ms } = curve;
   const last = xs.length - 1;
-  if (!(depthMm >= xs[0]! && depthMm <= xs[last]!)) throw outside(depthMm, xs[0]!, xs[last]!);
+  if (!(depthMm >= xs[0]! && depthMm <= xs[last]!)) throw outside(xs[0]!, xs[last]!);
   const i = segmentOf(xs, depthMm);
   return hermite(xs, vs, ms, i, depthMm);
 }
@@ -87,7 +87,7 @@ function hermite(xs: Float64Array, vs: Float64Array, ms: Float64Array, i: number
   return Math.min(Math.max(value, v0), v1);
 }
 
-function outside(value: number, low: number, high: number): DipwrightError {
+function outside(low: number, high: number): DipwrightError {
   const detail = `Give a depth from ${round(low)} to ${round(high)} mm: the stick ends there.`;
   return new DipwrightError('invalid', detail, { faults: [{ pointer: '/depthMm', detail }] });
 }

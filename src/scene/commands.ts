@@ -1,0 +1,127 @@
+import type { TankDocument } from '~/domain/tank/document';
+import type { Solid } from '~/domain/tank/kinds/registry';
+
+/**
+ * What can be done to a design, as pure functions document → document. None of them validates:
+ * the bench keeps a document that cannot be computed and says why.
+ */
+export function addSolid(document: TankDocument, solid: Solid): TankDocument {
+  return { ...document, solids: [...document.solids, solid] };
+}
+
+export function removeSolid(document: TankDocument, id: string): TankDocument {
+  return { ...document, solids: document.solids.filter((solid) => solid.id !== id) };
+}
+
+/** A copy stands beside its original, shifted along x by `shiftMm`. */
+export function copySolid(document: TankDocument, id: string, shiftMm: number): TankDocument {
+  const index = document.solids.findIndex((solid) => solid.id === id);
+  const original = document.solids[index];
+  if (!original) return document;
+  const [x, y, z] = original.at ?? [0, 0, 0];
+  const copy: Solid = { ...original, id: freeId(document, original.id), at: [x + shiftMm, y, z] };
+  const solids = [...document.solids];
+  solids.splice(index + 1, 0, copy);
+  return { ...document, solids };
+}
+
+export function changeSolid(
+  document: TankDocument,
+  id: string,
+  change: (solid: Solid) => Solid,
+): TankDocument {
+  return {
+    ...document,
+    solids: document.solids.map((solid) => (solid.id === id ? change(solid) : solid)),
+  };
+}
+
+/** Sets one size by its path inside the solid's entry, e.g. `['length']`. */
+export function setSize(
+  document: TankDocument,
+  id: string,
+  path: readonly string[],
+  valueMm: number,
+): TankDocument {
+  return changeSolid(document, id, (solid) => setPath(solid, path, valueMm) as Solid);
+}
+
+export function setPlace(
+  document: TankDocument,
+  id: string,
+  axis: 0 | 1 | 2,
+  valueMm: number,
+): TankDocument {
+  return changeSolid(document, id, (solid) => ({
+    ...solid,
+    at: withEntry(solid.at ?? [0, 0, 0], axis, valueMm),
+  }));
+}
+
+export function setTurn(
+  document: TankDocument,
+  id: string,
+  axis: 0 | 1 | 2,
+  degrees: number,
+): TankDocument {
+  return changeSolid(document, id, (solid) => ({
+    ...solid,
+    turn: withEntry(solid.turn ?? [0, 0, 0], axis, degrees),
+  }));
+}
+
+export function setRole(document: TankDocument, id: string, role: Solid['role']): TankDocument {
+  return changeSolid(document, id, (solid) => ({ ...solid, role }));
+}
+
+/** Gives a solid another name; the name is its id, so one that is taken is refused (null). */
+export function renameSolid(document: TankDocument, id: string, name: string): TankDocument | null {
+  if (name === id) return document;
+  if (document.solids.some((solid) => solid.id === name)) return null;
+  return changeSolid(document, id, (solid) => ({ ...solid, id: name }));
+}
+
+export function setAttitude(
+  document: TankDocument,
+  attitude: { pitch: number; roll: number },
+): TankDocument {
+  const { attitude: _old, ...rest } = document;
+  return attitude.pitch === 0 && attitude.roll === 0 ? rest : { ...rest, attitude };
+}
+
+export function setStick(document: TankDocument, stick: TankDocument['stick']): TankDocument {
+  const { stick: _old, ...rest } = document;
+  return stick === undefined ? rest : { ...rest, stick };
+}
+
+/** A name like the wanted one that no solid has yet: "ramp", "ramp 2", "ramp 3" … */
+export function freeId(document: TankDocument, wanted: string): string {
+  const taken = new Set(document.solids.map((solid) => solid.id));
+  const base = wanted.replace(/ \d+$/, '').slice(0, 56);
+  if (!taken.has(base)) return base;
+  for (let count = 2; ; count += 1) {
+    if (!taken.has(`${base} ${count}`)) return `${base} ${count}`;
+  }
+}
+
+function setPath(value: unknown, path: readonly string[], leaf: number): unknown {
+  const [key, ...rest] = path;
+  if (key === undefined) return leaf;
+  if (Array.isArray(value)) {
+    const copy: unknown[] = [...value];
+    copy[Number(key)] = setPath(copy[Number(key)], rest, leaf);
+    return copy;
+  }
+  const entry = (value ?? {}) as Record<string, unknown>;
+  return { ...entry, [key]: setPath(entry[key], rest, leaf) };
+}
+
+function withEntry(
+  triple: [number, number, number],
+  axis: 0 | 1 | 2,
+  value: number,
+): [number, number, number] {
+  const copy: [number, number, number] = [...triple];
+  copy[axis] = value;
+  return copy;
+}
