@@ -1,6 +1,7 @@
 import { z } from 'zod/v4';
 import type { SignIn, SignUp } from '~/domain/access/account';
-import { roles } from '~/domain/access/roles';
+import { handover } from '~/domain/access/handover';
+import { me, member } from '~/domain/access/member';
 import { installation, type NewInstallation } from '~/domain/installation/installation';
 import { reading, type NewReading } from '~/domain/reading/reading';
 import { computedTable, issuedRow } from '~/domain/table/request';
@@ -17,9 +18,6 @@ import { call, type Answered } from './call';
 
 /** The only caller of `/api/v1` in the browser. Refusals are thrown as `ApiProblem`. */
 
-const me = z.object({ name: z.string(), email: z.string(), role: z.enum(roles), workshopName: z.string() });
-const member = z.object({ id: z.string(), name: z.string(), role: z.enum(roles) });
-export type Member = z.infer<typeof member>;
 const issued = z.object({
   id: z.string(),
   letter: z.string(),
@@ -88,6 +86,8 @@ export const lookUpVolume = (id: string, at: { depthMm: number } | { ullageMm: n
 export const lookUpDepth = (id: string, volumeL: number) =>
   valueOf(call(`${revisionPath(id)}/depth?volumeL=${volumeL}`, { answer: depthAnswer }));
 
+export const listHandovers = (id: string) =>
+  valueOf(call(`${tankPath(id)}/handovers`, { answer: z.array(handover) }));
 export const handOver = (id: string, userId: string) =>
   valueOf(call(`${tankPath(id)}/handovers`, { method: 'POST', body: { userId } }));
 
