@@ -1,0 +1,35 @@
+import node from '@astrojs/node';
+import react from '@astrojs/react';
+import tailwindcss from '@tailwindcss/vite';
+import { defineConfig, passthroughImageService } from 'astro/config';
+import { computeWorkerBuild } from './src/commands/build/compute-worker-build.mjs';
+import { serverEntryPlugin } from './src/commands/build/server-entry-plugin.mjs';
+
+// docs/decisions/0200 and 0201 say why our own entry stands in front and how the CSP is made.
+export default defineConfig({
+  output: 'server',
+  adapter: node({ mode: 'middleware' }),
+  integrations: [react(), computeWorkerBuild()],
+  security: {
+    checkOrigin: true,
+    allowedDomains: [{ hostname: '127.0.0.1' }, { hostname: 'localhost' }],
+  },
+  image: { service: passthroughImageService() },
+  // The product keeps its sessions itself; Astro's own are never asked for.
+  session: { driver: 'memory' },
+  build: { inlineStylesheets: 'never' },
+  devToolbar: { enabled: false },
+  experimental: {
+    csp: {
+      algorithm: 'SHA-256',
+      scriptDirective: { resources: ["'self'", "'wasm-unsafe-eval'"] },
+      styleDirective: { resources: ["'self'"] },
+    },
+  },
+  vite: {
+    plugins: [tailwindcss(), serverEntryPlugin()],
+    build: { assetsInlineLimit: 0 },
+    worker: { format: 'es' },
+    optimizeDeps: { exclude: ['manifold-3d'] },
+  },
+});
