@@ -4,7 +4,7 @@ declare namespace App {
   interface Locals {
     context: import('~/server/context').Context;
     /** Who asks; null without a session. */
-    actor: import('~/server/context').Actor | null;
+    actor: import('~/domain/access/actor').Actor | null;
     requestId: string;
     /** From the socket and the configured count of trusted proxies, never from a header as sent. */
     clientAddress: string;

@@ -1,0 +1,25 @@
+import { spawn } from 'node:child_process';
+
+/**
+ * Runs a program of the checkout to its end.
+ * @param {string} program
+ * @param {string[]} args
+ * @param {{ cwd: string, env?: Record<string, string | undefined>, show?: boolean }} options
+ *   `show`: its output goes to the terminal as it comes, otherwise it is kept
+ * @returns {Promise<{ code: number, output: string }>}
+ */
+export function runProgram(program, args, { cwd, env = {}, show = false }) {
+  return new Promise((resolve) => {
+    const child = spawn(program, args, {
+      cwd,
+      env: { ...process.env, ASTRO_TELEMETRY_DISABLED: '1', ...env },
+      stdio: show ? ['ignore', 'inherit', 'inherit'] : ['ignore', 'pipe', 'pipe'],
+    });
+    const parts = [];
+    child.stdout?.on('data', (part) => parts.push(part));
+    child.stderr?.on('data', (part) => parts.push(part));
+    const text = () => Buffer.concat(parts).toString('utf8');
+    child.once('error', (error) => resolve({ code: 127, output: `${text()}\n${error.message}` }));
+    child.once('close', (code, signal) => resolve({ code: code ?? 1, output: signal ? `${text()}\n${signal}` : text() }));
+  });
+}
