@@ -1,0 +1,76 @@
+import { DipwrightError } from '~/domain/errors';
+import type { Preview } from '~/domain/table/preview';
+import type { TankDocument } from '~/domain/tank/document';
+import type { PreviewReply, PreviewRequest } from './preview-protocol';
+
+/** Computes previews off the page's own thread. Latest wins. */
+export interface PreviewClient {
+  /**
+   * The preview of a design; null when a later call took its place. Rejects with a DipwrightError
+   * (`invalid`, JSON pointers into the design) when the design cannot be computed, and with
+   * `unavailable` when the worker cannot run.
+   */
+  compute(design: TankDocument): Promise<Preview | null>;
+  /** Ends the worker; open calls resolve to null. */
+  close(): void;
+}
+
+interface Call {
+  number: number;
+  resolve(preview: Preview | null): void;
+  reject(error: Error): void;
+}
+
+/** What the client needs of a worker, so that a test can stand in for the browser's. */
+export interface PreviewWorker {
+  postMessage(message: PreviewRequest): void;
+  terminate(): void;
+  onmessage: ((event: MessageEvent<PreviewReply>) => void) | null;
+  onerror: ((event: ErrorEvent) => void) | null;
+}
+
+/** Only in the browser: starts the worker at once, so that its WebAssembly is warm at the first edit. */
+export function createPreviewClient(startWorker: () => PreviewWorker = startPreviewWorker): PreviewClient {
+  const worker = startWorker();
+  let latest = 0;
+  let open: Call | null = null;
+
+  worker.onmessage = ({ data }) => {
+    if (!open || data.number !== open.number) return;
+    const call = open;
+    open = null;
+    if ('preview' in data) call.resolve(data.preview);
+    else {
+      const { code, message, faults } = data.refusal;
+      call.reject(new DipwrightError(code, message, { faults }));
+    }
+  };
+  worker.onerror = () => {
+    const call = open;
+    open = null;
+    call?.reject(
+      new DipwrightError('unavailable', 'The tank cannot be computed here. Reload the page to try again.'),
+    );
+  };
+
+  return {
+    compute(design) {
+      open?.resolve(null);
+      latest += 1;
+      const number = latest;
+      return new Promise((resolve, reject) => {
+        open = { number, resolve, reject };
+        worker.postMessage({ number, design });
+      });
+    },
+    close() {
+      worker.terminate();
+      open?.resolve(null);
+      open = null;
+    },
+  };
+}
+
+function startPreviewWorker(): PreviewWorker {
+  return new Worker(new URL('./preview.worker.ts', import.meta.url), { type: 'module' });
+}
