@@ -1,10 +1,12 @@
 import { useCallback, useSyncExternalStore } from 'react';
 import { z } from 'zod/v4';
+import { lengthUnits } from '~/domain/units/length-unit';
+import { volumeUnits } from '~/domain/units/volume-unit';
 
 /** Units and paper that one person chose, remembered in this browser. */
 const preference = z.object({
-  length: z.enum(['mm', 'cm', 'in']),
-  volume: z.enum(['l', 'usgal', 'impgal']),
+  length: z.enum(lengthUnits),
+  volume: z.enum(volumeUnits),
   paper: z.enum(['a4', 'letter']),
 });
 export type UnitsPreference = z.infer<typeof preference>;
