@@ -30,7 +30,7 @@ export async function runMigrations(
       .map((file) => ({ name: file.slice(0, -'.ts'.length), path: resolve(folder, file) }))
       .map(({ name, path }) => ({
         name,
-        up: async (params) => {
+        up: async (params: { context: Sequelize }) => {
           const migration = (await import(path)) as Migration;
           await migration.up(params);
         },
