@@ -3,7 +3,7 @@ import type { TankSettings } from '../tank/settings';
 import { depthAt, segmentOf, volumeAt, type Curve } from './curve';
 
 /** What an issued revision says, as far as a look-up needs it. */
-export interface IssuedTable {
+export interface DipTable {
   /** Litres by reading, from the issued rows. */
   curve: Curve;
   /** ± of the litres at each row, litres. */
@@ -34,7 +34,7 @@ export interface Answer {
  * out what stands below the outlet; room is counted to safe fill, never to the brim; the ± is
  * linear between rows. Throws `invalid` outside 0…heightMm: such a reading is asked back.
  */
-export function answerAt(table: IssuedTable, depthMm: number): Answer {
+export function answerAt(table: DipTable, depthMm: number): Answer {
   const volumeL = volumeAt(table.curve, depthMm);
   const safeFill = safeFillL(table);
   return {
@@ -50,12 +50,12 @@ export function answerAt(table: IssuedTable, depthMm: number): Answer {
 }
 
 /** Litres at safe fill: a share of the whole liquid space. */
-export function safeFillL({ settings, capacityL }: Pick<IssuedTable, 'settings' | 'capacityL'>): number {
+export function safeFillL({ settings, capacityL }: Pick<DipTable, 'settings' | 'capacityL'>): number {
   return (settings.safeFillPercent / 100) * capacityL;
 }
 
 /** The reading at safe fill, mm; null when the stick does not reach it (a tilted tank). */
-export function safeFillMm(table: IssuedTable): number | null {
+export function safeFillMm(table: DipTable): number | null {
   const litres = safeFillL(table);
   const { volumeL } = table.curve;
   const last = volumeL[volumeL.length - 1] ?? 0;
@@ -65,7 +65,7 @@ export function safeFillMm(table: IssuedTable): number | null {
 }
 
 /** Litres below the outlet; 0 when no outlet was told. */
-export function unusableL({ curve, settings, heightMm }: Pick<IssuedTable, 'curve' | 'settings' | 'heightMm'>): number {
+export function unusableL({ curve, settings, heightMm }: Pick<DipTable, 'curve' | 'settings' | 'heightMm'>): number {
   return settings.outletMm === null ? 0 : volumeAt(curve, Math.min(settings.outletMm, heightMm));
 }
 
@@ -75,7 +75,7 @@ export function densityOf({ densityKgPerM3, liquid }: TankSettings): number {
 }
 
 /** ± of the litres at a reading, linear between the rows. */
-export function plusMinusAt({ curve, plusMinusL }: Pick<IssuedTable, 'curve' | 'plusMinusL'>, depthMm: number): number {
+export function plusMinusAt({ curve, plusMinusL }: Pick<DipTable, 'curve' | 'plusMinusL'>, depthMm: number): number {
   const i = segmentOf(curve.depthMm, depthMm);
   const x0 = curve.depthMm[i] ?? 0;
   const x1 = curve.depthMm[i + 1] ?? x0;

@@ -1,6 +1,6 @@
 import { useMemo, useState } from 'react';
 import type { Reading } from '~/domain/reading/reading';
-import { answerAt, safeFillMm, type IssuedTable } from '~/domain/table/answer-at';
+import { answerAt, safeFillMm, type DipTable } from '~/domain/table/answer-at';
 import { curveFromRows } from '~/domain/table/curve';
 import type { TankSettings } from '~/domain/tank/settings';
 import { formatLength, formatLengthWithUnit } from '~/domain/units/format-length';
@@ -114,7 +114,7 @@ export function TankCard(props: TankCardProps) {
 /** A dragged line stops at whole marks of the unit. */
 const dragDecimals = { mm: 0, cm: 1, in: 0 } as const;
 
-function useIssuedTable(props: TankCardProps): IssuedTable {
+function useIssuedTable(props: TankCardProps): DipTable {
   const { rows, slopeFactor, settings, revision } = props;
   return useMemo(() => {
     const unpacked = unpackRows(rows);
