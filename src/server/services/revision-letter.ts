@@ -1,0 +1,6 @@
+/** The letter of a tank's n-th revision (n ≥ 1): A … Z, AA, AB … */
+export function revisionLetter(number: number): string {
+  const before = Math.floor((number - 1) / 26);
+  const last = String.fromCharCode(65 + ((number - 1) % 26));
+  return before === 0 ? last : revisionLetter(before) + last;
+}
