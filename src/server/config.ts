@@ -11,6 +11,7 @@ const environment = z.object({
   DIPWRIGHT_ORIGIN: z.string().refine(isOrigin, 'must be an origin such as https://dipwright.example').optional(),
   DIPWRIGHT_ALLOWED_HOSTS: z.string().refine(areHosts, 'must be host names, with a port where one is used, parted by commas').optional(),
   DIPWRIGHT_TRUSTED_PROXIES: wholeNumber(0, 10).default(0),
+  DIPWRIGHT_LEAVE_SECONDS: wholeNumber(0, 600).default(0),
   DIPWRIGHT_DRAIN_SECONDS: wholeNumber(0, 600).default(20),
   DIPWRIGHT_DATABASE_HOST: z.string('is missing').min(1, 'is empty'),
   DIPWRIGHT_DATABASE_PORT: wholeNumber(1, 65_535).default(3306),
@@ -36,6 +37,8 @@ export interface Config {
     trustedProxies: number;
     /** Browsers reach the product over TLS: cookies are Secure and HSTS is sent. */
     tls: boolean;
+    /** How long /readyz says "leaving" after SIGTERM while requests are still taken. */
+    leaveSeconds: number;
     /** How long requests under way may take to finish after SIGTERM. */
     drainSeconds: number;
   };
@@ -73,6 +76,7 @@ export function readConfig(env: Record<string, string | undefined> = process.env
       allowedHosts: allowedHosts(origin, at.DIPWRIGHT_PORT, at.DIPWRIGHT_ALLOWED_HOSTS),
       trustedProxies: at.DIPWRIGHT_TRUSTED_PROXIES,
       tls: origin.startsWith('https:'),
+      leaveSeconds: at.DIPWRIGHT_LEAVE_SECONDS,
       drainSeconds: at.DIPWRIGHT_DRAIN_SECONDS,
     },
     database: {

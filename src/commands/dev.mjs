@@ -1,0 +1,39 @@
+import { spawn } from 'node:child_process';
+import { join } from 'node:path';
+import { openLocalServer } from '../../db/local-server.mjs';
+import { checkout } from './steps/checkout.mjs';
+import { demoSignIns } from './steps/demo-sign-ins.mjs';
+import { runCommand } from './steps/explain-fault.mjs';
+import { installPackages } from './steps/install-packages.mjs';
+import { localSettings, webAddress } from './steps/local-settings.mjs';
+import { requireNode } from './steps/node-version.mjs';
+import { prepareData } from './steps/prepare-data.mjs';
+import { requireWebPort } from './steps/require-web-port.mjs';
+import { say } from './steps/say.mjs';
+import { untilAskedToStop } from './steps/stop-signal.mjs';
+
+/* `npm run dev`: the demo's database with pages that follow each change of a source. */
+await runCommand(async () => {
+  const stop = untilAskedToStop();
+  requireNode();
+  const address = webAddress();
+  await requireWebPort(address, 'npm run dev');
+  await installPackages(checkout);
+  const database = await openLocalServer({ checkout, name: 'demo', database: 'dipwright', say });
+  try {
+    const settings = { ...localSettings(database), DIPWRIGHT_MODE: 'development' };
+    await stop.during(prepareData(checkout, settings));
+    say(`\nStarting on ${address.origin}\n\n${demoSignIns}\n`);
+    const child = spawn(
+      process.execPath,
+      [join('node_modules', 'astro', 'astro.js'), 'dev', '--host', address.host, '--port', String(address.port)],
+      { cwd: checkout, env: { ...process.env, ASTRO_TELEMETRY_DISABLED: '1', ...settings }, stdio: ['ignore', 'inherit', 'inherit'] },
+    );
+    const ended = new Promise((resolve) => child.once('exit', resolve));
+    await Promise.race([stop.asked, ended]);
+    child.kill('SIGTERM');
+    await ended;
+  } finally {
+    await database.stop();
+  }
+});

@@ -1,0 +1,39 @@
+import { fork } from 'node:child_process';
+import { join } from 'node:path';
+import { StartFault } from '../../../db/local/start-fault.mjs';
+
+/**
+ * Starts the built product and waits until it serves. The channel between the two ends with either,
+ * so that a web server whose command was killed leaves by itself.
+ * @param {string} checkout
+ * @param {Record<string, string>} settings
+ */
+export async function startWebServer(checkout, settings) {
+  const child = fork(join(checkout, 'dist', 'server', 'dipwright.mjs'), [], {
+    cwd: checkout,
+    env: { ...process.env, NODE_ENV: 'production', ...settings },
+    execArgv: ['--enable-source-maps'],
+    // A session of its own: Ctrl-C reaches the command, which asks the server to leave.
+    detached: true,
+    stdio: ['ignore', 'inherit', 'inherit', 'ipc'],
+  });
+  const ended = new Promise((resolve) => child.once('exit', (code, signal) => resolve({ code, signal })));
+  const outcome = await Promise.race([
+    new Promise((resolve) => child.on('message', resolve)),
+    ended.then(() => ({ fault: 'it ended at once' })),
+  ]);
+  if (outcome.fault !== undefined) {
+    throw new StartFault(
+      `The web server did not start: ${String(outcome.fault).slice(0, 500)}`,
+      'Mend what it says (docs/operations.md lists every setting), then run the command again.',
+    );
+  }
+  return {
+    pid: child.pid,
+    ended,
+    async stop() {
+      child.kill('SIGTERM');
+      await ended;
+    },
+  };
+}
