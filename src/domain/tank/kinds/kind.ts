@@ -1,4 +1,6 @@
 import type { z } from 'zod/v4';
+import type { Interval } from '../../../geometry/intervals';
+import type { Line } from '../../../geometry/line';
 import type { Shape } from '../../../geometry/shape';
 import type { SolidFields, Vec3 } from '../solid';
 
@@ -11,6 +13,12 @@ export interface Size {
   unit: 'mm';
 }
 
+/** The tank's own directions as the solid sees them: unit vectors in the own frame. */
+export interface TankDirections {
+  x: Vec3;
+  z: Vec3;
+}
+
 /**
  * A kind of solid: everything Dipwright knows about it, gathered in its folder and named once in
  * registry.ts. Lengths mm. "Own frame": the solid's upright box centred on the origin, not turned.
@@ -20,19 +28,26 @@ export interface Kind<S extends SolidFields & { kind: string }> {
   /** Word in the parts list and in the "add" line. */
   label: string;
   schema: z.ZodType<S>;
+  /** Whether its mesh depends on the count of facets. */
+  curved: boolean;
   /** Extent of the upright box along x, y, z, mm. */
   extent(solid: S): Vec3;
   /** The sizes that are typed, in drawing order. */
   sizes(solid: S): readonly Size[];
   /** The sizes in one phrase for the list: "900 × 500 × 300". */
   words(solid: S): string;
-  /** Closed mesh in the own frame; `facets` chords to a full turn where the kind is curved. The caller disposes of it. */
-  shape(solid: S, facets: number, worldX: Vec3): Shape;
+  /**
+   * How its mesh is made, in the own frame; `facets` chords to a full turn (a multiple of 4) where it is
+   * curved, standing so that equal surfaces of two solids get equal facets.
+   */
+  shape(solid: S, facets: number, tank: TankDirections): Shape;
   /** Greatest u·p over the solid in its own frame, closed form; `up` a unit vector in that frame. */
   support(solid: S, up: Vec3): number;
-  /** Exact volume, mm³ (for tests and for the list). */
+  /** Stretches of a line of the own frame inside the solid, surface included within `slack` mm; closed form. */
+  chords(solid: S, line: Line, slack: number): readonly Interval[];
+  /** Exact volume, mm³. */
   volume(solid: S): number;
-  /** Faults the schema cannot see: degenerate sizes, by field. */
+  /** Faults the schema cannot see, by field: options that contradict each other. */
   faults(solid: S): readonly { path: readonly string[]; detail: string }[];
   /** A new one, of a size that suits the bench. */
   blank(id: string): S;

@@ -1,7 +1,11 @@
 import { z } from 'zod/v4';
+import { box } from './box/box';
 import { boxSchema } from './box/schema';
+import { cylinder } from './cylinder/cylinder';
 import { cylinderSchema } from './cylinder/schema';
+import type { Kind } from './kind';
 import { wedgeSchema } from './wedge/schema';
+import { wedge } from './wedge/wedge';
 
 /** Kinds of the document format that are not computed yet: refused by name. */
 export const kindsToCome = ['oval', 'sphere', 'ellipsoid', 'cone', 'taper', 'prism', 'stations', 'mesh'];
@@ -15,3 +19,16 @@ export const solidSchema = z.discriminatedUnion('kind', [boxSchema, cylinderSche
   },
 });
 export type Solid = z.infer<typeof solidSchema>;
+
+/** Every kind that can be computed, in the order the bench offers them. */
+export const kinds: readonly Kind<Solid>[] = [erased(box), erased(cylinder), erased(wedge)];
+
+/** What Dipwright knows about a solid's kind. */
+export function kindOf(solid: Solid): Kind<Solid> {
+  return kinds.find(({ kind }) => kind === solid.kind)!;
+}
+
+// a kind is only ever handed solids of its own kind: kindOf picks it by that field
+function erased<S extends Solid>(kind: Kind<S>): Kind<Solid> {
+  return kind as unknown as Kind<Solid>;
+}

@@ -1,0 +1,54 @@
+import { circleOutline, facetPhase } from '../../../../geometry/circle';
+import { lineInHalfSpaces, lineInQuadric } from '../../../../geometry/line';
+import { axisOrder, type Axis } from '../../../../geometry/shape';
+import type { Vec3 } from '../../solid';
+import type { Kind } from '../kind';
+import { sizeWords } from '../size-words';
+import { cylinderSchema, type Cylinder } from './schema';
+
+/** Circular cylinder along x, y or z, with flat ends. */
+export const cylinder: Kind<Cylinder> = {
+  kind: 'cylinder',
+  label: 'cylinder',
+  schema: cylinderSchema,
+  curved: true,
+  extent: (solid) => alongAxis(axisOf(solid), solid.diameter, solid.length),
+  sizes: () => [
+    { path: ['diameter'], label: 'diameter', unit: 'mm' },
+    { path: ['length'], label: 'length', unit: 'mm' },
+  ],
+  words: (solid) => `⌀ ${sizeWords(solid.diameter, solid.length)} along ${axisOf(solid)}`,
+  shape(solid, facets, tank) {
+    const axis = axisOf(solid);
+    const outline = circleOutline(solid.diameter / 2, facets, facetPhase(axis, tank.x, tank.z));
+    return { form: 'extrusion', axis, outline, length: solid.length };
+  },
+  support(solid, up) {
+    const [first, second, third] = axisOrder(axisOf(solid));
+    const across = Math.hypot(up[first]!, up[second]!);
+    return (across * solid.diameter + Math.abs(up[third]!) * solid.length) / 2;
+  },
+  chords(solid, line, slack) {
+    const axis = axisOf(solid);
+    const round = lineInQuadric(line, alongAxis(axis, solid.diameter / 2, Infinity), slack);
+    const normal = alongAxis(axis, 0, 1);
+    const back: Vec3 = [-normal[0], -normal[1], -normal[2]];
+    const offset = solid.length / 2;
+    const between = lineInHalfSpaces(line, [{ normal, offset }, { normal: back, offset }], slack);
+    if (!round || !between) return [];
+    const from = Math.max(round.from, between.from);
+    const to = Math.min(round.to, between.to);
+    return to >= from ? [{ from, to }] : [];
+  },
+  volume: ({ diameter, length }) => (Math.PI * diameter * diameter * length) / 4,
+  faults: () => [],
+  blank: (id) => ({ id, role: 'holds', kind: 'cylinder', diameter: 400, length: 800, axis: 'x' }),
+};
+
+function axisOf(solid: Cylinder): Axis {
+  return solid.axis ?? 'x';
+}
+
+function alongAxis(axis: Axis, across: number, along: number): Vec3 {
+  return [axis === 'x' ? along : across, axis === 'y' ? along : across, axis === 'z' ? along : across];
+}
