@@ -40,7 +40,7 @@ export type CautionKey =
   | 'large-tank'
   | 'weight';
 
-const always = ['not-for-trade', 'weight'] as const;
+const always = ['weight', 'not-for-trade'] as const;
 
 export const liquids: Record<LiquidCode, Liquid> = {
   'drinking-water': {
@@ -101,7 +101,8 @@ export const liquids: Record<LiquidCode, Liquid> = {
     code: 'seawater',
     name: 'Seawater',
     densityKgPerM3: 1025,
-    densitySource: 'UNESCO Tech. Papers Mar. Sci. 44: 1027.7 kg/m³ at 35 and 5 °C; 1025 is common practice',
+    densitySource:
+      'UNESCO Tech. Papers Mar. Sci. 44: 1027.7 kg/m³ at 35 and 5 °C; 1025 is common practice',
     watch: 'low',
     cautions: [...always],
     safeFillPercent: 100,

@@ -1,0 +1,78 @@
+import { liquids } from '../liquid/liquids';
+import { formatLengthWithUnit } from '../units/format-length';
+import { mmPerInch, type LengthUnit } from '../units/length-unit';
+import { volumeUnitSigns } from '../units/volume-unit';
+import type { ChartDigits } from './chart-digits';
+import type { ChartInput } from './chart-input';
+import type { ChartLevels } from './chart-levels';
+import type { ChartFigure } from './chart-report';
+
+/** The box at the head: brim, safe fill, unusable, usable, each under its own name and with its ±. */
+export function chartFigures(
+  { settings, options, heightMm }: ChartInput,
+  levels: ChartLevels,
+  digits: ChartDigits,
+): ChartFigure[] {
+  const figure = (
+    label: string,
+    litres: number,
+    plusMinusL: number,
+    detail: string,
+  ): ChartFigure => ({
+    label,
+    figure: digits.volume(litres),
+    plusMinus: digits.plusMinus(plusMinusL),
+    unit: volumeUnitSigns[options.volume],
+    detail,
+  });
+  const atBrim = levels.at(heightMm).plusMinusL;
+  const atSafeFill = levels.safeFillMm === null ? atBrim : levels.at(levels.safeFillMm).plusMinusL;
+  const atOutlet = levels.outletMm === null ? 0 : levels.at(levels.outletMm).plusMinusL;
+  const brim = figure(
+    'Brim, computed',
+    levels.capacityL,
+    atBrim,
+    `${digits.mass(massOf(levels, levels.capacityL))} kg when full`,
+  );
+  const safe = figure(
+    `Safe fill, ${settings.safeFillPercent} % of brim`,
+    levels.safeFillL,
+    atSafeFill,
+    levels.safeFillMm === null
+      ? 'above the stick'
+      : `stop at ${stopReading(levels.safeFillMm, options.length)}`,
+  );
+  const unusable =
+    levels.outletMm === null
+      ? {
+          ...figure('Unusable', 0, 0, 'no outlet height given'),
+          figure: 'not known',
+          plusMinus: null,
+          unit: '',
+        }
+      : figure(
+          'Unusable',
+          levels.unusableL,
+          atOutlet,
+          `below the outlet at ${formatLengthWithUnit(levels.outletMm, options.length)}`,
+        );
+  const usable = figure(
+    'Usable',
+    Math.max(0, levels.safeFillL - levels.unusableL),
+    Math.hypot(atSafeFill, atOutlet),
+    levels.outletMm === null ? 'up to safe fill' : 'from outlet to safe fill',
+  );
+  return liquids[settings.liquid].watch === 'high'
+    ? [safe, brim, unusable, usable]
+    : [brim, safe, unusable, usable];
+}
+
+function massOf({ densityKgPerM3 }: ChartLevels, litres: number): number {
+  return (litres * densityKgPerM3) / 1000;
+}
+
+/** The mark to stop filling at: rounded down to a mark of the stick, never past the level itself. */
+export function stopReading(mm: number, unit: LengthUnit): string {
+  const mark = unit === 'in' ? mmPerInch / 8 : 1;
+  return formatLengthWithUnit(Math.floor(mm / mark + 1e-6) * mark, unit, unit === 'cm' ? 1 : 0);
+}

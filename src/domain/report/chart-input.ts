@@ -1,0 +1,39 @@
+import type { Installation } from '../installation/installation';
+import type { Preview } from '../table/preview';
+import type { IssuedRow } from '../table/request';
+import type { TankDocument } from '../tank/document';
+import type { TankSettings } from '../tank/settings';
+import type { ChartOptions } from './chart-options';
+
+/** One frozen revision and its surroundings: all that a chart is made from. */
+export interface ChartInput {
+  workshopName: string;
+  installation: Pick<Installation, 'name' | 'kind'>;
+  tankName: string;
+  revision: {
+    letter: string;
+    /** ISO 8601 instant. */
+    issuedAt: string;
+    /** Name of the person. */
+    issuedBy: string;
+    /** Letter of the revision before it. */
+    replaces: string | null;
+    note: string | null;
+    /** SHA-256, hex. */
+    hash: string;
+    /** false once a later letter stands: the print then says so. */
+    current: boolean;
+  };
+  /** As frozen into the revision. */
+  design: TankDocument;
+  settings: TankSettings;
+  heightMm: number;
+  /** dLevel/dReading: 1 unless a tank with a stick stands tilted. */
+  levelPerReading: number;
+  capacityL: number;
+  errorL: number;
+  rows: readonly IssuedRow[];
+  /** The shape as a mesh, for the sketch; null leaves the sketch out. */
+  preview: Pick<Preview, 'space' | 'frame'> | null;
+  options: ChartOptions;
+}

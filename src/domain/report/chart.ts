@@ -1,0 +1,91 @@
+import { invalid } from '../errors';
+import { cautions } from '../liquid/cautions';
+import { liquids } from '../liquid/liquids';
+import { lengthUnitWords } from '../units/length-unit';
+import { volumeUnitWords } from '../units/volume-unit';
+import { chartDigits } from './chart-digits';
+import { chartFigures } from './chart-figures';
+import type { ChartInput } from './chart-input';
+import { chartLevels } from './chart-levels';
+import { chartNotes } from './chart-notes';
+import type { ChartReport } from './chart-report';
+import { chartColumns, chartRows } from './chart-rows';
+import { chartStick } from './chart-stick';
+import { printDate } from './print-date';
+import { sketchOf } from './sketch';
+
+/** Most rows of one print: a larger step is asked for beyond it. */
+const mostChartRows = 2000;
+
+/**
+ * The chart of a frozen revision as plain data: every word and figure in its print form. Pure; the
+ * same input gives the same report. Throws `invalid` when the chosen step gives too many rows.
+ */
+export function buildChart(input: ChartInput): ChartReport {
+  const { options, revision, settings, heightMm } = input;
+  if (options.stepMm !== undefined && heightMm / options.stepMm > mostChartRows) {
+    throw invalid(
+      '/stepMm',
+      `A chart has at most ${mostChartRows} rows: choose a step of ${Math.ceil(heightMm / mostChartRows)} mm or more.`,
+    );
+  }
+  const levels = chartLevels(input);
+  const digits = chartDigits(options.volume, levels.largestPlusMinusL, levels.densityKgPerM3);
+  const sketch = input.preview === null ? null : sketchOf(input.preview.space, input.preview.frame);
+  const columns = chartColumns(input);
+  const liquid = liquids[settings.liquid].name;
+  const date = printDate(revision.issuedAt);
+  return {
+    paper: options.paper,
+    title: `${input.tankName}, ${input.installation.name}: dip chart, revision ${revision.letter}`,
+    author: input.workshopName,
+    issuedAt: revision.issuedAt,
+    liquid,
+    tank: input.tankName,
+    installation: input.installation.name,
+    workshop: input.workshopName,
+    lengthWords: lengthUnitWords[options.length],
+    volumeWords: volumeUnitWords[options.volume],
+    revision: `Revision ${revision.letter}`,
+    superseded: revision.current
+      ? null
+      : `Superseded: a later revision than ${revision.letter} stands. Do not use this print.`,
+    box: chartFigures(input, levels, digits),
+    stick: chartStick(input, levels, digits),
+    sketch,
+    columns,
+    rows: chartRows(input, levels, digits, columns),
+    notes: withRevisionNote(chartNotes(input, sketch), revision.note),
+    trade: cautions['not-for-trade'],
+    titleBlock: [
+      { label: 'Tank', text: input.tankName },
+      { label: kindLabels[input.installation.kind], text: input.installation.name },
+      { label: 'Workshop', text: input.workshopName },
+      {
+        label: 'Revision',
+        text:
+          revision.replaces === null
+            ? `${revision.letter}, first issue`
+            : `${revision.letter}, replaces ${revision.replaces}`,
+      },
+      { label: 'Issued', text: `${date}, ${revision.issuedBy}` },
+      { label: 'Table code', text: shortHash(revision.hash) },
+    ],
+  };
+}
+
+const kindLabels = { vehicle: 'Vehicle', boat: 'Boat', place: 'Place' } as const;
+
+/** The first eight digits of the revision's hash, in two groups: enough to tell two tables apart by eye. */
+function shortHash(hash: string): string {
+  return `${hash.slice(0, 4)} ${hash.slice(4, 8)}`;
+}
+
+function withRevisionNote(notes: ChartReport['notes'], note: string | null): ChartReport['notes'] {
+  if (note === null || note.trim() === '') return notes;
+  return notes.map((entry, index) =>
+    index === 1
+      ? { ...entry, sentences: [...entry.sentences, `Note of this revision: ${note.trim()}`] }
+      : entry,
+  );
+}
