@@ -30,7 +30,7 @@ export interface SentForm<In extends FieldValues, Out> {
 export function useSentForm<In extends FieldValues, Out, Answer>(options: {
   schema: z.ZodType<Out, In>;
   /** Every field of the form, in the order shown. */
-  defaults: DefaultValues<In>;
+  defaults: DefaultValues<NoInfer<In>>;
   send: (values: Out) => Promise<Answer>;
   done: (answer: Answer) => void;
   /** The server's name of a field, if it is not the form's: `/settings/outletMm` → `outletMm`. */

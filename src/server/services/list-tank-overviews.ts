@@ -1,0 +1,34 @@
+import { requirePermission } from '~/domain/access/permissions';
+import type { TankDocument } from '~/domain/tank/document';
+import type { Actor, Context } from '../context';
+import { draftDesigns, handedOverAmong } from '../database/repositories/tank-overviews';
+import { listTankRecords } from '../database/repositories/tanks';
+import { scopeOf } from './scope-of';
+
+/** What the workshop home shows of a tank beside its record. */
+export interface TankOverview {
+  /** The draft, for its silhouette. */
+  design: TankDocument | null;
+  handedOver: boolean;
+}
+
+/** By tank; for members who may read drafts. */
+export async function listTankOverviews(context: Context, actor: Actor): Promise<Map<string, TankOverview>> {
+  requirePermission(actor.role, 'design.read');
+  const scope = scopeOf(context, actor);
+  const ids = (await listTankRecords(scope)).map(({ id }) => id);
+  const designs = await draftDesigns(scope, ids);
+  const handedOver = await handedOverAmong(scope, ids);
+  return new Map(
+    ids.map((id) => {
+      const design = designs.get(id);
+      return [
+        id,
+        {
+          design: design === undefined ? null : (JSON.parse(design) as TankDocument),
+          handedOver: handedOver.has(id),
+        },
+      ];
+    }),
+  );
+}
