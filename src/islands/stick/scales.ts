@@ -1,17 +1,22 @@
-import type { Scale } from './Stick';
+import { mmPerLengthUnit, type LengthUnit } from "~/domain/units/length-unit";
+import {
+  litresPerVolumeUnit,
+  volumeUnitSigns,
+  volumeUnits,
+  type VolumeUnit,
+} from "~/domain/units/volume-unit";
+import type { Scale } from "./Stick";
 
-export type LengthUnit = 'mm' | 'cm' | 'in';
-export type VolumeUnit = 'l' | 'usgal' | 'impgal';
-
-/** Scales of the stick by unit. Inch 25.4 mm, US gallon 3.785411784 L, imperial 4.54609 L: exact. */
+/** Scales of the stick by unit. */
 export const lengthScales: Record<LengthUnit, Scale> = {
-  mm: { per: 1, label: 'mm' },
-  cm: { per: 10, label: 'cm' },
-  in: { per: 25.4, label: 'in', eighths: true },
+  mm: { per: mmPerLengthUnit.mm, label: "mm" },
+  cm: { per: mmPerLengthUnit.cm, label: "cm" },
+  in: { per: mmPerLengthUnit.in, label: "in", eighths: true },
 };
 
-export const volumeScales: Record<VolumeUnit, Scale> = {
-  l: { per: 1, label: 'L' },
-  usgal: { per: 3.785411784, label: 'US gal' },
-  impgal: { per: 4.54609, label: 'imp gal' },
-};
+export const volumeScales = Object.fromEntries(
+  volumeUnits.map((unit) => [
+    unit,
+    { per: litresPerVolumeUnit[unit], label: volumeUnitSigns[unit] },
+  ]),
+) as Record<VolumeUnit, Scale>;
