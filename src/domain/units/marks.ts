@@ -15,11 +15,17 @@ export interface Marks {
  * @param mostFine most fine marks that fit
  * @param eighths true for a scale in inches
  */
-export function marksFor(span: number, most: number, mostFine: number, eighths = false): Marks {
+export function marksFor(
+  span: number,
+  most: number,
+  mostFine: number,
+  eighths = false,
+): Marks {
   const ladder = eighths ? inchLadder : decimalLadder(span);
   const numbered = ladder.find((step) => span / step <= most) ?? span;
   const fine =
-    ladder.find((step) => span / step <= mostFine && divides(step, numbered)) ?? numbered;
+    ladder.find((step) => span / step <= mostFine && divides(step, numbered)) ??
+    numbered;
   return { numbered, fine };
 }
 
@@ -29,7 +35,9 @@ export function multiples(step: number, span: number): number[] {
   return Array.from({ length: count + 1 }, (_, index) => index * step);
 }
 
-const inchLadder = [0.125, 0.25, 0.5, 1, 2, 4, 6, 12, 24, 48, 96, 192, 480, 960];
+const inchLadder = [
+  0.125, 0.25, 0.5, 1, 2, 4, 6, 12, 24, 48, 96, 192, 480, 960,
+];
 
 function decimalLadder(span: number): number[] {
   const lowest = Math.floor(Math.log10(span)) - 3;
