@@ -4,6 +4,7 @@ import { openLocalServer } from '../../db/local-server.mjs';
 import { checkout } from './steps/checkout.mjs';
 import { demoSignIns } from './steps/demo-sign-ins.mjs';
 import { runCommand } from './steps/explain-fault.mjs';
+import { guardDatabase } from './steps/guard-database.mjs';
 import { installPackages } from './steps/install-packages.mjs';
 import { localSettings, webAddress } from './steps/local-settings.mjs';
 import { requireNode } from './steps/node-version.mjs';
@@ -30,9 +31,12 @@ await runCommand(async () => {
       { cwd: checkout, env: { ...process.env, ASTRO_TELEMETRY_DISABLED: '1', ...settings }, stdio: ['ignore', 'inherit', 'inherit'] },
     );
     const ended = new Promise((resolve) => child.once('exit', resolve));
-    await Promise.race([stop.asked, ended]);
+    const guard = guardDatabase(database);
+    const why = await Promise.race([stop.asked, ended.then(() => ({})), guard.lost]);
+    guard.end();
     child.kill('SIGTERM');
     await ended;
+    if (why.lost) throw why.lost;
   } finally {
     await database.stop();
   }

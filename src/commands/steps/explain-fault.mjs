@@ -1,4 +1,5 @@
 import { StartFault } from '../../../db/local/start-fault.mjs';
+import { endRunningPrograms } from './run-program.mjs';
 
 /**
  * Any error of a command as one sentence and a next step, without a stack.
@@ -40,5 +41,8 @@ export async function runCommand(command) {
     process.stderr.write(`\n${sentence}\n${nextStep}\n`);
     if (process.env.DIPWRIGHT_SHOW_STACK) process.stderr.write(`${error?.stack ?? ''}\n`);
     process.exitCode = 1;
+  } finally {
+    endRunningPrograms();
   }
+  process.exit();
 }

@@ -10,7 +10,7 @@ import { hostFault } from './host-allow-list';
 import { discardRest, readBody } from './read-body';
 import { refusals, refuse, tooLarge, type Refusal } from './refuse';
 import { requestPath } from './request-path';
-import { mayAct } from './same-site';
+import { isFormBody, mayAct } from './same-site';
 import { securityHeaders } from './security-headers';
 import { shapeResponse } from './shape-response';
 import type { StaticFiles } from './static-files';
@@ -56,7 +56,7 @@ export function createFront({ config, log, state, files, handler }: FrontParts) 
     const method = request.method ?? '';
     const say = (refusal: Refusal) => refuse(refusal, request, response, requestId);
 
-    const fault = hostFault(request.headers.host, config.http.allowedHosts);
+    const fault = hostFault(request.rawHeaders, config.http.allowedHosts);
     if (fault) return say(fault === 400 ? refusals.malformedHost : refusals.foreignHost);
     const path = requestPath(request.url);
     if (path === null) return say(refusals.malformedPath);
@@ -74,6 +74,7 @@ export function createFront({ config, log, state, files, handler }: FrontParts) 
       return say(refusals.otherSite);
     }
     if (!reads) {
+      if (isFormBody(request.headers)) return say(refusals.formBody);
       const cap = bodyCap(path);
       const body = await readBody(request, cap);
       if (body === 'gone') return void response.destroy();

@@ -39,6 +39,12 @@ export const refusals = {
     code: 'forbidden',
     detail: 'This request came from another site and was not carried out.',
   },
+  formBody: {
+    status: 415,
+    title: 'Unsupported media type',
+    code: 'bad-request',
+    detail: 'Send JSON, with the header Content-Type: application/json.',
+  },
   notFound: {
     status: 404,
     title: 'Not found',

@@ -21,3 +21,17 @@ export function mayAct(
   if (origin !== undefined) return origins.includes(origin);
   return headers.cookie === undefined;
 }
+
+/**
+ * Is this a body that a plain form of any site could send without asking? The API takes none.
+ * Astro would refuse some of them by a rule of its own, with an answer that is no problem+json.
+ */
+export function isFormBody(headers: IncomingHttpHeaders): boolean {
+  const type = headers['content-type']?.split(';', 1)[0]?.trim().toLowerCase();
+  if (type === undefined) return hasBody(headers);
+  return ['application/x-www-form-urlencoded', 'multipart/form-data', 'text/plain'].includes(type);
+}
+
+function hasBody(headers: IncomingHttpHeaders): boolean {
+  return headers['transfer-encoding'] !== undefined || Number(headers['content-length'] ?? 0) > 0;
+}
