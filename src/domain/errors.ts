@@ -13,6 +13,8 @@ export const errorCodes = [
   'precondition-failed', // somebody saved first
   'precondition-required', // a save without If-Match
   'too-large',
+  'unsupported-media-type',
+  'method-not-allowed',
   'rate-limited',
   'unavailable',
 ] as const;
