@@ -1,6 +1,6 @@
-import { kindOf, type Solid } from '~/domain/tank/kinds/registry';
 import type { TankDocument } from '~/domain/tank/document';
-import { directionToOwn, placing, type Placing } from '~/geometry/placing';
+import type { Solid } from '~/domain/tank/kinds/registry';
+import { highestLevel, placedSolid } from '~/domain/tank/placed-solid';
 
 /** A tank from its side or its end, mm, x to the right and y down, as paths of its solids. */
 export interface SilhouetteDrawing {
@@ -67,12 +67,11 @@ function view(solids: readonly Solid[], across: 0 | 1): View {
 
 /** Where neighbouring tangents meet: the corners, each once. */
 function outlineOf(solid: Solid, across: 0 | 1): Point[] {
-  const kind = kindOf(solid);
-  const place = placing(solid.at ?? [0, 0, 0], kind.extent(solid), solid.turn ?? [0, 0, 0]);
+  const placed = placedSolid(solid);
   const lines = Array.from({ length: directions }, (_, i) => {
     const angle = (2 * Math.PI * i) / directions;
     const [c, s] = [Math.cos(angle), Math.sin(angle)];
-    return { c, s, reach: reachOf(solid, place, across === 0 ? [c, 0, s] : [0, c, s]) };
+    return { c, s, reach: highestLevel(placed, across === 0 ? [c, 0, s] : [0, c, s]) };
   });
   const points: Point[] = [];
   lines.forEach((a, i) => {
@@ -85,11 +84,6 @@ function outlineOf(solid: Solid, across: 0 | 1): Point[] {
     if (last === undefined || Math.hypot(last[0] - x, last[1] + z) > 1e-6) points.push([x, -z]);
   });
   return points;
-}
-
-function reachOf(solid: Solid, place: Placing, u: readonly [number, number, number]): number {
-  const own = kindOf(solid).support(solid, directionToOwn(place, u));
-  return own + u[0] * place.centre[0] + u[1] * place.centre[1] + u[2] * place.centre[2];
 }
 
 function filledShare(outlines: readonly Outline[], frame: Frame): number {

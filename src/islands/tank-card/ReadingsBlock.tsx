@@ -1,8 +1,7 @@
-import { formatLength, formatLengthWithUnit } from '~/domain/units/format-length';
-import { formatVolume } from '~/domain/units/format-volume';
-import { volumeUnitSigns } from '~/domain/units/volume-unit';
+import { formatLengthWithUnit } from '~/domain/units/format-length';
 import { Moment } from '../shared/Moment';
 import type { UnitsPreference } from '../shared/units-preference';
+import { ReadingsTable } from './ReadingsTable';
 import type { Readings } from './use-readings';
 
 /** Readings that wait to be sent, then the last ones that were kept. */
@@ -33,36 +32,7 @@ export function ReadingsBlock({ readings, units }: { readings: Readings; units: 
       {readings.kept.length === 0 ? (
         <p className="text-ink-2">None yet. Dip the tank, type the depth and keep it: two dated readings show the use.</p>
       ) : (
-        <div className="overflow-x-auto">
-          <table className="drawn-table">
-            <thead>
-              <tr>
-                <th scope="col">when</th>
-                <th scope="col" className="figure">
-                  depth, {units.length}
-                </th>
-                <th scope="col" className="figure">
-                  usable, {volumeUnitSigns[units.volume]}
-                </th>
-                <th scope="col">by</th>
-              </tr>
-            </thead>
-            <tbody>
-              {readings.kept.slice(0, 8).map((reading) => (
-                <tr key={reading.id}>
-                  <td>
-                    <Moment at={reading.at} />
-                  </td>
-                  <td className="figure">{formatLength(reading.depthMm, units.length)}</td>
-                  <td className="figure">{formatVolume(reading.usableL, units.volume, reading.plusMinusL)}</td>
-                  <td>
-                    {reading.by}, table {reading.revision}
-                  </td>
-                </tr>
-              ))}
-            </tbody>
-          </table>
-        </div>
+        <ReadingsTable readings={readings.kept.slice(0, 8)} units={units} />
       )}
     </section>
   );

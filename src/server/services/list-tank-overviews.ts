@@ -1,7 +1,8 @@
 import { requirePermission } from '~/domain/access/permissions';
 import type { TankDocument } from '~/domain/tank/document';
 import type { Actor, Context } from '../context';
-import { draftDesigns, handedOverAmong } from '../database/repositories/tank-overviews';
+import { currentRevisions } from '../database/repositories/revisions';
+import { draftDesigns, handedOverAmong, plusMinusAtTop } from '../database/repositories/tank-overviews';
 import { listTankRecords } from '../database/repositories/tanks';
 import { scopeOf } from './scope-of';
 
@@ -10,6 +11,8 @@ export interface TankOverview {
   /** The draft, for its silhouette. */
   design: TankDocument | null;
   handedOver: boolean;
+  /** ± of the brim of the current revision, litres; null while only a draft stands. */
+  brimPlusMinusL: number | null;
 }
 
 /** By tank; for members who may read drafts. */
@@ -19,6 +22,8 @@ export async function listTankOverviews(context: Context, actor: Actor): Promise
   const ids = (await listTankRecords(scope)).map(({ id }) => id);
   const designs = await draftDesigns(scope, ids);
   const handedOver = await handedOverAmong(scope, ids);
+  const revisions = await currentRevisions(scope, ids);
+  const plusMinus = await plusMinusAtTop(scope, [...revisions.values()]);
   return new Map(
     ids.map((id) => {
       const design = designs.get(id);
@@ -27,6 +32,7 @@ export async function listTankOverviews(context: Context, actor: Actor): Promise
         {
           design: design === undefined ? null : (JSON.parse(design) as TankDocument),
           handedOver: handedOver.has(id),
+          brimPlusMinusL: plusMinus.get(revisions.get(id)?.id ?? '') ?? null,
         },
       ];
     }),

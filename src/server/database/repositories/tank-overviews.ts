@@ -1,4 +1,6 @@
+import { Op } from 'sequelize';
 import type { Scope } from '../scope';
+import type { RevisionHead } from './revisions';
 
 /** The drafts' designs by tank, as stored. */
 export async function draftDesigns(scope: Scope, tankIds: readonly string[]): Promise<Map<string, string>> {
@@ -18,4 +20,15 @@ export async function handedOverAmong(scope: Scope, tankIds: readonly string[]):
     transaction: scope.transaction,
   });
   return new Set(found.map((handover) => handover.get().tankId));
+}
+
+/** ± of the litres at the last row of each of these revisions, by revision. */
+export async function plusMinusAtTop(scope: Scope, revisions: readonly RevisionHead[]): Promise<Map<string, number>> {
+  if (revisions.length === 0) return new Map();
+  const found = await scope.database.models.strappingRows.findAll({
+    where: { [Op.or]: revisions.map(({ id, rowCount }) => ({ revisionId: id, rowNo: rowCount - 1 })) },
+    attributes: ['revisionId', 'plusMinusL'],
+    transaction: scope.transaction,
+  });
+  return new Map(found.map((row) => [row.get().revisionId, row.get().plusMinusL]));
 }
