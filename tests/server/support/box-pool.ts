@@ -1,0 +1,65 @@
+import { invalid } from '~/domain/errors';
+import type { IssuedRow, TableRow } from '~/domain/table/request';
+import type { TankDocument } from '~/domain/tank/document';
+import type { ComputePool } from '~/server/jobs/compute-pool';
+
+/**
+ * Tables of a single upright box by closed form, V = length × width × depth, without threads: for
+ * tests of what stands around the geometry. Refuses everything else.
+ */
+export function boxPool(): ComputePool {
+  return {
+    async table(design, readings) {
+      const { areaMm2, heightMm } = boxOf(design);
+      const depths = 'atMm' in readings ? readings.atMm : stepped(heightMm, readings.stepMm);
+      return { ...totals(areaMm2, heightMm), rows: depths.map((depthMm) => rowAt(areaMm2, depthMm)) };
+    },
+    async issue(design, _settings, stepMm) {
+      const { areaMm2, heightMm } = boxOf(design);
+      const table = {
+        ...totals(areaMm2, heightMm),
+        rows: stepped(heightMm, stepMm).map((depthMm) => rowAt(areaMm2, depthMm)),
+      };
+      return { table, rows: table.rows.map(withPlusMinus) };
+    },
+    async close() {},
+  };
+}
+
+function boxOf(design: TankDocument): { areaMm2: number; heightMm: number } {
+  const [solid, another] = design.solids;
+  if (solid?.kind !== 'box' || another !== undefined) {
+    throw invalid('/design/solids', 'This test pool computes one box only.');
+  }
+  return { areaMm2: solid.length * solid.width, heightMm: solid.height };
+}
+
+function stepped(heightMm: number, stepMm: number): number[] {
+  const count = Math.ceil(heightMm / stepMm - 1e-9);
+  return [...Array.from({ length: count }, (_, index) => index * stepMm), heightMm];
+}
+
+function totals(areaMm2: number, heightMm: number) {
+  return {
+    capacityL: (areaMm2 * heightMm) / 1e6,
+    heightMm,
+    errorL: 0,
+    triangles: 12,
+    undrainableL: 0,
+    trappedL: 0,
+  };
+}
+
+function rowAt(areaMm2: number, depthMm: number): TableRow {
+  return {
+    depthMm,
+    volumeL: (areaMm2 * depthMm) / 1e6,
+    surfaceCm2: areaMm2 / 100,
+    centroidMm: [0, 0, depthMm / 2],
+  };
+}
+
+/** The dip's ± of 2 mm alone. */
+function withPlusMinus({ depthMm, volumeL, surfaceCm2 }: TableRow): IssuedRow {
+  return { depthMm, volumeL, surfaceCm2, plusMinusL: 2 * surfaceCm2 * 1e-4 };
+}

@@ -1,0 +1,78 @@
+import type { Actor } from '~/domain/access/actor';
+import type { Role } from '~/domain/access/roles';
+import { createSessions } from '~/server/auth/sessions';
+import { hashPassword } from '~/server/auth/passwords';
+import { readConfig } from '~/server/config';
+import type { Context } from '~/server/context';
+import { newId } from '~/server/database/new-id';
+import { insertMembership } from '~/server/database/repositories/memberships';
+import { insertUser } from '~/server/database/repositories/users';
+import { insertWorkshop } from '~/server/database/repositories/workshops';
+import type { ComputePool } from '~/server/jobs/compute-pool';
+import { createLog } from '~/server/log';
+import { freshDatabase, type FreshDatabase } from '../../support/database';
+import { boxPool } from './box-pool';
+
+export const ownOrigin = 'http://127.0.0.1:4321';
+export const password = 'true-litres-2026';
+
+/** A context over a fresh database, and what a test may want to see of it. */
+export interface House extends FreshDatabase {
+  context: Context;
+  /** Lines of the log, as written. */
+  logged: string[];
+  /** Moves the clock of the context. */
+  later(seconds: number): void;
+}
+
+export async function openHouse(options: { computePool?: ComputePool; tls?: boolean } = {}): Promise<House> {
+  const fresh = await freshDatabase();
+  const logged: string[] = [];
+  let aheadMs = 0;
+  const config = readConfig({
+    DIPWRIGHT_MODE: 'test',
+    DIPWRIGHT_ORIGIN: options.tls === true ? 'https://dipwright.example' : ownOrigin,
+    DIPWRIGHT_DATABASE_HOST: fresh.address.host,
+    DIPWRIGHT_DATABASE_PORT: String(fresh.address.port),
+    DIPWRIGHT_DATABASE_NAME: fresh.address.name,
+    DIPWRIGHT_DATABASE_USER: fresh.address.user,
+    DIPWRIGHT_DATABASE_PASSWORD: fresh.address.password,
+  });
+  const context: Context = {
+    config,
+    log: createLog('info', (line) => logged.push(line)),
+    database: fresh.database,
+    sessions: createSessions(fresh.database, { tls: config.http.tls }),
+    computePool: options.computePool ?? boxPool(),
+    clock: { now: () => new Date(Date.now() + aheadMs) },
+    close: () => fresh.drop(),
+  };
+  return { ...fresh, context, logged, later: (seconds) => (aheadMs += seconds * 1000) };
+}
+
+export type Team = Record<Role, Actor>;
+let workshops = 0;
+
+/** A workshop with a member of every role. */
+export async function addWorkshop(house: House, workshopName = 'Tarnside Outfitters'): Promise<Team> {
+  const { database } = house;
+  const workshopId = newId();
+  const createdAt = new Date();
+  const passwordHash = await hashPassword(password);
+  workshops += 1;
+  await insertWorkshop(database, { id: workshopId, name: workshopName, createdAt });
+  const add = async (role: Role): Promise<Actor> => {
+    const userId = newId();
+    const email = `${role}@w${workshops}.example`;
+    const name = `${role} of ${workshopName}`;
+    await insertUser(database, { id: userId, name, email, passwordHash, createdAt });
+    await insertMembership(database, { workshopId, userId, role, createdAt });
+    return { userId, workshopId, workshopName, role, name, email };
+  };
+  return {
+    manager: await add('manager'),
+    designer: await add('designer'),
+    fitter: await add('fitter'),
+    owner: await add('owner'),
+  };
+}
