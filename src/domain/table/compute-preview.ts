@@ -1,0 +1,60 @@
+import { loadManifold, meshOf } from '../../geometry/manifold';
+import { shifted } from '../../geometry/mesh';
+import { shells } from '../../geometry/shells';
+import { dustOfCapacity, roundingOfCapacity } from '../../geometry/tolerance';
+import type { TankDocument } from '../tank/document';
+import { placedShape, placedSolid } from '../tank/placed-solid';
+import { liquidSpace } from './liquid-space';
+import { openings } from './openings';
+import type { Preview } from './preview';
+import { readingFrame } from './reading-frame';
+import { refuseUncomputable } from './refuse-uncomputable';
+import { tableRows } from './table-rows';
+
+/** Chords to a full turn in the live view; the bound compares with half as many. */
+const previewFacets = 64;
+
+const previewRows = 201;
+
+/**
+ * All that the bench shows of a design, at 64 facets a turn (1e-6 to 5e-5 of capacity). A few solids take
+ * some milliseconds once the WebAssembly is warm. Throws `invalid` like computeTable.
+ */
+export async function computePreview(document: TankDocument): Promise<Preview> {
+  refuseUncomputable(document);
+  await loadManifold();
+  const solids = document.solids.map(placedSolid);
+  const space = liquidSpace(solids, previewFacets);
+  const frame = readingFrame(document, solids, space);
+  const depths = Array.from({ length: previewRows }, (_, i) => (i / (previewRows - 1)) * frame.heightMm);
+  const rows = tableRows(space, frame, depths);
+  const capacityL = space.volumeMm3 / 1e6;
+
+  let errorL = roundingOfCapacity * capacityL;
+  if (solids.some(({ kind }) => kind.curved)) {
+    const coarse = liquidSpace(solids, previewFacets / 2);
+    tableRows(coarse, frame, depths).forEach(({ volumeL }, i) => {
+      errorL = Math.max(errorL, Math.abs(rows[i]!.volumeL - volumeL));
+    });
+  }
+  const pieces = shells(space.mesh).filter(
+    ({ volumeMm3 }) => volumeMm3 > dustOfCapacity * space.volumeMm3,
+  ).length;
+  const { undrainableL, trappedL } = openings(document, solids, space, frame.up);
+  return {
+    space: shifted(space.mesh, space.origin),
+    solids: solids.map((one) => ({
+      id: one.solid.id,
+      role: one.solid.role,
+      ...shifted(meshOf(placedShape(one, previewFacets), space.origin), space.origin),
+    })),
+    frame,
+    capacityL,
+    errorL,
+    undrainableL,
+    trappedL,
+    pieces,
+    rows,
+    notices: pieces > 1 ? [`The liquid space is in ${pieces} pieces.`] : [],
+  };
+}

@@ -1,0 +1,34 @@
+import { thinMm } from '../../geometry/tolerance';
+import { DipwrightError, type FieldFault } from '../errors';
+import type { TankDocument } from '../tank/document';
+import { kindOf, type Solid } from '../tank/kinds/registry';
+import { valueAt } from '../tank/value-at';
+
+/**
+ * Throws `invalid` for what the document format allows but nobody can compute: sizes that are nothing,
+ * options of a kind that contradict each other, outside sizes (not computed yet). Every fault is listed.
+ */
+export function refuseUncomputable(document: TankDocument): void {
+  const faults: FieldFault[] = document.solids.flatMap((solid, index) =>
+    faultsOf(solid).map(({ path, detail }) => ({
+      pointer: `/solids/${index}/${path.join('/')}`,
+      detail: `Solid "${solid.id}", ${path.join(' ')}: ${detail}`,
+    })),
+  );
+  if (document.wall?.sizes === 'outside') {
+    faults.push({
+      pointer: '/wall/sizes',
+      detail: 'Wall, sizes: outside sizes are not computed yet: give inside sizes.',
+    });
+  }
+  if (faults.length > 0) throw new DipwrightError('invalid', faults[0]!.detail, { faults });
+}
+
+function faultsOf(solid: Solid): readonly { path: readonly string[]; detail: string }[] {
+  const kind = kindOf(solid);
+  const tooSmall = kind
+    .sizes(solid)
+    .filter(({ path }) => Number(valueAt(solid, path)) < thinMm)
+    .map(({ path }) => ({ path, detail: `a size is at least ${thinMm} mm.` }));
+  return [...tooSmall, ...kind.faults(solid)];
+}
