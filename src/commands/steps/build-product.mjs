@@ -43,7 +43,6 @@ function buildFault(output) {
   if (/ENOSPC|no space left/i.test(output)) {
     return new StartFault('The disk is full: the product could not be built.', 'Free at least 1 GB, then run the command again. The data is kept.');
   }
-  // eslint-disable-next-line no-control-regex
   const lines = output.replace(/\u001b\[[0-9;]*m/g, '').split('\n').map((line) => line.trim());
   const at = lines.findLastIndex((line) => /error/i.test(line));
   const why = lines.slice(Math.max(0, at)).filter((line) => line && !line.startsWith('at ')).slice(0, 3).join(' ');

@@ -12,7 +12,6 @@ export function requestPath(target: string | undefined): string | null {
   } catch {
     return null;
   }
-  // eslint-disable-next-line no-control-regex
   if (/[\\\u0000-\u001f\u007f]/.test(path)) return null;
   return path.split('/').some((part) => part === '..' || part === '.') ? null : path;
 }
