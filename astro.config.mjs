@@ -9,6 +9,8 @@ import { serverEntryPlugin } from './src/commands/build/server-entry-plugin.mjs'
 // docs/decisions/0200 and 0201 say why our own entry stands in front and how the CSP is made.
 export default defineConfig({
   output: 'server',
+  // npm start and npm test give each build a folder of its own beside this one.
+  outDir: './dist/by-hand',
   adapter: node({ mode: 'middleware' }),
   integrations: [react(), computeWorkerBuild(), precompress()],
   security: {

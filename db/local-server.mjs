@@ -7,9 +7,9 @@ import { answers, daemonPaths, makeSystemTables, runningDaemon, startDaemon, sto
 import { dataFolder } from './local/data-folder.mjs';
 import { ensurePrograms } from './local/debian-packages.mjs';
 import { withFolderLock } from './local/folder-lock.mjs';
+import { isFolderUsed, joinFolder, leaveFolder } from './local/folder-users.mjs';
 import { anyFreePort, portState } from './local/free-port.mjs';
 import { processIdentity } from './local/process-identity.mjs';
-import { joinServer, leaveServer } from './local/server-users.mjs';
 import { StartFault } from './local/start-fault.mjs';
 
 /**
@@ -31,7 +31,7 @@ export async function openLocalServer({ checkout, name, database, scratchPrefix,
   let running = await withFolderLock(folder, async () => {
     const opened = await findOrStart(place);
     ensureAccount(folder, opened.credentials, { database, scratchPrefix });
-    joinServer(folder);
+    joinFolder(folder);
     return opened;
   });
   const { socket, log } = daemonPaths(folder);
@@ -57,7 +57,8 @@ export async function openLocalServer({ checkout, name, database, scratchPrefix,
     /** Stops it, unless another living command uses it. */
     async stop() {
       await withFolderLock(folder, async () => {
-        if (leaveServer(folder)) await stopDaemon(running.pid);
+        leaveFolder(folder);
+        if (!isFolderUsed(folder)) await stopDaemon(running.pid);
       });
     },
   };

@@ -25,8 +25,8 @@ await runCommand(async () => {
   try {
     const settings = localSettings(database);
     await stop.during(prepareData(checkout, settings));
-    await stop.during(buildProduct(checkout));
-    const web = await startWebServer(checkout, settings);
+    const build = await stop.during(buildProduct(checkout));
+    const web = await startWebServer(checkout, build, settings);
     say(`\nDipwright answers on ${address.origin}\n\n${demoSignIns}\n\nStop with Ctrl-C; all data is kept.`);
 
     const guard = guardDatabase(database);

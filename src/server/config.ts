@@ -98,11 +98,8 @@ function withoutEmpty(env: Record<string, string | undefined>): Record<string, s
 }
 
 function wholeNumber(least: number, most: number) {
-  return z
-    .string()
-    .regex(/^\d+$/, `must be a whole number from ${least} to ${most}`)
-    .transform(Number)
-    .refine((value) => value >= least && value <= most, `must be a whole number from ${least} to ${most}`);
+  const inRange = (text: string) => /^\d{1,9}$/.test(text) && Number(text) >= least && Number(text) <= most;
+  return z.string().refine(inRange, `must be a whole number from ${least} to ${most}`).transform(Number);
 }
 
 function isOrigin(value: string): boolean {

@@ -12,7 +12,9 @@ import { say } from './say.mjs';
 export async function installPackages(checkout) {
   const stampFile = join(checkout, 'node_modules', '.dipwright-installed');
   const wanted = stampOf(checkout);
-  if (readStamp(stampFile) === wanted) return;
+  const last = readStamp(stampFile);
+  if (last === wanted) return;
+  if (last === null && installedByHand(checkout)) return writeFileSync(stampFile, wanted);
   say('Installing the npm packages (one to two minutes, once).');
   const { code, output } = await runProgram(
     'npm',
@@ -26,6 +28,20 @@ export async function installPackages(checkout) {
 function stampOf(checkout) {
   const lock = readFileSync(join(checkout, 'package-lock.json'));
   return createHash('sha256').update(lock).update(process.version).digest('hex');
+}
+
+/** Did a person run `npm ci` before? npm notes in node_modules what it put there. */
+function installedByHand(checkout) {
+  const packagesOf = (file) => JSON.parse(readFileSync(join(checkout, file), 'utf8')).packages;
+  try {
+    const installed = packagesOf('node_modules/.package-lock.json');
+    const wanted = packagesOf('package-lock.json');
+    const same = (path) => installed[path]?.version === wanted[path].version && installed[path]?.integrity === wanted[path].integrity;
+    // Packages for other machines (optional, by system or processor) are in the lock file only.
+    return Object.keys(wanted).every((path) => path === '' || wanted[path].optional || same(path));
+  } catch {
+    return false;
+  }
 }
 
 function readStamp(file) {

@@ -6,10 +6,11 @@ import { StartFault } from '../../../db/local/start-fault.mjs';
  * Starts the built product and waits until it serves. The channel between the two ends with either,
  * so that a web server whose command was killed leaves by itself.
  * @param {string} checkout
+ * @param {string} build folder of the build
  * @param {Record<string, string>} settings
  */
-export async function startWebServer(checkout, settings) {
-  const child = fork(join(checkout, 'dist', 'server', 'dipwright.mjs'), [], {
+export async function startWebServer(checkout, build, settings) {
+  const child = fork(join(build, 'server', 'dipwright.mjs'), [], {
     cwd: checkout,
     env: { ...process.env, NODE_ENV: 'production', ...settings },
     execArgv: ['--enable-source-maps'],

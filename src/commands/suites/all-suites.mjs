@@ -18,24 +18,18 @@ export function allSuites(checkout, server) {
   return [
     { name: 'structure', usual: true, run: vitest('structure') },
     { name: 'lint', usual: true, run: program('lint', tool('eslint', 'bin', 'eslint.js'), '--max-warnings=0', '.') },
-    { name: 'types', usual: true, run: program('types', tool('astro', 'astro.js'), 'check', '--minimumFailingSeverity', 'error') },
+    { name: 'pages', usual: true, run: program('pages', tool('astro', 'astro.js'), 'check') },
+    { name: 'types', usual: true, run: program('types', tool('typescript', 'bin', 'tsc'), '--noEmit') },
     { name: 'unit', usual: true, run: vitest('unit') },
     { name: 'dom', usual: true, run: vitest('dom') },
     { name: 'server', usual: true, run: vitest('server') },
-    {
-      name: 'browser',
-      usual: true,
-      run: async (args) => {
-        await buildProduct(checkout);
-        return browserSuite(checkout, server, args);
-      },
-    },
+    { name: 'browser', usual: true, run: (args) => browserSuite(checkout, server, args) },
     {
       name: 'long',
       usual: false,
       run: async (args) => {
-        await buildProduct(checkout);
-        return vitest('long')(args);
+        const build = await buildProduct(checkout);
+        return vitestSuite(checkout, 'long', { ...testDatabaseEnvironment(server), DIPWRIGHT_TEST_BUILD: build }, args);
       },
     },
   ];

@@ -3,6 +3,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { anyFreePort } from '../../../db/local/free-port.mjs';
 import { findProgram } from '../../../db/local/debian-packages.mjs';
+import { buildProduct } from '../steps/build-product.mjs';
 import { localSettings } from '../steps/local-settings.mjs';
 import { prepareData } from '../steps/prepare-data.mjs';
 import { runProgram } from '../steps/run-program.mjs';
@@ -17,6 +18,7 @@ import { dropDatabase, makeDatabase } from './scratch-database.mjs';
  * @returns {Promise<import('./vitest-suite.mjs').SuiteResult>}
  */
 export async function browserSuite(checkout, server, args = []) {
+  const build = await buildProduct(checkout);
   const database = `dipwright_test_browser_${process.pid}`;
   const port = await anyFreePort();
   const settings = {
@@ -31,7 +33,7 @@ export async function browserSuite(checkout, server, args = []) {
   let web;
   try {
     await prepareData(checkout, settings);
-    web = await startWebServer(checkout, settings);
+    web = await startWebServer(checkout, build, settings);
     const file = join(folder, 'result.json');
     const { code } = await runProgram(
       process.execPath,
