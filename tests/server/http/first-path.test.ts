@@ -1,13 +1,14 @@
 import { afterAll, beforeAll, expect, it } from 'vitest';
 import { boxDesign } from '../support/box-design';
 import { callApi, signInAs } from '../support/call-api';
-import { addWorkshop, openHouse, password, type House, type Team } from '../support/house';
+import type { Team } from '../../../db/seeds/add-workshop';
+import { addTestWorkshop, openHouse, password, type House } from '../support/house';
 
 let house: House;
 let team: Team;
 beforeAll(async () => {
   house = await openHouse();
-  team = await addWorkshop(house);
+  team = await addTestWorkshop(house);
 });
 afterAll(() => house.drop());
 

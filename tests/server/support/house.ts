@@ -1,15 +1,10 @@
-import type { Actor } from '~/domain/access/actor';
 import type { Role } from '~/domain/access/roles';
 import { createSessions } from '~/server/auth/sessions';
-import { hashPassword } from '~/server/auth/passwords';
 import { readConfig } from '~/server/config';
 import type { Context } from '~/server/context';
-import { newId } from '~/server/database/new-id';
-import { insertMembership } from '~/server/database/repositories/memberships';
-import { insertUser } from '~/server/database/repositories/users';
-import { insertWorkshop } from '~/server/database/repositories/workshops';
 import type { ComputePool } from '~/server/jobs/compute-pool';
 import { createLog } from '~/server/log';
+import { addWorkshop, type Team } from '../../../db/seeds/add-workshop';
 import { freshDatabase, type FreshDatabase } from '../../support/database';
 import { boxPool } from './box-pool';
 
@@ -50,29 +45,17 @@ export async function openHouse(options: { computePool?: ComputePool; tls?: bool
   return { ...fresh, context, logged, later: (seconds) => (aheadMs += seconds * 1000) };
 }
 
-export type Team = Record<Role, Actor>;
 let workshops = 0;
 
 /** A workshop with a member of every role. */
-export async function addWorkshop(house: House, workshopName = 'Tarnside Outfitters'): Promise<Team> {
-  const { database } = house;
-  const workshopId = newId();
-  const createdAt = new Date();
-  const passwordHash = await hashPassword(password);
+export async function addTestWorkshop(house: House, name = 'Tarnside Outfitters'): Promise<Team> {
   workshops += 1;
-  await insertWorkshop(database, { id: workshopId, name: workshopName, createdAt });
-  const add = async (role: Role): Promise<Actor> => {
-    const userId = newId();
-    const email = `${role}@w${workshops}.example`;
-    const name = `${role} of ${workshopName}`;
-    await insertUser(database, { id: userId, name, email, passwordHash, createdAt });
-    await insertMembership(database, { workshopId, userId, role, createdAt });
-    return { userId, workshopId, workshopName, role, name, email };
+  const person = (role: Role) => ({ name: `${role} of ${name}`, email: `${role}@w${workshops}.example` });
+  const people = {
+    manager: person('manager'),
+    designer: person('designer'),
+    fitter: person('fitter'),
+    owner: person('owner'),
   };
-  return {
-    manager: await add('manager'),
-    designer: await add('designer'),
-    fitter: await add('fitter'),
-    owner: await add('owner'),
-  };
+  return addWorkshop(house.context, { name, password, people });
 }
