@@ -1,11 +1,11 @@
 import { loadManifold, meshOf } from '../../geometry/manifold';
 import { shifted } from '../../geometry/mesh';
-import { shells } from '../../geometry/shells';
-import { dustOfCapacity, roundingOfCapacity } from '../../geometry/tolerance';
+import { roundingOfCapacity } from '../../geometry/tolerance';
 import type { TankDocument } from '../tank/document';
 import { placedShape, placedSolid } from '../tank/placed-solid';
 import { liquidSpace } from './liquid-space';
 import { openings } from './openings';
+import { piecesOf } from './pieces';
 import type { Preview } from './preview';
 import { readingFrame } from './reading-frame';
 import { refuseUncomputable } from './refuse-uncomputable';
@@ -37,9 +37,7 @@ export async function computePreview(document: TankDocument): Promise<Preview> {
       errorL = Math.max(errorL, Math.abs(rows[i]!.volumeL - volumeL));
     });
   }
-  const pieces = shells(space.mesh).filter(
-    ({ volumeMm3 }) => volumeMm3 > dustOfCapacity * space.volumeMm3,
-  ).length;
+  const pieces = piecesOf(space.mesh);
   const { undrainableL, trappedL } = openings(document, solids, space, frame.up);
   return {
     space: shifted(space.mesh, space.origin),

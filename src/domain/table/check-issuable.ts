@@ -1,0 +1,62 @@
+import { loadManifold, spaceOf } from '../../geometry/manifold';
+import { swollen } from '../../geometry/swollen';
+import { thinPlace } from '../../geometry/thin-places';
+import { thinMm } from '../../geometry/tolerance';
+import type { TankDocument } from '../tank/document';
+import { placedShape, placedSolid, type PlacedSolid } from '../tank/placed-solid';
+import { liquidSpace, type LiquidSpace } from './liquid-space';
+import { piecesOf } from './pieces';
+import { refuseUncomputable } from './refuse-uncomputable';
+
+/**
+ * Why a design may not be issued, one sentence a reason; none when it may. Throws `invalid` when it cannot be
+ * computed at all. Refused are a liquid space in pieces; one that is thinner than 0.01 mm, or is parted by
+ * less than that, between two faces that stand parallel within 0.001 rad; and round solids that only touch:
+ * whose count of pieces changes when every radius grows or shrinks by 0.01 mm and what facets stand off.
+ */
+export async function checkIssuable(document: TankDocument): Promise<string[]> {
+  refuseUncomputable(document);
+  await loadManifold();
+  const solids = document.solids.map(placedSolid);
+  const round = solids.filter(({ kind }) => kind.curved).length;
+  const space = liquidSpace(solids, round <= 8 ? 512 : round <= 40 ? 256 : 128);
+  const reasons: string[] = [];
+
+  const pieces = piecesOf(space.mesh);
+  if (pieces > 1) {
+    reasons.push(
+      `The liquid space is in ${pieces} pieces that no opening joins: let the solids that hold overlap, or model one tank at a time.`,
+    );
+  }
+  const thin = thinPlace(space.mesh, thinMm);
+  if (thin) {
+    const at = thin.at.map((value, axis) => Math.round((value + space.origin[axis]!) * 10) / 10);
+    const where = `near x ${at[0]}, y ${at[1]}, z ${at[2]}`;
+    reasons.push(
+      thin.what === 'film'
+        ? `The liquid space is thinner than ${thinMm} mm ${where}: let what displaces reach the wall or stand clear of it.`
+        : `What parts the liquid space is thinner than ${thinMm} mm ${where}: let the solids overlap or part them.`,
+    );
+  }
+  if (round > 0 && [1, -1].some((sign) => piecesWhenSwollen(solids, space, sign) !== pieces)) {
+    reasons.push(
+      'A round solid only touches another along a line: let them overlap or stand clear of each other.',
+    );
+  }
+  return reasons;
+}
+
+function piecesWhenSwollen(solids: readonly PlacedSolid[], space: LiquidSpace, sign: number): number {
+  const shapes = (role: 'holds' | 'displaces', direction: number) =>
+    solids
+      .filter(({ solid }) => solid.role === role)
+      .map((one) => {
+        const { shape, place } = placedShape(one, space.facets);
+        if (!one.kind.curved) return { shape, place };
+        // facets stand off the true surface by at most D·π²/6N² on either side
+        const facet = (2 * Math.max(...one.kind.extent(one.solid))) / space.facets ** 2;
+        return { shape: swollen(shape, direction * (thinMm + facet)), place };
+      });
+  const mesh = spaceOf(shapes('holds', sign), shapes('displaces', -sign), space.origin);
+  return piecesOf(mesh);
+}

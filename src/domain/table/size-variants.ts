@@ -1,0 +1,53 @@
+import type { TankDocument } from '../tank/document';
+import { placedSolid, type PlacedSolid } from '../tank/placed-solid';
+import { kindOf, type Solid } from '../tank/kinds/registry';
+import { valueAt } from '../tank/value-at';
+
+/** One size of one solid, and the ways the tank may look when it is `by` mm larger. */
+export interface SizeVariant {
+  sizeMm: number;
+  variants: readonly (readonly PlacedSolid[])[];
+}
+
+/**
+ * Every size of the document in turn made larger. A solid that is not turned grows from its lowest corner,
+ * as the document places it. A turned one may grow from either end, since the document does not say which of
+ * its faces meets the next solid: both are given, and the caller takes the one that matters more.
+ */
+export function sizeVariants(document: TankDocument, by: number): SizeVariant[] {
+  const whole = document.solids.map(placedSolid);
+  return document.solids.flatMap((solid, index) =>
+    kindOf(solid)
+      .sizes(solid)
+      .map(({ path }) => {
+        const sizeMm = Number(valueAt(solid, path));
+        const grown = placedSolid(withSize(solid, path, sizeMm + by));
+        const original = whole[index]!;
+        const turned = (solid.turn ?? [0, 0, 0]).some((degrees) => degrees % 360 !== 0);
+        const replacements = turned ? [1, -1].map((end) => grownFrom(original, grown, end)) : [grown];
+        return { sizeMm, variants: replacements.map((one) => whole.with(index, one)) };
+      }),
+  );
+}
+
+/** The grown solid with its own low faces (end 1) or its own high faces (end −1) where they were. */
+function grownFrom(original: PlacedSolid, grown: PlacedSolid, end: number): PlacedSolid {
+  const before = original.kind.extent(original.solid);
+  const after = grown.kind.extent(grown.solid);
+  const half = after.map((length, axis) => (end * (length - before[axis]!)) / 2);
+  const centre = original.place.centre.map(
+    (value, i) =>
+      value +
+      original.place.rows[i]![0] * half[0]! +
+      original.place.rows[i]![1] * half[1]! +
+      original.place.rows[i]![2] * half[2]!,
+  ) as [number, number, number];
+  return { ...grown, place: { ...original.place, centre } };
+}
+
+function withSize(solid: Solid, path: readonly string[], value: number): Solid {
+  const copy = structuredClone(solid) as unknown as Record<string, unknown>;
+  const parent = valueAt(copy, path.slice(0, -1)) as Record<string, unknown>;
+  parent[path.at(-1)!] = value;
+  return copy as unknown as Solid;
+}

@@ -1,0 +1,27 @@
+import { readFile } from 'node:fs/promises';
+import { createRequire } from 'node:module';
+import { DipwrightError } from '~/domain/errors';
+import { computeTable } from '~/domain/table/compute-table';
+import { issueTable } from '~/domain/table/issue-table';
+import { loadManifold } from '~/geometry/manifold';
+import type { ComputeOutcome, ComputeTask } from './compute-task';
+
+// read from the package, so that a bundle finds it as well as the source does
+const wasm = createRequire(import.meta.url).resolve('manifold-3d/manifold.wasm');
+const ready = readFile(wasm).then((wasmBinary) => loadManifold({ wasmBinary }));
+
+/** A thread of the compute pool: one task in, its result or refusal out. */
+export default async function compute(task: ComputeTask): Promise<ComputeOutcome> {
+  try {
+    await ready;
+    const result =
+      task.work === 'table'
+        ? await computeTable(task.design, task.readings)
+        : await issueTable(task.design, task.settings, task.stepMm);
+    return { result };
+  } catch (error) {
+    if (!(error instanceof DipwrightError)) throw error;
+    const { code, message, faults } = error;
+    return { refusal: { code, message, faults } };
+  }
+}

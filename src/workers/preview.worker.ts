@@ -1,0 +1,40 @@
+import wasmUrl from 'manifold-3d/manifold.wasm?url';
+import { DipwrightError } from '~/domain/errors';
+import { computePreview } from '~/domain/table/compute-preview';
+import type { Preview } from '~/domain/table/preview';
+import { loadManifold } from '~/geometry/manifold';
+import { latestWins } from './latest-wins';
+import type { PreviewReply, PreviewRequest } from './preview-protocol';
+
+/** The browser's worker: previews of designs as they change, the newest request first and only. */
+const scope = self as unknown as {
+  onmessage: ((event: MessageEvent<PreviewRequest>) => void) | null;
+  postMessage(message: PreviewReply, transfer?: Transferable[]): void;
+};
+
+const ready = loadManifold({ wasmUrl });
+
+const take = latestWins<PreviewRequest>(async ({ number, design }) => {
+  try {
+    await ready;
+    const preview = await computePreview(design);
+    scope.postMessage({ number, preview }, buffersOf(preview));
+  } catch (error) {
+    scope.postMessage({ number, refusal: refusalOf(error) });
+  }
+});
+scope.onmessage = ({ data }) => take(data);
+
+function buffersOf({ space, solids }: Preview): Transferable[] {
+  return [space, ...solids].flatMap(({ positions, triangles }) => [positions.buffer, triangles.buffer]);
+}
+
+function refusalOf(error: unknown) {
+  if (error instanceof DipwrightError) {
+    const { code, message, faults } = error;
+    return { code, message, faults };
+  }
+  console.error(error);
+  const message = 'The tank cannot be computed here. Reload the page to try again.';
+  return { code: 'unavailable' as const, message, faults: [] };
+}
