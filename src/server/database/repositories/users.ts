@@ -3,6 +3,11 @@ import { DipwrightError } from '~/domain/errors';
 import type { Database } from '../connect';
 import type { UserRecord } from '../models/user';
 
+export async function findUser(database: Database, id: string): Promise<UserRecord | null> {
+  const found = await database.models.users.findByPk(id);
+  return found?.get() ?? null;
+}
+
 export async function findUserByEmail(database: Database, email: string): Promise<UserRecord | null> {
   const found = await database.models.users.findOne({ where: { email } });
   return found?.get() ?? null;
