@@ -2,7 +2,7 @@ import { formatNumber } from '../units/format-number';
 import type { TankSettings } from '../tank/settings';
 import { liquids } from './liquids';
 
-/** What the kilograms rest on: "Kilograms: diesel of 840 kg/m³." */
+/** What the kilograms rest on: "Kilograms: diesel of 840 kg per m³." */
 export function densitySentence({
   liquid,
   densityKgPerM3,
@@ -11,5 +11,5 @@ export function densitySentence({
   const density = densityKgPerM3 ?? entry.densityKgPerM3;
   if (density === null) return 'Kilograms are not known: the density of this liquid was not typed.';
   const name = liquid === 'other' ? 'this liquid' : entry.name.toLowerCase();
-  return `Kilograms: ${name} of ${formatNumber(density, density % 1 === 0 ? 0 : 1)} kg/m³.`;
+  return `Kilograms: ${name} of ${formatNumber(density, density % 1 === 0 ? 0 : 1)}\u00a0kg\u00a0per\u00a0m³.`;
 }

@@ -1,11 +1,10 @@
 import { liquids } from '../liquid/liquids';
-import { formatLengthWithUnit } from '../units/format-length';
-import { mmPerInch, type LengthUnit } from '../units/length-unit';
 import { volumeUnitSigns } from '../units/volume-unit';
 import type { ChartDigits } from './chart-digits';
 import type { ChartInput } from './chart-input';
 import type { ChartLevels } from './chart-levels';
 import type { ChartFigure } from './chart-report';
+import { markReading } from './mark-reading';
 
 /** The box at the head: brim, safe fill, unusable, usable, each under its own name and with its ±. */
 export function chartFigures(
@@ -40,7 +39,7 @@ export function chartFigures(
     atSafeFill,
     levels.safeFillMm === null
       ? 'above the stick'
-      : `stop at ${stopReading(levels.safeFillMm, options.length)}`,
+      : `stop at ${markReading(levels.safeFillMm, options.length, 'down')}`,
   );
   const unusable =
     levels.outletMm === null
@@ -54,7 +53,7 @@ export function chartFigures(
           'Unusable',
           levels.unusableL,
           atOutlet,
-          `below the outlet at ${formatLengthWithUnit(levels.outletMm, options.length)}`,
+          `below the outlet at ${markReading(levels.outletMm, options.length, 'up')}`,
         );
   const usable = figure(
     'Usable',
@@ -69,10 +68,4 @@ export function chartFigures(
 
 function massOf({ densityKgPerM3 }: ChartLevels, litres: number): number {
   return (litres * densityKgPerM3) / 1000;
-}
-
-/** The mark to stop filling at: rounded down to a mark of the stick, never past the level itself. */
-export function stopReading(mm: number, unit: LengthUnit): string {
-  const mark = unit === 'in' ? mmPerInch / 8 : 1;
-  return formatLengthWithUnit(Math.floor(mm / mark + 1e-6) * mark, unit, unit === 'cm' ? 1 : 0);
 }

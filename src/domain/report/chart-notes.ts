@@ -3,21 +3,26 @@ import { densitySentence } from '../liquid/density-sentence';
 import { formatLengthWithUnit } from '../units/format-length';
 import { formatNumber } from '../units/format-number';
 import type { ChartInput } from './chart-input';
-import type { ChartNote } from './chart-report';
+import type { ChartNote, ChartRow } from './chart-report';
 import type { Sketch } from './sketch';
 import { standsSentence } from './stands-sentence';
 
 /** The words at the foot of the first page: how to dip, how the figures came about, what to take care of. */
-export function chartNotes(input: ChartInput, sketch: Sketch | null): ChartNote[] {
+export function chartNotes(
+  input: ChartInput,
+  sketch: Sketch | null,
+  rows: readonly ChartRow[],
+): ChartNote[] {
   return [
-    { title: 'To dip', sentences: dipSentences(input, sketch) },
-    { title: 'These figures', sentences: figureSentences(input) },
     {
       title: 'Take care',
+      caution: true,
       sentences: cautionsFor(input.settings.liquid, input.capacityL)
         .filter((key) => key !== 'not-for-trade')
         .map((key) => cautions[key]),
     },
+    { title: 'To dip', caution: false, sentences: dipSentences(input, sketch) },
+    { title: 'These figures', caution: false, sentences: figureSentences(input, rows) },
   ];
 }
 
@@ -66,17 +71,23 @@ const means = {
   stated: 'as stated',
 } as const;
 
-function figureSentences({ design, settings, options, errorL }: ChartInput): string[] {
+function figureSentences(
+  { design, settings, options, errorL, revision }: ChartInput,
+  rows: readonly ChartRow[],
+): string[] {
+  const note = revision.note?.trim() ?? '';
   const small = (mm: number): string =>
     options.length === 'in'
       ? `${formatNumber(mm, mm % 1 === 0 ? 0 : 1)}\u00a0mm (${formatNumber(mm / 25.4, 2)}\u00a0in)`
       : formatLengthWithUnit(mm, options.length);
   const sizes = design.wall?.sizes === 'outside' ? 'outside sizes less the wall' : 'inside sizes';
   return [
-    `Computed from ${sizes} ${means[settings.measuredBy]}, each ± ${small(settings.sizePlusMinusMm)}; not metered.`,
-    `± is half of a 95 % interval. It covers the litres, usable and room of its row and holds for a dip read to ± ${small(settings.dipPlusMinusMm)}.`,
-    `Computing itself adds less than ${atMost(errorL)} L.`,
+    `Computed from ${sizes} ${means[settings.measuredBy]}, each ±\u00a0${small(settings.sizePlusMinusMm)}; not metered.`,
+    `± is a 95\u00a0% interval. It covers the litres, usable and room of its row and holds for a dip read to ±\u00a0${small(settings.dipPlusMinusMm)}.`,
+    `Computing itself adds less than ${atMost(errorL)}\u00a0L.`,
     densitySentence(settings),
+    ...(rows.some(({ region }) => region === 'headroom') ? ['“over”: above safe fill.'] : []),
+    ...(note === '' ? [] : [`Note of this revision: ${note}`]),
   ];
 }
 

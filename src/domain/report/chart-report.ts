@@ -28,7 +28,23 @@ export interface ChartStick {
   unit: string;
   ticks: readonly ChartTick[];
   regions: readonly { region: Region; fromMm: number; toMm: number }[];
-  marks: readonly { depthMm: number; label: string; reading: string }[];
+  marks: readonly {
+    depthMm: number;
+    /** "half" */
+    word: string;
+    /** "61.5 L"; null where the litres say nothing. */
+    volume: string | null;
+    /** "163 mm": a mark of the stick. */
+    reading: string;
+  }[];
+}
+
+/** The sketch with its two outer sizes in print form and the level of the outlet on it. */
+export interface ChartSketch extends Sketch {
+  widthText: string;
+  heightText: string;
+  /** mm above the lowest point; null without an outlet or a stick, and on a tilted tank. */
+  outletY: number | null;
 }
 
 export interface ChartColumn {
@@ -47,6 +63,8 @@ export interface ChartRow {
 
 export interface ChartNote {
   title: string;
+  /** true where someone can be hurt: drawn with a sign. */
+  caution: boolean;
   sentences: readonly string[];
 }
 
@@ -71,9 +89,11 @@ export interface ChartReport {
   superseded: string | null;
   box: readonly ChartFigure[];
   stick: ChartStick;
-  sketch: Sketch | null;
+  sketch: ChartSketch | null;
   columns: readonly ChartColumn[];
   rows: readonly ChartRow[];
+  /** Rows from one strong row to the next. */
+  rowGroup: number;
   notes: readonly ChartNote[];
   trade: string;
   /** The strip at the foot of every page: label and text. */

@@ -50,10 +50,10 @@ export function chartRows(
   columns: readonly ChartColumn[],
 ): ChartRow[] {
   const { options, heightMm } = input;
-  const stepMm = options.stepMm ?? usualStepMm(heightMm, options.length);
+  const stepMm = stepOf(input);
   const readings = chartReadings(heightMm, stepMm);
   if (digits.volume(levels.at(0).volumeL) !== digits.volume(0)) readings.unshift(0);
-  const every = strongEvery(stepMm, options.length);
+  const every = rowGroup(input);
   return readings.map((depthMm) => {
     const onStick = isMultiple(depthMm, stepMm);
     const answer = levels.at(depthMm);
@@ -87,10 +87,15 @@ export function decimalsOf(stepMm: number, unit: LengthUnit): number {
   return unit === 'cm' && !isMultiple(stepMm, 10) ? 1 : 0;
 }
 
-function strongEvery(stepMm: number, unit: LengthUnit): number {
-  if (unit !== 'in') return 5;
-  const inchEvery = Math.round(mmPerInch / stepMm);
-  return inchEvery > 1 ? inchEvery : 4;
+/** Rows from one strong row to the next: five, or as many as an inch has. */
+export function rowGroup(input: ChartInput): number {
+  if (input.options.length !== 'in') return 5;
+  const perInch = Math.round(mmPerInch / stepOf(input));
+  return perInch > 1 ? perInch : 4;
+}
+
+function stepOf({ options, heightMm }: ChartInput): number {
+  return options.stepMm ?? usualStepMm(heightMm, options.length);
 }
 
 function isMultiple(value: number, step: number): boolean {

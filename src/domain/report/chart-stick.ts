@@ -3,10 +3,10 @@ import { mmPerLengthUnit } from '../units/length-unit';
 import { marksFor, multiples } from '../units/marks';
 import { volumeUnitSigns } from '../units/volume-unit';
 import type { ChartDigits } from './chart-digits';
-import { stopReading } from './chart-figures';
 import type { ChartInput } from './chart-input';
 import type { ChartLevels } from './chart-levels';
 import type { ChartStick, ChartTick } from './chart-report';
+import { markReading } from './mark-reading';
 
 const mostNumbered = 14;
 const mostFine = 130;
@@ -57,22 +57,35 @@ function marks(
   digits: ChartDigits,
   { volume, length }: ChartInput['options'],
 ): ChartStick['marks'] {
-  const sign = volumeUnitSigns[volume];
-  const withVolume = (word: string, litres: number): string =>
-    `${word}\u00a0${digits.volume(litres)}\u00a0${sign}`;
+  const printed = (litres: number): string =>
+    `${digits.volume(litres)}\u00a0${volumeUnitSigns[volume]}`;
   const candidates = [
-    { label: 'outlet', depthMm: levels.outletMm },
+    { word: 'outlet', litres: null, depthMm: levels.outletMm, to: 'up' as const },
+    ...[
+      { word: 'quarter', litres: levels.capacityL / 4 },
+      { word: 'half', litres: levels.capacityL / 2 },
+    ].map((mark) => ({
+      ...mark,
+      depthMm: levels.readingOf(mark.litres),
+      to: 'nearest' as const,
+    })),
     {
-      label: withVolume('quarter', levels.capacityL / 4),
-      depthMm: levels.readingOf(levels.capacityL / 4),
+      word: 'safe fill',
+      litres: levels.safeFillL,
+      depthMm: levels.safeFillMm,
+      to: 'down' as const,
     },
-    {
-      label: withVolume('half', levels.capacityL / 2),
-      depthMm: levels.readingOf(levels.capacityL / 2),
-    },
-    { label: withVolume('safe fill', levels.safeFillL), depthMm: levels.safeFillMm },
   ];
-  return candidates.flatMap(({ label, depthMm }) =>
-    depthMm === null ? [] : [{ label, depthMm, reading: stopReading(depthMm, length) }],
+  return candidates.flatMap(({ word, litres, depthMm, to }) =>
+    depthMm === null
+      ? []
+      : [
+          {
+            word,
+            volume: litres === null ? null : printed(litres),
+            depthMm,
+            reading: markReading(depthMm, length, to),
+          },
+        ],
   );
 }

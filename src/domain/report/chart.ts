@@ -1,6 +1,7 @@
 import { invalid } from '../errors';
 import { cautions } from '../liquid/cautions';
 import { liquids } from '../liquid/liquids';
+import { formatLength } from '../units/format-length';
 import { lengthUnitWords } from '../units/length-unit';
 import { volumeUnitWords } from '../units/volume-unit';
 import { chartDigits } from './chart-digits';
@@ -8,11 +9,11 @@ import { chartFigures } from './chart-figures';
 import type { ChartInput } from './chart-input';
 import { chartLevels } from './chart-levels';
 import { chartNotes } from './chart-notes';
-import type { ChartReport } from './chart-report';
-import { chartColumns, chartRows } from './chart-rows';
+import type { ChartReport, ChartSketch } from './chart-report';
+import { chartColumns, chartRows, rowGroup } from './chart-rows';
 import { chartStick } from './chart-stick';
 import { printDate } from './print-date';
-import { sketchOf } from './sketch';
+import { sketchOf, type Sketch } from './sketch';
 
 /** Most rows of one print: a larger step is asked for beyond it. */
 const mostChartRows = 2000;
@@ -33,6 +34,7 @@ export function buildChart(input: ChartInput): ChartReport {
   const digits = chartDigits(options.volume, levels.largestPlusMinusL, levels.densityKgPerM3);
   const sketch = input.preview === null ? null : sketchOf(input.preview.space, input.preview.frame);
   const columns = chartColumns(input);
+  const rows = chartRows(input, levels, digits, columns);
   const liquid = liquids[settings.liquid].name;
   const date = printDate(revision.issuedAt);
   return {
@@ -52,10 +54,11 @@ export function buildChart(input: ChartInput): ChartReport {
       : `Superseded: a later revision than ${revision.letter} stands. Do not use this print.`,
     box: chartFigures(input, levels, digits),
     stick: chartStick(input, levels, digits),
-    sketch,
+    sketch: sketch === null ? null : withTexts(sketch, input),
     columns,
-    rows: chartRows(input, levels, digits, columns),
-    notes: withRevisionNote(chartNotes(input, sketch), revision.note),
+    rows,
+    rowGroup: rowGroup(input),
+    notes: chartNotes(input, sketch, rows),
     trade: cautions['not-for-trade'],
     titleBlock: [
       { label: 'Tank', text: input.tankName },
@@ -81,11 +84,17 @@ function shortHash(hash: string): string {
   return `${hash.slice(0, 4)} ${hash.slice(4, 8)}`;
 }
 
-function withRevisionNote(notes: ChartReport['notes'], note: string | null): ChartReport['notes'] {
-  if (note === null || note.trim() === '') return notes;
-  return notes.map((entry, index) =>
-    index === 1
-      ? { ...entry, sentences: [...entry.sentences, `Note of this revision: ${note.trim()}`] }
-      : entry,
-  );
+function withTexts(
+  sketch: Sketch,
+  { settings, options, levelPerReading }: ChartInput,
+): ChartSketch {
+  const { outletMm } = settings;
+  const zeroY = levelPerReading === 1 ? (sketch.stick?.zeroY ?? null) : null;
+  const text = (mm: number): string => formatLength(Math.round(mm), options.length);
+  return {
+    ...sketch,
+    widthText: text(sketch.widthMm),
+    heightText: text(sketch.heightMm),
+    outletY: zeroY === null || outletMm === null ? null : zeroY + outletMm,
+  };
 }
