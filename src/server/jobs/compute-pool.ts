@@ -2,6 +2,7 @@ import { fileURLToPath } from 'node:url';
 import { Piscina } from 'piscina';
 import { DipwrightError } from '~/domain/errors';
 import type { IssuedTable } from '~/domain/table/issued-table';
+import type { Preview } from '~/domain/table/preview';
 import type { ComputedTable, Readings } from '~/domain/table/request';
 import type { TankDocument } from '~/domain/tank/document';
 import type { TankSettings } from '~/domain/tank/settings';
@@ -15,9 +16,13 @@ export interface ComputePool {
   table(design: TankDocument, readings: Readings): Promise<ComputedTable>;
   /** Refuses (`invalid`, one fault a reason) what may not be issued: empty, in pieces, thinner than 0.01 mm. */
   issue(design: TankDocument, settings: TankSettings, stepMm: number): Promise<IssuedTable>;
+  /** The shape as a mesh and how readings lie on it, for the sketch of a print. */
+  sketch(design: TankDocument): Promise<Sketched>;
   /** Waits for running work, then ends the threads. */
   close(): Promise<void>;
 }
+
+export type Sketched = Pick<Preview, 'space' | 'frame'>;
 
 export interface ComputePoolOptions {
   threads: number;
@@ -34,19 +39,19 @@ const mostWaiting = 200;
 
 export function createComputePool(options: ComputePoolOptions): ComputePool {
   const { threads, workerFile, limitSeconds = {}, onError = () => {} } = options;
-  const filename = workerFile ?? fileURLToPath(new URL('./compute-worker.ts', import.meta.url));
+  const filename = workerFile ?? fileURLToPath(new URL('./compute-worker-from-source.mjs', import.meta.url));
   const pool = new Piscina({
     filename,
     minThreads: 1,
     maxThreads: threads,
     idleTimeout: 60_000,
     maxQueue: mostWaiting,
-    execArgv: filename.endsWith('.ts') ? ['--import', 'tsx'] : [],
+    execArgv: [],
   });
   pool.on('error', onError);
   let closed = false;
 
-  async function run(task: ComputeTask, seconds: number): Promise<ComputedTable | IssuedTable> {
+  async function run(task: ComputeTask, seconds: number): Promise<ComputedTable | IssuedTable | Sketched> {
     if (closed) throw unavailable('The server is stopping. Try again in a moment.');
     const signal = AbortSignal.timeout(seconds * 1000);
     let outcome: ComputeOutcome;
@@ -78,6 +83,7 @@ export function createComputePool(options: ComputePoolOptions): ComputePool {
       run({ work: 'table', design, readings }, limitSeconds.table ?? 30) as Promise<ComputedTable>,
     issue: (design, settings, stepMm) =>
       run({ work: 'issue', design, settings, stepMm }, limitSeconds.issue ?? 90) as Promise<IssuedTable>,
+    sketch: (design) => run({ work: 'sketch', design }, limitSeconds.table ?? 30) as Promise<Sketched>,
     async close() {
       closed = true;
       await pool.close();

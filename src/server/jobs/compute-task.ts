@@ -1,5 +1,6 @@
 import type { ErrorCode, FieldFault } from '~/domain/errors';
 import type { IssuedTable } from '~/domain/table/issued-table';
+import type { Preview } from '~/domain/table/preview';
 import type { ComputedTable, Readings } from '~/domain/table/request';
 import type { TankDocument } from '~/domain/tank/document';
 import type { TankSettings } from '~/domain/tank/settings';
@@ -7,9 +8,10 @@ import type { TankSettings } from '~/domain/tank/settings';
 /** Pool → worker: one piece of work. */
 export type ComputeTask =
   | { work: 'table'; design: TankDocument; readings: Readings }
-  | { work: 'issue'; design: TankDocument; settings: TankSettings; stepMm: number };
+  | { work: 'issue'; design: TankDocument; settings: TankSettings; stepMm: number }
+  | { work: 'sketch'; design: TankDocument };
 
 /** Worker → pool. A refusal travels as data, since an error loses its fields between threads. */
 export type ComputeOutcome =
-  | { result: ComputedTable | IssuedTable }
+  | { result: ComputedTable | IssuedTable | Pick<Preview, 'space' | 'frame'> }
   | { refusal: { code: ErrorCode; message: string; faults: readonly FieldFault[] } };

@@ -1,6 +1,7 @@
 import { readFile } from 'node:fs/promises';
 import { createRequire } from 'node:module';
 import { DipwrightError } from '~/domain/errors';
+import { computePreview } from '~/domain/table/compute-preview';
 import { computeTable } from '~/domain/table/compute-table';
 import { issueTable } from '~/domain/table/issue-table';
 import { loadManifold } from '~/geometry/manifold';
@@ -14,14 +15,23 @@ const ready = readFile(wasm).then((wasmBinary) => loadManifold({ wasmBinary }));
 export default async function compute(task: ComputeTask): Promise<ComputeOutcome> {
   try {
     await ready;
-    const result =
-      task.work === 'table'
-        ? await computeTable(task.design, task.readings)
-        : await issueTable(task.design, task.settings, task.stepMm);
-    return { result };
+    return { result: await work(task) };
   } catch (error) {
     if (!(error instanceof DipwrightError)) throw error;
     const { code, message, faults } = error;
     return { refusal: { code, message, faults } };
+  }
+}
+
+async function work(task: ComputeTask) {
+  switch (task.work) {
+    case 'table':
+      return computeTable(task.design, task.readings);
+    case 'issue':
+      return issueTable(task.design, task.settings, task.stepMm);
+    case 'sketch': {
+      const { space, frame } = await computePreview(task.design);
+      return { space, frame };
+    }
   }
 }

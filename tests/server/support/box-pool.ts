@@ -22,16 +22,40 @@ export function boxPool(): ComputePool {
       };
       return { table, rows: table.rows.map(withPlusMinus) };
     },
+    async sketch(design) {
+      const { length, width, height } = boxOf(design);
+      const corner = (i: number) => [i & 1 ? length : 0, i & 2 ? width : 0, i & 4 ? height : 0];
+      const space = {
+        positions: Float64Array.from([0, 1, 2, 3, 4, 5, 6, 7].flatMap(corner)),
+        triangles: Uint32Array.from(boxTriangles),
+      };
+      const frame = {
+        up: [0, 0, 1] as const,
+        zeroLevelMm: 0,
+        levelPerReading: 1,
+        heightMm: height,
+        stick: null,
+        lowestLevelMm: 0,
+        highestLevelMm: height,
+      };
+      return { space, frame };
+    },
     async close() {},
   };
 }
 
-function boxOf(design: TankDocument): { areaMm2: number; heightMm: number } {
+/** Outward, over the corners in the order of their bits x, y, z. */
+const boxTriangles = [
+  0, 2, 1, 1, 2, 3, 4, 5, 6, 5, 7, 6, 0, 1, 4, 1, 5, 4, 2, 6, 3, 3, 6, 7, 0, 4, 2, 2, 4, 6, 1, 3, 5, 3, 7, 5,
+];
+
+function boxOf(design: TankDocument) {
   const [solid, another] = design.solids;
   if (solid?.kind !== 'box' || another !== undefined) {
     throw invalid('/design/solids', 'This test pool computes one box only.');
   }
-  return { areaMm2: solid.length * solid.width, heightMm: solid.height };
+  const { length, width, height } = solid;
+  return { length, width, height, areaMm2: length * width, heightMm: height };
 }
 
 function stepped(heightMm: number, stepMm: number): number[] {
