@@ -104,7 +104,7 @@ async function settledDaemon(folder, say) {
 
 async function startOnFreePort(folder, account, credentials, keepPort) {
   for (let attempt = 1; ; attempt += 1) {
-    if (!keepPort && (await portState(credentials.port)) !== 'free') {
+    if (!keepPort && !(await becomesFree(credentials.port))) {
       credentials = { ...credentials, port: await anyFreePort() };
       writeCredentials(folder, credentials);
     }
@@ -114,6 +114,16 @@ async function startOnFreePort(folder, account, credentials, keepPort) {
       if (!error.portTaken || attempt === 5) throw error;
     }
   }
+}
+
+/** A server that was just killed lets go of its port a moment after it is gone. */
+async function becomesFree(port) {
+  const until = Date.now() + 2_000;
+  while ((await portState(port)) !== 'free') {
+    if (Date.now() > until) return false;
+    await delay(100);
+  }
+  return true;
 }
 
 function requireSpace(folder) {

@@ -44,14 +44,14 @@ export function ensurePrograms(programs, say) {
   const list = missing.join(' ');
   if (!findProgram('apt-get')) {
     throw new StartFault(
-      `${list} is not installed, and this is not Debian, where it could be installed by itself.`,
+      `The program package ${list} is not installed, and this is not Debian, where it could be installed by itself.`,
       `Install ${list} (MariaDB 10.11 or later) by your own means, then run the command again.`,
     );
   }
   const prefix = elevation();
   if (prefix === null) {
     throw new StartFault(
-      `${list} is not installed, and this account may not install it.`,
+      `The program package ${list} is not installed, and this account may not install it.`,
       `Ask an administrator to run: apt-get install --no-install-recommends ${list}. Then run the command again.`,
     );
   }
@@ -61,7 +61,7 @@ export function ensurePrograms(programs, say) {
   const still = programs.filter((name) => !findProgram(name));
   if (still.length > 0) {
     throw new StartFault(
-      `${list} was installed, but the program ${still[0]} is still missing.`,
+      `Debian's ${list} was installed, but the program ${still[0]} is still missing.`,
       `Run: apt-get install --reinstall ${list}. Then run the command again.`,
     );
   }
@@ -96,9 +96,9 @@ function runApt(prefix, args, list) {
  * @param {string} list
  */
 export function aptFault(output, list) {
-  if (/No space left on device|not have enough free space/i.test(output)) {
+  if (/No space left on device|n.?t have enough free space/i.test(output)) {
     return new StartFault(
-      `The disk is full: ${list} could not be installed.`,
+      `The disk is full: Debian's ${list} could not be installed.`,
       'Free at least 1 GB, then run the command again.',
     );
   }
@@ -110,7 +110,7 @@ export function aptFault(output, list) {
   }
   const why = output.split('\n').filter((line) => /^(E:|dpkg: error)/.test(line)).at(-1);
   return new StartFault(
-    `${list} could not be installed${why ? ` (${why.trim()})` : ''}.`,
+    `Debian's ${list} could not be installed${why ? ` (${why.replace(/^E:/, '').trim()})` : ''}.`,
     `Run: apt-get install --no-install-recommends ${list}, and mend what it says. Then run the command again.`,
   );
 }
