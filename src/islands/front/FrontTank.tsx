@@ -4,6 +4,7 @@ import type { Preview } from '~/domain/table/preview';
 import { formatNumber } from '~/domain/units/format-number';
 import { formatPlusMinus, formatVolume } from '~/domain/units/format-volume';
 import type { Plate } from '~/viewport/projection';
+import { useAwake } from '../shared/use-awake';
 import { lengthScales, volumeScales } from '../stick/scales';
 import { Stick, leftScalePx, railWidthPx, stickMarginPx } from '../stick/Stick';
 import { carryDraft } from './carried-draft';
@@ -23,6 +24,7 @@ export function FrontTank({ signedIn }: { signedIn: boolean }) {
   const design = useMemo(() => vHull(sizes), [sizes]);
   const { preview, fault } = usePreview(design);
   const [share, setShare] = useState(0.5);
+  const awake = useAwake();
   const [uncarried, setUncarried] = useState(false);
 
   function modelYourOwn(): void {
@@ -43,7 +45,7 @@ export function FrontTank({ signedIn }: { signedIn: boolean }) {
         <HullSizesFields sizes={sizes} onSizes={setSizes} />
         {preview && fault && <p className="fault">{fault}</p>}
         <div>
-          <button type="button" className="act min-h-11 w-full text-lead sm:w-auto" onClick={modelYourOwn}>
+          <button type="button" className="act min-h-11 w-full text-lead sm:w-auto" disabled={!awake} onClick={modelYourOwn}>
             Model your own
           </button>
           <p className="label mt-2">

@@ -1,6 +1,7 @@
 import { useId, useState } from 'react';
 import { formatLength, formatLengthWithUnit } from '~/domain/units/format-length';
 import { parseLength } from '~/domain/units/parse-length';
+import { useAwake } from '../shared/use-awake';
 import type { HullSizes } from './v-hull';
 
 const fields = [
@@ -14,8 +15,9 @@ const [leastMm, mostMm] = [50, 5000];
 
 /** The three inside sizes of the hull, typed as people write them. */
 export function HullSizesFields({ sizes, onSizes }: { sizes: HullSizes; onSizes(sizes: HullSizes): void }) {
+  const awake = useAwake();
   return (
-    <fieldset>
+    <fieldset disabled={!awake}>
       <legend className="label">Inside sizes, mm: change one</legend>
       <div className="grid grid-cols-3 gap-4">
         {fields.map(({ key, label }) => (

@@ -1,14 +1,8 @@
-import { useSyncExternalStore } from 'react';
-
-const nothing = () => () => {};
+import { useAwake } from './use-awake';
 
 /** A moment in the reader's own time; the server, which cannot know it, writes it in UTC. */
 export function Moment({ at, withTime = true }: { at: string; withTime?: boolean }) {
-  const here = useSyncExternalStore(
-    nothing,
-    () => true,
-    () => false,
-  );
+  const here = useAwake();
   const text = new Intl.DateTimeFormat('en-GB', {
     day: 'numeric',
     month: 'short',

@@ -1,12 +1,14 @@
 import { lengthUnits, lengthUnitWords } from '~/domain/units/length-unit';
 import { volumeUnits, volumeUnitWords } from '~/domain/units/volume-unit';
 import { useUnitsPreference } from './units-preference';
+import { useAwake } from './use-awake';
 
 /** Units of one person, remembered; every figure on the page follows. */
 export function UnitsChooser({ person }: { person: string }) {
+  const awake = useAwake();
   const [units, change] = useUnitsPreference(person);
   return (
-    <fieldset className="flex flex-wrap gap-x-6 gap-y-3">
+    <fieldset disabled={!awake} className="flex flex-wrap gap-x-6 gap-y-3">
       <legend className="sr-only">Units</legend>
       <label className="label min-w-32 flex-1">
         Depth in

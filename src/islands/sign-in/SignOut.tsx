@@ -1,9 +1,11 @@
 import { useState } from 'react';
 import { signOut } from '../shared/api';
 import { asProblem } from '../shared/problem';
+import { useAwake } from '../shared/use-awake';
 
 /** The way out, in the top bar of every page. */
 export function SignOut() {
+  const awake = useAwake();
   const [problem, setProblem] = useState<string | null>(null);
   async function leave(): Promise<void> {
     try {
@@ -15,7 +17,7 @@ export function SignOut() {
   }
   return (
     <>
-      <button type="button" className="act-text text-note" onClick={leave}>
+      <button type="button" className="act-text text-note" disabled={!awake} onClick={leave}>
         Sign out
       </button>
       {problem && (

@@ -17,7 +17,7 @@ export function AnswerBlock({ answer, settings, unit }: { answer: Answer; settin
   const kilograms = formatMass(answer.massKg, (answer.plusMinusL * densityOf(settings)) / 1000);
   return (
     <div aria-live="polite">
-      <p className="text-answer font-bold whitespace-nowrap sm:text-huge">
+      <p data-testid="answer" className="text-answer font-bold whitespace-nowrap sm:text-huge">
         {volume(waste ? answer.roomL : answer.usableL)} <span className="text-[0.5em] font-semibold">{sign}</span>
       </p>
       <p className="mt-1 text-lead">

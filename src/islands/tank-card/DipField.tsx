@@ -1,5 +1,6 @@
 import { formatLength, formatLengthWithUnit } from '~/domain/units/format-length';
 import type { LengthUnit } from '~/domain/units/length-unit';
+import { useAwake } from '../shared/use-awake';
 import type { Dip, DipMeans } from './dip';
 
 /** "How deep is it?": one field, and which way the reading was taken. */
@@ -12,6 +13,7 @@ export function DipField(props: {
   onMeans(means: DipMeans): void;
 }) {
   const { text, means, unit, dip } = props;
+  const awake = useAwake();
   const askedBack = dip.is === 'asked-back' ? dip.why : null;
   const echo = dip.is === 'read' ? echoOf(text, dip.typedMm, unit) : null;
   return (
@@ -24,6 +26,7 @@ export function DipField(props: {
           id="dip"
           className="typed min-w-0 border-b-2 text-name font-semibold not-aria-invalid:not-placeholder-shown:border-b-datum"
           value={text}
+          disabled={!awake}
           onChange={(event) => props.onText(event.target.value)}
           inputMode={unit === 'in' ? 'text' : 'decimal'}
           autoComplete="off"
@@ -38,7 +41,7 @@ export function DipField(props: {
         {askedBack !== null && <span className="fault">{askedBack}</span>}
         {echo !== null && <span className="label">= {echo}</span>}
       </p>
-      <fieldset className="mt-1 flex gap-x-4">
+      <fieldset className="mt-1 flex flex-wrap gap-x-4" disabled={!awake}>
         <legend className="sr-only">Which way the reading was taken</legend>
         <Means value="depth" chosen={means} onChoose={props.onMeans} text="depth" />
         <Means value="space" chosen={means} onChoose={props.onMeans} text="space above" />

@@ -5,6 +5,7 @@ import { handOver, listHandovers } from '../shared/api';
 import { Choice } from '../shared/Field';
 import { FaultSummary } from '../shared/FaultSummary';
 import { Moment } from '../shared/Moment';
+import { useAwake } from '../shared/use-awake';
 import { useSentForm } from '../shared/use-sent-form';
 
 interface Owner {
@@ -45,6 +46,7 @@ export function HandOver(props: { tankId: string; owners: readonly Owner[]; hand
 }
 
 function HandOverForm(props: { tankId: string; owners: readonly Owner[]; onDone(handovers: readonly Handover[]): void }) {
+  const awake = useAwake();
   const sent = useSentForm({
     schema: newHandover,
     defaults: { userId: props.owners[0]!.id },
@@ -65,7 +67,7 @@ function HandOverForm(props: { tankId: string; owners: readonly Owner[]; onDone(
         hint="From then on they see this tank, its chart and its card."
       />
       <div>
-        <button className="act-plain" disabled={sent.sending}>
+        <button className="act-plain" disabled={!awake || sent.sending}>
           {sent.sending ? 'Handing over…' : 'Hand over'}
         </button>
       </div>

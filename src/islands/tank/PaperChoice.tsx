@@ -1,6 +1,7 @@
 import { lengthUnits, lengthUnitWords } from '~/domain/units/length-unit';
 import { volumeUnits, volumeUnitWords } from '~/domain/units/volume-unit';
 import { useUnitsPreference, type UnitsPreference } from '../shared/units-preference';
+import { useAwake } from '../shared/use-awake';
 
 const papers = [
   { value: 'a4', text: 'A4' },
@@ -9,12 +10,14 @@ const papers = [
 
 /** The chart of one revision as a download, in the units and on the paper that this person last chose. */
 export function PaperChoice({ revisionId, letter, person }: { revisionId: string; letter: string; person: string }) {
+  const awake = useAwake();
   const [units, change] = useUnitsPreference(person);
   const query = new URLSearchParams({ paper: units.paper, length: units.length, volume: units.volume });
   const set = (key: keyof UnitsPreference) => (value: string) => change({ [key]: value });
   return (
     <div className="grid max-w-2xl gap-5">
-      <div className="grid gap-x-6 gap-y-3 sm:grid-cols-3">
+      <fieldset disabled={!awake} className="grid gap-x-6 gap-y-3 sm:grid-cols-3">
+        <legend className="sr-only">How the chart is printed</legend>
         <Picked label="Paper" value={units.paper} onPick={set('paper')} options={papers} />
         <Picked
           label="Depth in"
@@ -28,7 +31,7 @@ export function PaperChoice({ revisionId, letter, person }: { revisionId: string
           onPick={set('volume')}
           options={volumeUnits.map((unit) => ({ value: unit, text: volumeUnitWords[unit] }))}
         />
-      </div>
+      </fieldset>
       <p>
         <a className="act" href={`/api/v1/revisions/${encodeURIComponent(revisionId)}/chart.pdf?${query}`} download>
           Print the chart of {letter} (PDF)
