@@ -1,0 +1,190 @@
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { DipwrightError } from '~/domain/errors';
+import { createComputePool, type ComputePool } from '~/server/jobs/compute-pool';
+import { changeTank } from '~/server/services/change-tank';
+import { issueRevision } from '~/server/services/issue-revision';
+import { listRevisions } from '~/server/services/list-revisions';
+import { readTable } from '~/server/services/read-table';
+import { readTank } from '~/server/services/read-tank';
+import { saveDraft } from '~/server/services/save-draft';
+import type { Team } from '../../../db/seeds/add-workshop';
+import { addDraft } from '../support/add-tank';
+import { boxDesign } from '../support/box-design';
+import { boxPool } from '../support/box-pool';
+import { addTestWorkshop, openHouse, type House } from '../support/house';
+
+let house: House;
+let team: Team;
+beforeAll(async () => {
+  house = await openHouse();
+  team = await addTestWorkshop(house);
+});
+afterAll(() => house.drop());
+
+const issue = (tankId: string, stepMm = 10, context = house.context) =>
+  issueRevision(context, team.designer, { tankId, stepMm });
+const withPool = (pool: Partial<ComputePool>) => ({
+  ...house.context,
+  computePool: { ...boxPool(), ...pool },
+});
+const kept = async (tankId: string) => ({
+  revisions: (await house.sql('SELECT id FROM revisions WHERE tank_id = ?', [tankId])).length,
+  rows: (
+    await house.sql('SELECT row_no FROM strapping_rows s JOIN revisions r ON r.id = s.revision_id WHERE r.tank_id = ?', [
+      tankId,
+    ])
+  ).length,
+});
+
+describe('what is issued', () => {
+  it('is frozen with every row, bit for bit', async () => {
+    const { tank } = await addDraft(house, team, { design: boxDesign(333.3, 77.7, 101.1) });
+    const revision = await issue(tank.id, 0.7);
+    const table = await readTable(house.context, team.fitter, { revisionId: revision.id });
+    const computed = await boxPool().issue(boxDesign(333.3, 77.7, 101.1), tank.settings, 0.7);
+    expect(table.rows).toEqual(computed.rows);
+    expect(table.revision).toEqual(revision);
+    expect(revision.hash).toMatch(/^[0-9a-f]{64}$/);
+  });
+
+  it('runs through the letters', async () => {
+    const { tank } = await addDraft(house, team);
+    const letters = [];
+    for (const stepMm of [10, 20, 30]) letters.push((await issue(tank.id, stepMm)).letter);
+    expect(letters).toEqual(['A', 'B', 'C']);
+    const all = await listRevisions(house.context, team.owner, { tankId: tank.id }).catch(() => null);
+    expect(all).toBeNull();
+    const seen = await listRevisions(house.context, team.fitter, { tankId: tank.id });
+    expect(seen.map(({ letter, current }) => [letter, current])).toEqual([
+      ['C', true],
+      ['B', false],
+      ['A', false],
+    ]);
+  });
+
+  it('keeps its settings when the tank’s are changed', async () => {
+    const { tank } = await addDraft(house, team, { settings: { outletMm: 40 } });
+    const tankId = tank.id;
+    await issue(tankId);
+    await changeTank(house.context, team.designer, { tankId, change: { outletMm: 60 } });
+    const rows = await house.sql<{ settings: string; unusable_l: number }>(
+      'SELECT settings, unusable_l FROM revisions WHERE tank_id = ?',
+      [tankId],
+    );
+    expect(JSON.parse(rows[0]!.settings).outletMm).toBe(40);
+    // half a litre a millimetre
+    expect(rows[0]!.unusable_l).toBeCloseTo(20, 12);
+    expect((await readTank(house.context, team.designer, { tankId })).draftDiffers).toBe(true);
+  });
+});
+
+describe('is refused', () => {
+  it('when nothing has changed, with the letter that stands', async () => {
+    const { tank } = await addDraft(house, team);
+    await issue(tank.id);
+    await expect(issue(tank.id)).rejects.toMatchObject({
+      code: 'conflict',
+      message: 'Nothing has changed since revision A: shape, settings and step are the same.',
+    });
+    // the same design with its keys in another order is the same design
+    const { stick: _none, ...design } = { stick: null, ...boxDesign() };
+    const turned = Object.fromEntries(Object.entries(design).reverse()) as typeof design;
+    await saveDraft(house.context, team.designer, { tankId: tank.id, etags: ['"1"'], design: turned });
+    await expect(issue(tank.id)).rejects.toMatchObject({ code: 'conflict' });
+    expect((await kept(tank.id)).revisions).toBe(1);
+  });
+
+  it('when the draft moves on while the table is computed', async () => {
+    const { tank } = await addDraft(house, team);
+    const context = withPool({
+      async issue(design, settings, stepMm) {
+        await saveDraft(house.context, team.manager, { tankId: tank.id, etags: ['"1"'], design: boxDesign(700) });
+        return boxPool().issue(design, settings, stepMm);
+      },
+    });
+    await expect(issue(tank.id, 10, context)).rejects.toMatchObject({ code: 'conflict' });
+    expect(await kept(tank.id)).toEqual({ revisions: 0, rows: 0 });
+  });
+
+  it('when the outlet stands above the stick', async () => {
+    const { tank } = await addDraft(house, team, { settings: { outletMm: 301 } });
+    await expect(issue(tank.id)).rejects.toMatchObject({
+      code: 'invalid',
+      faults: [{ pointer: '/settings/outletMm' }],
+    });
+    expect(await kept(tank.id)).toEqual({ revisions: 0, rows: 0 });
+  });
+
+  it('with the pool’s reasons', async () => {
+    const { tank } = await addDraft(house, team);
+    const refusal = new DipwrightError('invalid', 'The liquid space is in 2 pieces.', {
+      faults: [{ pointer: '/design/solids', detail: 'The liquid space is in 2 pieces.' }],
+    });
+    const context = withPool({ issue: () => Promise.reject(refusal) });
+    await expect(issue(tank.id, 10, context)).rejects.toBe(refusal);
+    expect(await kept(tank.id)).toEqual({ revisions: 0, rows: 0 });
+  });
+});
+
+describe('all or nothing', () => {
+  it('a row that cannot be written takes everything back', async () => {
+    const { tank } = await addDraft(house, team, { design: boxDesign(1000, 500, 1500) });
+    const context = withPool({
+      async issue(design, settings, stepMm) {
+        const table = await boxPool().issue(design, settings, stepMm);
+        // the second thousand of rows fails: the first has been sent by then
+        const rows = table.rows.map((row, index) => (index === 1200 ? { ...row, volumeL: Number.NaN } : row));
+        return { ...table, rows };
+      },
+    });
+    await expect(issue(tank.id, 1, context)).rejects.toThrow();
+    expect(await kept(tank.id)).toEqual({ revisions: 0, rows: 0 });
+    expect((await issue(tank.id, 1)).letter).toBe('A');
+    expect(await kept(tank.id)).toEqual({ revisions: 1, rows: 1501 });
+  });
+
+  it('five who issue at once make one revision', async () => {
+    const { tank } = await addDraft(house, team);
+    const outcomes = await Promise.allSettled(Array.from({ length: 5 }, () => issue(tank.id)));
+    expect(outcomes.filter(({ status }) => status === 'fulfilled')).toHaveLength(1);
+    for (const outcome of outcomes) {
+      if (outcome.status === 'rejected') expect(outcome.reason).toMatchObject({ code: 'conflict' });
+    }
+    expect(await kept(tank.id)).toEqual({ revisions: 1, rows: 31 });
+  });
+
+  it('five who issue different steps at once get five letters', async () => {
+    const { tank } = await addDraft(house, team);
+    const revisions = await Promise.all([5, 10, 15, 20, 30].map((stepMm) => issue(tank.id, stepMm)));
+    expect(revisions.map(({ letter }) => letter).sort()).toEqual(['A', 'B', 'C', 'D', 'E']);
+  });
+});
+
+describe('what the database holds is checked before it is given out', () => {
+  it('a row changed behind the program’s back is noticed', async () => {
+    const { tank } = await addDraft(house, team);
+    const revision = await issue(tank.id);
+    await house.database.sequelize.query('DROP TRIGGER strapping_rows_refuse_update');
+    await house.database.sequelize.query(
+      'UPDATE strapping_rows SET volume_l = volume_l + 0.001 WHERE revision_id = ? AND row_no = 7',
+      { replacements: [revision.id] },
+    );
+    await expect(readTable(house.context, team.fitter, { revisionId: revision.id })).rejects.toThrow(
+      /does not match its hash/,
+    );
+  });
+});
+
+describe('with the real engine', () => {
+  const pool = createComputePool({ threads: 1 });
+  afterAll(() => pool.close());
+
+  it('refuses a shape in two pieces, and keeps nothing', async () => {
+    const design = boxDesign();
+    const apart = { ...design.solids[0]!, id: 'apart', at: [5000, 0, 0] as [number, number, number] };
+    const { tank } = await addDraft(house, team, { design: { ...design, solids: [...design.solids, apart] } });
+    const context = { ...house.context, computePool: pool };
+    await expect(issue(tank.id, 10, context)).rejects.toMatchObject({ code: 'invalid' });
+    expect(await kept(tank.id)).toEqual({ revisions: 0, rows: 0 });
+  });
+});
