@@ -23,15 +23,23 @@ try {
 }
 
 function readArguments(args: string[]): { file: string; readings: Readings; csv: boolean } {
-  const { values, positionals } = parseArgs({
-    args,
-    allowPositionals: true,
-    options: { step: { type: 'string' }, at: { type: 'string' }, csv: { type: 'boolean', default: false } },
-  });
+  const { values, positionals } = parsed(args);
   const [file, ...more] = positionals;
   if (file === undefined || more.length > 0) throw new Error(usage);
   if (values.step !== undefined && values.at !== undefined) throw new Error('Give either --step or --at, not both.');
   return { file, readings: readingsOf(values.step, values.at), csv: values.csv };
+}
+
+function parsed(args: string[]) {
+  try {
+    return parseArgs({
+      args,
+      allowPositionals: true,
+      options: { step: { type: 'string' }, at: { type: 'string' }, csv: { type: 'boolean', default: false } },
+    });
+  } catch (error) {
+    throw new Error(usage, { cause: error });
+  }
 }
 
 function readingsOf(step: string | undefined, at: string | undefined): Readings {

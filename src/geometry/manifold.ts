@@ -1,8 +1,9 @@
 import Module, { type Manifold, type ManifoldToplevel, type Vec2 as MutableVec2 } from 'manifold-3d';
 import { areaPreservingFactor } from './circle';
+import { exactPoints } from './exact-points';
 import type { Mesh } from './mesh';
-import { axisOrder, type Shape } from './shape';
 import { toTank, type Placing } from './placing';
+import { axisOrder, type Axis, type Shape } from './shape';
 import type { Vec3 } from './vec3';
 
 /**
@@ -95,7 +96,7 @@ function make({ shape, place }: PlacedShape, origin: Vec3): Manifold {
       ? Manifold.extrude([mutable(shape.outline)], shape.length, 0, 0, [1, 1], true)
       : Manifold.revolve([mutable(shape.profile)], shape.facets);
   try {
-    const toOwnFrame = shape.form === 'extrusion' ? turnedIn(shape) : revolvedIn(shape);
+    const toOwnFrame = shape.form === 'extrusion' ? extrudedIn(shape) : revolvedIn(shape);
     return raw.warpBatch((vertices) => {
       for (let i = 0; i < vertices.length; i += 3) {
         const own = toOwnFrame(vertices[i]!, vertices[i + 1]!, vertices[i + 2]!);
@@ -112,25 +113,39 @@ function make({ shape, place }: PlacedShape, origin: Vec3): Manifold {
 
 type IntoOwn = (a: number, b: number, c: number) => Vec3;
 
-function turnedIn(shape: Pick<Shape, 'axis'>): IntoOwn {
-  const [first, second, third] = axisOrder(shape.axis);
+/** From the library's extrusion (along z, outline in x and y, on its coarse grid) to the own frame, exactly. */
+function extrudedIn({ axis, outline, length }: Extract<Shape, { form: 'extrusion' }>): IntoOwn {
+  const turn = turnedIn(axis);
+  const exact = exactPoints(outline);
+  return (a, b, c) => {
+    const [first, second] = exact(a, b);
+    return turn(first, second, c < 0 ? -length / 2 : length / 2);
+  };
+}
+
+/** The same for a body turned about z: each vertex back on its meridian and its point of the profile. */
+function revolvedIn({ axis, profile, facets, phase, stretch }: Extract<Shape, { form: 'revolution' }>): IntoOwn {
+  const turn = turnedIn(axis);
+  const exact = exactPoints(profile);
+  const factor = areaPreservingFactor(facets);
+  const theta = (2 * Math.PI) / facets;
+  return (a, b, c) => {
+    const [radius, place] = exact(Math.hypot(a, b), c);
+    const angle = phase + Math.round(Math.atan2(b, a) / theta) * theta;
+    const reach = radius * factor;
+    const [x, y, z] = turn(reach * Math.cos(angle), reach * Math.sin(angle), place);
+    return [x * stretch[0], y * stretch[1], z * stretch[2]];
+  };
+}
+
+function turnedIn(axis: Axis): IntoOwn {
+  const [first, second, third] = axisOrder(axis);
   const own: [number, number, number] = [0, 0, 0];
   return (a, b, c) => {
     own[first] = a;
     own[second] = b;
     own[third] = c;
     return own;
-  };
-}
-
-function revolvedIn(shape: Extract<Shape, { form: 'revolution' }>): IntoOwn {
-  const place = turnedIn(shape);
-  const factor = areaPreservingFactor(shape.facets);
-  const cos = factor * Math.cos(shape.phase);
-  const sin = factor * Math.sin(shape.phase);
-  return (a, b, c) => {
-    const [x, y, z] = place(a * cos - b * sin, a * sin + b * cos, c);
-    return [x * shape.stretch[0], y * shape.stretch[1], z * shape.stretch[2]];
   };
 }
 

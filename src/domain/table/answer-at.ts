@@ -50,7 +50,10 @@ export function answerAt(table: DipTable, depthMm: number): Answer {
 }
 
 /** Litres at safe fill: a share of the whole liquid space. */
-export function safeFillL({ settings, capacityL }: Pick<DipTable, 'settings' | 'capacityL'>): number {
+export function safeFillL({
+  settings,
+  capacityL,
+}: Pick<DipTable, 'settings' | 'capacityL'>): number {
   return (settings.safeFillPercent / 100) * capacityL;
 }
 
@@ -65,7 +68,11 @@ export function safeFillMm(table: DipTable): number | null {
 }
 
 /** Litres below the outlet; 0 when no outlet was told. */
-export function unusableL({ curve, settings, heightMm }: Pick<DipTable, 'curve' | 'settings' | 'heightMm'>): number {
+export function unusableL({
+  curve,
+  settings,
+  heightMm,
+}: Pick<DipTable, 'curve' | 'settings' | 'heightMm'>): number {
   return settings.outletMm === null ? 0 : volumeAt(curve, Math.min(settings.outletMm, heightMm));
 }
 
@@ -75,7 +82,10 @@ export function densityOf({ densityKgPerM3, liquid }: TankSettings): number {
 }
 
 /** ± of the litres at a reading, linear between the rows. */
-export function plusMinusAt({ curve, plusMinusL }: Pick<DipTable, 'curve' | 'plusMinusL'>, depthMm: number): number {
+export function plusMinusAt(
+  { curve, plusMinusL }: Pick<DipTable, 'curve' | 'plusMinusL'>,
+  depthMm: number,
+): number {
   const i = segmentOf(curve.depthMm, depthMm);
   const x0 = curve.depthMm[i] ?? 0;
   const x1 = curve.depthMm[i + 1] ?? x0;

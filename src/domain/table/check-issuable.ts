@@ -46,7 +46,11 @@ export async function checkIssuable(document: TankDocument): Promise<string[]> {
   return reasons;
 }
 
-function piecesWhenSwollen(solids: readonly PlacedSolid[], space: LiquidSpace, sign: number): number {
+function piecesWhenSwollen(
+  solids: readonly PlacedSolid[],
+  space: LiquidSpace,
+  sign: number,
+): number {
   const shapes = (role: 'holds' | 'displaces', direction: number) =>
     solids
       .filter(({ solid }) => solid.role === role)

@@ -3,6 +3,7 @@ import { shifted } from '../../geometry/mesh';
 import { roundingOfCapacity } from '../../geometry/tolerance';
 import type { TankDocument } from '../tank/document';
 import { placedShape, placedSolid } from '../tank/placed-solid';
+import { extremes } from './extremes';
 import { liquidSpace } from './liquid-space';
 import { openings } from './openings';
 import { piecesOf } from './pieces';
@@ -16,6 +17,12 @@ const previewFacets = 64;
 
 const previewRows = 201;
 
+const axes = [
+  [1, 0, 0],
+  [0, 1, 0],
+  [0, 0, 1],
+] as const;
+
 /**
  * All that the bench shows of a design, at 64 facets a turn (1e-6 to 5e-5 of capacity). A few solids take
  * some milliseconds once the WebAssembly is warm. Throws `invalid` like computeTable.
@@ -26,7 +33,10 @@ export async function computePreview(document: TankDocument): Promise<Preview> {
   const solids = document.solids.map(placedSolid);
   const space = liquidSpace(solids, previewFacets);
   const frame = readingFrame(document, solids, space);
-  const depths = Array.from({ length: previewRows }, (_, i) => (i / (previewRows - 1)) * frame.heightMm);
+  const depths = Array.from(
+    { length: previewRows },
+    (_, i) => (i / (previewRows - 1)) * frame.heightMm,
+  );
   const rows = tableRows(space, frame, depths);
   const capacityL = space.volumeMm3 / 1e6;
 
@@ -38,6 +48,7 @@ export async function computePreview(document: TankDocument): Promise<Preview> {
     });
   }
   const pieces = piecesOf(space.mesh);
+  const [x, y, z] = axes.map((axis) => extremes(solids, space, axis));
   const { undrainableL, trappedL } = openings(document, solids, space, frame.up);
   return {
     space: shifted(space.mesh, space.origin),
@@ -46,6 +57,7 @@ export async function computePreview(document: TankDocument): Promise<Preview> {
       role: one.solid.role,
       ...shifted(meshOf(placedShape(one, previewFacets), space.origin), space.origin),
     })),
+    extent: { low: [x![0], y![0], z![0]], high: [x![1], y![1], z![1]] },
     frame,
     capacityL,
     errorL,

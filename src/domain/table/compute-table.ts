@@ -15,7 +15,10 @@ import { tableRows } from './table-rows';
  * rows and over 200 levels between, and never less than rounding (1e-9 of capacity). Error about 1e-8 of
  * capacity at N = 256. Litres, mm, cm². Throws `invalid` with JSON pointers for what cannot be computed.
  */
-export async function computeTable(document: TankDocument, readings: Readings): Promise<ComputedTable> {
+export async function computeTable(
+  document: TankDocument,
+  readings: Readings,
+): Promise<ComputedTable> {
   refuseUncomputable(document);
   await loadManifold();
   const solids = document.solids.map(placedSolid);

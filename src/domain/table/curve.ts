@@ -41,9 +41,18 @@ export function depthAt(curve: Curve, volumeL: number): number {
   const { depthMm: xs, volumeL: vs, slopeLPerMm: ms } = curve;
   const last = xs.length - 1;
   if (!(volumeL >= vs[0]! && volumeL <= vs[last]!)) {
-    throw new DipwrightError('invalid', `The table holds from ${round(vs[0]!)} to ${round(vs[last]!)} L.`, {
-      faults: [{ pointer: '/volumeL', detail: `Give a volume from ${round(vs[0]!)} to ${round(vs[last]!)} L.` }],
-    });
+    throw new DipwrightError(
+      'invalid',
+      `The table holds from ${round(vs[0]!)} to ${round(vs[last]!)} L.`,
+      {
+        faults: [
+          {
+            pointer: '/volumeL',
+            detail: `Give a volume from ${round(vs[0]!)} to ${round(vs[last]!)} L.`,
+          },
+        ],
+      },
+    );
   }
   const i = segmentOf(vs, volumeL);
   let low = xs[i]!;
@@ -68,7 +77,13 @@ export function segmentOf(ascending: Float64Array, value: number): number {
   return low;
 }
 
-function hermite(xs: Float64Array, vs: Float64Array, ms: Float64Array, i: number, x: number): number {
+function hermite(
+  xs: Float64Array,
+  vs: Float64Array,
+  ms: Float64Array,
+  i: number,
+  x: number,
+): number {
   const x0 = xs[i]!;
   const x1 = xs[i + 1];
   if (x1 === undefined || x1 === x0) return vs[i]!;

@@ -28,7 +28,10 @@ export function liquidSpace(solids: readonly PlacedSolid[], facets: number): Liq
   const volumeMm3 = enclosedVolume(mesh);
   const held = holds.reduce((sum, { kind, solid }) => sum + kind.volume(solid), 0);
   if (!(volumeMm3 > dustOfCapacity * held)) {
-    throw invalid('/solids', 'The liquid space is empty: what displaces takes away all that holds.');
+    throw invalid(
+      '/solids',
+      'The liquid space is empty: what displaces takes away all that holds.',
+    );
   }
   return { mesh, origin, facets, volumeMm3 };
 }

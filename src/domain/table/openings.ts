@@ -25,12 +25,19 @@ export function openings(
 
   function resting(name: 'outlet' | 'vent', point: Vec3, direction: Vec3): number {
     if (!inside(solids, point)) {
-      throw invalid(`/${name}`, `The ${name} does not lie in the liquid space: move it inside or onto the wall.`);
+      throw invalid(
+        `/${name}`,
+        `The ${name} does not lie in the liquid space: move it inside or onto the wall.`,
+      );
     }
     const [x, y, z] = space.origin;
-    const widest = Math.max(...solids.map(({ kind, solid }) => (kind.curved ? Math.max(...kind.extent(solid)) : 0)));
+    const widest = Math.max(
+      ...solids.map(({ kind, solid }) => (kind.curved ? Math.max(...kind.extent(solid)) : 0)),
+    );
     const nearMm = 2 * thinMm + (4 * widest) / space.facets ** 2;
-    return restingVolume(space.mesh, direction, [point[0] - x, point[1] - y, point[2] - z], nearMm) / 1e6;
+    return (
+      restingVolume(space.mesh, direction, [point[0] - x, point[1] - y, point[2] - z], nearMm) / 1e6
+    );
   }
 }
 

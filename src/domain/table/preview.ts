@@ -31,6 +31,8 @@ export interface Preview {
   space: TankMesh;
   /** Each solid alone, placed and turned, for balloons, picking and hatching; document order. */
   solids: readonly (TankMesh & Pick<SolidFields, 'id' | 'role'>)[];
+  /** Least and greatest x, y, z of the liquid space in the tank's frame, mm: its overall sizes. */
+  extent: { low: Vec3; high: Vec3 };
   frame: ReadingFrame;
   capacityL: number;
   errorL: number;

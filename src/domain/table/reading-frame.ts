@@ -1,11 +1,11 @@
 import { upVector } from '../../geometry/attitude';
-import { levels } from '../../geometry/mesh';
-import { samePlaceMm, snap } from '../../geometry/tolerance';
-import { dot, opposite, type Vec3 } from '../../geometry/vec3';
+import { snap, samePlaceMm } from '../../geometry/tolerance';
+import { dot } from '../../geometry/vec3';
 import { invalid } from '../errors';
 import type { TankDocument } from '../tank/document';
-import { highestLevel, type PlacedSolid } from '../tank/placed-solid';
-import { columnOf } from './column';
+import type { PlacedSolid } from '../tank/placed-solid';
+import { columnAt } from './column';
+import { extremes } from './extremes';
 import type { LiquidSpace } from './liquid-space';
 import type { ReadingFrame } from './preview';
 
@@ -46,7 +46,7 @@ export function readingFrame(
 
 function stickOf({ at, zero }: NonNullable<TankDocument['stick']>, solids: readonly PlacedSolid[]) {
   const [x, y] = at;
-  const column = columnOf(solids, { origin: [x, y, 0], direction: [0, 0, 1] });
+  const column = columnAt(solids, x, y);
   if (column.length === 0) {
     throw invalid(
       '/stick/at',
@@ -63,36 +63,6 @@ function stickOf({ at, zero }: NonNullable<TankDocument['stick']>, solids: reado
     );
   }
   return { at: [x, y] as const, zeroZ: zero ?? tidy(open.from), roofZ: tidy(open.to) };
-}
-
-function extremes(
-  solids: readonly PlacedSolid[],
-  { mesh, origin, facets }: LiquidSpace,
-  up: Vec3,
-): readonly [number, number] {
-  const holds = solids.filter(({ solid }) => solid.role === 'holds');
-  let low = Infinity;
-  let high = -Infinity;
-  for (const level of levels(mesh, up)) {
-    if (level < low) low = level;
-    if (level > high) high = level;
-  }
-  const shift = dot(up, origin);
-  // corners of the facets stand off the true surface by no more than D·π²/6N²
-  const widest = Math.max(
-    0,
-    ...holds.filter(({ kind }) => kind.curved).map(({ kind, solid }) => Math.max(...kind.extent(solid))),
-  );
-  const slack = (2 * widest) / facets ** 2 + samePlaceMm;
-  return [
-    -exactIfNear(opposite(up), -(low + shift)),
-    exactIfNear(up, high + shift),
-  ];
-
-  function exactIfNear(direction: Vec3, ofMesh: number): number {
-    const exact = Math.max(...holds.map((one) => highestLevel(one, direction)));
-    return Math.abs(exact - ofMesh) <= slack ? exact : ofMesh;
-  }
 }
 
 /** Rounding of a place that lies on the snapping grid is taken off, so that 240 mm reads 240. */

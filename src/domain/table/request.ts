@@ -4,7 +4,10 @@ import { tankDocument } from '../tank/document';
 /** Most rows that one table may have; beyond it a larger step is asked for. */
 export const mostRows = 20_000;
 
-const stepMm = z.number('Give the step in millimetres.').positive('A step is more than 0 mm.').max(100_000);
+const stepMm = z
+  .number('Give the step in millimetres.')
+  .positive('A step is more than 0 mm.')
+  .max(100_000);
 const atMm = z
   .array(z.number('Give a depth in millimetres.').min(0, 'A depth is 0 mm or more.'))
   .min(1, 'Give at least one depth.')
@@ -18,7 +21,11 @@ export const computeRequest = z
   .strictObject({ design: tankDocument, stepMm: stepMm.optional(), atMm: atMm.optional() })
   .superRefine((request, context) => {
     if ((request.stepMm === undefined) === (request.atMm === undefined)) {
-      context.addIssue({ code: 'custom', path: ['stepMm'], message: 'Give either stepMm or atMm.' });
+      context.addIssue({
+        code: 'custom',
+        path: ['stepMm'],
+        message: 'Give either stepMm or atMm.',
+      });
     }
   });
 

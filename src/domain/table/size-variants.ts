@@ -24,7 +24,9 @@ export function sizeVariants(document: TankDocument, by: number): SizeVariant[] 
         const grown = placedSolid(withSize(solid, path, sizeMm + by));
         const original = whole[index]!;
         const turned = (solid.turn ?? [0, 0, 0]).some((degrees) => degrees % 360 !== 0);
-        const replacements = turned ? [1, -1].map((end) => grownFrom(original, grown, end)) : [grown];
+        const replacements = turned
+          ? [1, -1].map((end) => grownFrom(original, grown, end))
+          : [grown];
         return { sizeMm, variants: replacements.map((one) => whole.with(index, one)) };
       }),
   );

@@ -60,7 +60,8 @@ function lowestPlace({ positions, triangles }: Mesh, up: Vec3, low: number): Vec
   const add = (weight: number, ...vertices: number[]) => {
     sum[3] += weight;
     for (const vertex of vertices) {
-      for (let i = 0; i < 3; i += 1) sum[i]! += (weight * positions[3 * vertex + i]!) / vertices.length;
+      for (let i = 0; i < 3; i += 1)
+        sum[i]! += (weight * positions[3 * vertex + i]!) / vertices.length;
     }
   };
   for (let n = 0; n < triangles.length; n += 3) {

@@ -10,6 +10,9 @@ import type { ComputedTable } from './request';
 import { sizeVariants } from './size-variants';
 import { tableRows } from './table-rows';
 
+/** What the ± is worked out for: the rows of a table and the bound of its computing. */
+export type TableWithoutPlusMinus = Pick<ComputedTable, 'rows' | 'heightMm' | 'errorL'>;
+
 /** Facets and readings that sensitivities are taken at: they need two digits, not nine. */
 const facets = 48;
 const samples = 100;
@@ -23,7 +26,7 @@ const samples = 100;
 export async function plusMinusOfRows(
   document: TankDocument,
   settings: Pick<TankSettings, 'sizePlusMinusMm' | 'dipPlusMinusMm'>,
-  { rows, heightMm, errorL }: ComputedTable,
+  { rows, heightMm, errorL }: TableWithoutPlusMinus,
 ): Promise<number[]> {
   await loadManifold();
   const depths = Array.from({ length: samples + 1 }, (_, i) => (i / samples) * heightMm);
@@ -76,7 +79,11 @@ function sizesSquared(
   }
 }
 
-function litresAt(document: TankDocument, solids: readonly PlacedSolid[], depths: readonly number[]) {
+function litresAt(
+  document: TankDocument,
+  solids: readonly PlacedSolid[],
+  depths: readonly number[],
+) {
   const space = liquidSpace(solids, facets);
   const frame = readingFrame(document, solids, space);
   const litres = tableRows(space, frame, depths).map(({ volumeL }) => volumeL);
