@@ -1,3 +1,4 @@
+import { fileURLToPath } from 'node:url';
 import node from '@astrojs/node';
 import react from '@astrojs/react';
 import tailwindcss from '@tailwindcss/vite';
@@ -14,7 +15,7 @@ export default defineConfig({
   adapter: node({ mode: 'middleware' }),
   integrations: [react(), computeWorkerBuild(), precompress()],
   security: {
-    // Our own front judges Origin and Sec-Fetch-Site for every kind of body. This check knows only
+    // server/http judges Origin and Sec-Fetch-Site for every kind of body. This check knows only
     // 127.0.0.1 and localhost, and would refuse a DELETE under any other name.
     checkOrigin: false,
     allowedDomains: [{ hostname: '127.0.0.1' }, { hostname: 'localhost' }],
@@ -32,6 +33,8 @@ export default defineConfig({
     },
   },
   vite: {
+    // Astro reads `~` from tsconfig.json for pages; browser workers are bundled without it.
+    resolve: { alias: { '~': fileURLToPath(new URL('./src', import.meta.url)) } },
     plugins: [tailwindcss(), serverEntryPlugin()],
     build: { assetsInlineLimit: 0 },
     worker: { format: 'es' },

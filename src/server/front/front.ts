@@ -10,7 +10,6 @@ import { hostFault } from './host-allow-list';
 import { discardRest, readBody } from './read-body';
 import { refusals, refuse, tooLarge, type Refusal } from './refuse';
 import { requestPath } from './request-path';
-import { isFormBody, mayAct } from './same-site';
 import { securityHeaders } from './security-headers';
 import { shapeResponse } from './shape-response';
 import type { StaticFiles } from './static-files';
@@ -41,11 +40,10 @@ const methods = new Set(['GET', 'HEAD', 'POST', 'PUT', 'PATCH', 'DELETE', 'OPTIO
 
 /**
  * What every request walks through before a page or a call of the API sees it: Host, path, method,
- * closed routes, files, same site, body cap; and what every answer carries.
+ * closed routes, files, body cap; and what every answer carries.
  */
 export function createFront({ config, log, state, files, handler }: FrontParts) {
   const headers = securityHeaders(config.http.tls);
-  const scheme = config.http.tls ? 'https' : 'http';
 
   return async function front(request: IncomingMessage, response: ServerResponse): Promise<void> {
     const requestId = randomUUID();
@@ -66,15 +64,10 @@ export function createFront({ config, log, state, files, handler }: FrontParts) 
     response.once('close', () => {
       log.debug('request', { method, path, status: response.statusCode, ms: Math.round(performance.now() - startedAt), requestId });
     });
-    if (path === '/healthz') return sayAlive(response);
     if (path === '/readyz' && state.leaving) return sayLeaving(response);
     const reads = method === 'GET' || method === 'HEAD';
     if (reads && (await files.serve(path, request, response))) return;
-    if (!mayAct(method, request.headers, [config.http.origin, `${scheme}://${request.headers.host}`])) {
-      return say(refusals.otherSite);
-    }
     if (!reads) {
-      if (isFormBody(request.headers)) return say(refusals.formBody);
       const cap = bodyCap(path);
       const body = await readBody(request, cap);
       if (body === 'gone') return void response.destroy();
@@ -113,17 +106,11 @@ export function createFront({ config, log, state, files, handler }: FrontParts) 
   };
 }
 
-function sayAlive(response: ServerResponse): void {
-  response.setHeader('Cache-Control', 'no-store');
-  response.setHeader('Content-Type', 'application/json');
-  response.end('{"status":"alive"}');
-}
-
 function sayLeaving(response: ServerResponse): void {
   response.statusCode = 503;
   response.setHeader('Cache-Control', 'no-store');
   response.setHeader('Content-Type', 'application/json');
-  response.end('{"status":"leaving"}');
+  response.end('{"ready":false,"checks":[{"name":"process","fit":false,"detail":"The server is leaving."}]}');
 }
 
 /** The framework takes a body that was read already from `request.body`, as an iterable of bytes. */

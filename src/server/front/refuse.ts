@@ -1,11 +1,12 @@
 import type { IncomingMessage, ServerResponse } from 'node:http';
+import type { ErrorCode } from '~/domain/errors';
 
 /** What a refusal of the front says: the same sentence to a person and to a program. */
 export interface Refusal {
   status: number;
   title: string;
   detail: string;
-  code: string;
+  code: ErrorCode | 'internal';
 }
 
 export const refusals = {
@@ -30,20 +31,8 @@ export const refusals = {
   method: {
     status: 405,
     title: 'Method not allowed',
-    code: 'bad-request',
+    code: 'method-not-allowed',
     detail: 'Use GET, HEAD, POST, PUT, PATCH or DELETE.',
-  },
-  otherSite: {
-    status: 403,
-    title: 'Forbidden',
-    code: 'forbidden',
-    detail: 'This request came from another site and was not carried out.',
-  },
-  formBody: {
-    status: 415,
-    title: 'Unsupported media type',
-    code: 'bad-request',
-    detail: 'Send JSON, with the header Content-Type: application/json.',
   },
   notFound: {
     status: 404,
@@ -60,7 +49,7 @@ export const refusals = {
   failed: {
     status: 500,
     title: 'Server error',
-    code: 'unavailable',
+    code: 'internal',
     detail: 'Something went wrong on our side. Nothing was half done; try again.',
   },
 } as const satisfies Record<string, Refusal>;
@@ -80,8 +69,8 @@ export function refusalBody(
     !(request.url ?? '').startsWith('/api/') && (request.headers.accept ?? '').includes('text/html');
   if (wantsPage) return { type: 'text/html; charset=utf-8', text: page(refusal) };
   const { status, title, detail, code } = refusal;
-  const problem = { type: 'about:blank', title, status, detail, code, requestId, errors: [] };
-  return { type: 'application/problem+json', text: JSON.stringify(problem) };
+  const problem = { type: `/api#${code}`, title, status, detail, code, requestId, errors: [] };
+  return { type: 'application/problem+json; charset=utf-8', text: JSON.stringify(problem) };
 }
 
 export function refuse(
