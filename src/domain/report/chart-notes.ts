@@ -37,7 +37,7 @@ function dipSentences(input: ChartInput, sketch: Sketch | null): string[] {
     if (place !== null && sketch !== null) {
       const across = sketch.view === 'side' ? 'from its near side' : 'from its near end';
       sentences.push(
-        `Dip point: ${length(place.fromLeftMm)} from the left of the sketch, ${length(place.fromNearMm)} ${across}.`,
+        `Dip point: ${length(Math.round(place.fromLeftMm))} from the left of the sketch, ${length(Math.round(place.fromNearMm))} ${across}.`,
       );
     }
     sentences.push(zeroSentence(input, place?.zeroAboveLowestMm ?? null));
