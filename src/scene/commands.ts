@@ -10,7 +10,10 @@ export function addSolid(document: TankDocument, solid: Solid): TankDocument {
 }
 
 export function removeSolid(document: TankDocument, id: string): TankDocument {
-  return { ...document, solids: document.solids.filter((solid) => solid.id !== id) };
+  return {
+    ...document,
+    solids: document.solids.filter((solid) => solid.id !== id),
+  };
 }
 
 /** A copy stands beside its original, shifted along x by `shiftMm`. */
@@ -19,7 +22,11 @@ export function copySolid(document: TankDocument, id: string, shiftMm: number): 
   const original = document.solids[index];
   if (!original) return document;
   const [x, y, z] = original.at ?? [0, 0, 0];
-  const copy: Solid = { ...original, id: freeId(document, original.id), at: [x + shiftMm, y, z] };
+  const copy: Solid = {
+    ...original,
+    id: freeId(document, original.id),
+    at: [x + shiftMm, y, z],
+  };
   const solids = [...document.solids];
   solids.splice(index + 1, 0, copy);
   return { ...document, solids };

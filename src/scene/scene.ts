@@ -25,7 +25,10 @@ export type SceneAction =
   | { type: 'replace'; name: string; document: TankDocument };
 
 export function newScene(document: TankDocument): Scene {
-  return { history: newHistory(document), selected: document.solids[0]?.id ?? null };
+  return {
+    history: newHistory(document),
+    selected: document.solids[0]?.id ?? null,
+  };
 }
 
 export function sceneReducer(scene: Scene, action: SceneAction): Scene {

@@ -1,5 +1,5 @@
-import { Canvas, useThree } from "@react-three/fiber";
-import { useEffect, useMemo } from "react";
+import { Canvas, useThree } from '@react-three/fiber';
+import { useEffect, useMemo } from 'react';
 import {
   BackSide,
   BufferAttribute,
@@ -10,15 +10,16 @@ import {
   Vector2,
   type Material,
   type Object3D,
-} from "three";
-import type { Preview, TankMesh } from "~/domain/table/preview";
-import { sectionSegments } from "~/geometry/section";
-import { edgesOf, edgesSeenFrom } from "./drawn-edges";
-import { fatLines } from "./fat-lines";
-import { useInk, type Ink } from "./ink";
-import { depthOnly, fill, hatch, surfaceTone } from "./materials";
-import type { Plate, Projection } from "./projection";
-import { levelPlane, worldOf, worldPoints, type ToWorld } from "./world";
+} from 'three';
+import type { Preview, TankMesh } from '~/domain/table/preview';
+import { sectionSegments } from '~/geometry/section';
+import { edgesOf, edgesSeenFrom } from './drawn-edges';
+import { fatLines } from './fat-lines';
+import { useInk, type Ink } from './ink';
+import { depthOnly, fill, hatch, surfaceTone } from './materials';
+import type { Plate, Projection } from './projection';
+import { withoutLid } from './without-lid';
+import { levelPlane, worldOf, worldPoints, type ToWorld } from './world';
 
 export interface TankCanvasProps {
   preview: Preview;
@@ -57,20 +58,13 @@ export default function TankCanvas(props: TankCanvasProps) {
   );
 }
 
-function Drawing({
-  preview,
-  plate,
-  projection,
-  levels,
-  selected,
-}: TankCanvasProps) {
+function Drawing({ preview, plate, projection, levels, selected }: TankCanvasProps) {
   const ink = useInk();
   const pixelRatio = useThree((state) => state.viewport.dpr);
-  const toWorld = useMemo(
-    () => worldOf(projection, plate),
-    [projection, plate],
-  );
+  const toWorld = useMemo(() => worldOf(projection, plate), [projection, plate]);
   const space = useGeometry(preview.space, toWorld);
+  const walls = useMemo(() => withoutLid(preview.space, preview.frame.up), [preview]);
+  const sides = useGeometry(walls, toWorld);
   const edges = useMemo(() => edgesOf(preview.space), [preview.space]);
   const resolution = useMemo(
     () => new Vector2(plate.width, plate.height),
@@ -81,7 +75,7 @@ function Drawing({
     [edges, projection.towards, toWorld],
   );
   const displaced = useMemo(
-    () => preview.solids.filter((solid) => solid.role === "displaces"),
+    () => preview.solids.filter((solid) => solid.role === 'displaces'),
     [preview.solids],
   );
   const chosen = useMemo(() => {
@@ -94,21 +88,16 @@ function Drawing({
     () =>
       levels.wet === null
         ? new Float32Array()
-        : worldPoints(
-            sectionSegments(preview.space, preview.frame.up, levels.wet),
-            toWorld,
-          ),
+        : worldPoints(sectionSegments(preview.space, preview.frame.up, levels.wet), toWorld),
     [preview, levels.wet, toWorld],
   );
   const planes = useMemo(() => {
-    const plane = (level: number | null, keep: "below" | "above") =>
-      level === null
-        ? null
-        : levelPlane(preview.frame.up, level, keep, toWorld);
+    const plane = (level: number | null, keep: 'below' | 'above') =>
+      level === null ? null : levelPlane(preview.frame.up, level, keep, toWorld);
     return {
-      wet: plane(levels.wet, "below"),
-      unusable: plane(levels.unusable, "below"),
-      headroom: plane(levels.safeFill, "above"),
+      wet: plane(levels.wet, 'below'),
+      unusable: plane(levels.unusable, 'below'),
+      headroom: plane(levels.safeFill, 'above'),
     };
   }, [preview.frame.up, levels.wet, levels.unusable, levels.safeFill, toWorld]);
 
@@ -131,9 +120,7 @@ function Drawing({
           <Faces
             geometry={space}
             order={2}
-            material={() =>
-              fill(surfaceTone(ink), BackSide, [planes.wet!], true)
-            }
+            material={() => fill(surfaceTone(ink), BackSide, [planes.wet!], true)}
             deps={[ink, planes.wet]}
           />
         </>
@@ -142,30 +129,20 @@ function Drawing({
         <Faces
           geometry={space}
           order={4}
-          material={() =>
-            hatch("unusable", ink.ink2, [planes.unusable!], pixelRatio)
-          }
+          material={() => hatch('unusable', ink.ink2, [planes.unusable!], pixelRatio)}
           deps={[ink, planes.unusable, pixelRatio]}
         />
       )}
       {planes.headroom && (
         <Faces
-          geometry={space}
+          geometry={sides}
           order={4}
-          material={() =>
-            hatch("headroom", ink.ink2, [planes.headroom!], pixelRatio)
-          }
+          material={() => hatch('headroom', ink.ink2, [planes.headroom!], pixelRatio)}
           deps={[ink, planes.headroom, pixelRatio]}
         />
       )}
       {displaced.map((solid) => (
-        <Solid
-          key={solid.id}
-          mesh={solid}
-          toWorld={toWorld}
-          ink={ink}
-          pixelRatio={pixelRatio}
-        />
+        <Solid key={solid.id} mesh={solid} toWorld={toWorld} ink={ink} pixelRatio={pixelRatio} />
       ))}
       <Faces geometry={space} order={6} material={depthOnly} deps={[]} />
       <Lines
@@ -187,7 +164,7 @@ function Drawing({
       <Lines
         segments={chosen}
         colour={ink.ink}
-        widthPx={2.4}
+        widthPx={2}
         where="always"
         order={9}
         resolution={resolution}
@@ -204,18 +181,13 @@ function Drawing({
   );
 }
 
-function Solid(props: {
-  mesh: TankMesh;
-  toWorld: ToWorld;
-  ink: Ink;
-  pixelRatio: number;
-}) {
+function Solid(props: { mesh: TankMesh; toWorld: ToWorld; ink: Ink; pixelRatio: number }) {
   const geometry = useGeometry(props.mesh, props.toWorld);
   return (
     <Faces
       geometry={geometry}
       order={5}
-      material={() => hatch("deadwood", props.ink.line, [], props.pixelRatio)}
+      material={() => hatch('deadwood', props.ink.line, [], props.pixelRatio)}
       deps={[props.ink, props.pixelRatio]}
     />
   );
@@ -247,7 +219,7 @@ function Lines(props: {
   segments: Float32Array;
   colour: string;
   widthPx: number;
-  where: "visible" | "hidden" | "always";
+  where: 'visible' | 'hidden' | 'always';
   order: number;
   resolution: Vector2;
 }) {
@@ -276,10 +248,7 @@ function Shown({ object }: { object: Object3D }) {
 function useGeometry(mesh: TankMesh, toWorld: ToWorld): BufferGeometry {
   const geometry = useMemo(() => {
     const made = new BufferGeometry();
-    made.setAttribute(
-      "position",
-      new BufferAttribute(worldPoints(mesh.positions, toWorld), 3),
-    );
+    made.setAttribute('position', new BufferAttribute(worldPoints(mesh.positions, toWorld), 3));
     made.setIndex(new BufferAttribute(mesh.triangles, 1));
     return made;
   }, [mesh, toWorld]);

@@ -1,5 +1,5 @@
-import type { TankMesh } from "~/domain/table/preview";
-import type { Vec3 } from "~/domain/tank/solid";
+import type { TankMesh } from '~/domain/table/preview';
+import type { Vec3 } from '~/domain/tank/solid';
 
 /**
  * The lines a draughtsman would draw of a closed mesh: its creases, and from a given side the
@@ -23,8 +23,7 @@ export function edgesOf(mesh: TankMesh): EdgeList {
   const segments: number[] = [];
   const pairs: number[] = [];
   const crease: number[] = [];
-  for (let t = 0; t < triangles.length; t += 3)
-    normalInto(normals, t, positions, triangles);
+  for (let t = 0; t < triangles.length; t += 3) normalInto(normals, t, positions, triangles);
   for (let t = 0; t < triangles.length; t += 3) {
     for (let corner = 0; corner < 3; corner += 1) {
       const a = triangles[t + corner]!;
@@ -42,14 +41,9 @@ export function edgesOf(mesh: TankMesh): EdgeList {
         normals[t + 2]! * normals[other + 2]!;
       if (dot > 0.9999999) continue;
       for (const v of [a, b]) {
-        segments.push(
-          positions[3 * v]!,
-          positions[3 * v + 1]!,
-          positions[3 * v + 2]!,
-        );
+        segments.push(positions[3 * v]!, positions[3 * v + 1]!, positions[3 * v + 2]!);
       }
-      for (const f of [t, other])
-        pairs.push(normals[f]!, normals[f + 1]!, normals[f + 2]!);
+      for (const f of [t, other]) pairs.push(normals[f]!, normals[f + 1]!, normals[f + 2]!);
       crease.push(dot < creaseCos ? 1 : 0);
     }
   }
@@ -66,10 +60,8 @@ export function edgesSeenFrom(edges: EdgeList, towards: Vec3): Float32Array {
   for (let e = 0; e < edges.crease.length; e += 1) {
     const n = edges.normals;
     const i = 6 * e;
-    const one =
-      n[i]! * towards[0] + n[i + 1]! * towards[1] + n[i + 2]! * towards[2];
-    const two =
-      n[i + 3]! * towards[0] + n[i + 4]! * towards[1] + n[i + 5]! * towards[2];
+    const one = n[i]! * towards[0] + n[i + 1]! * towards[1] + n[i + 2]! * towards[2];
+    const two = n[i + 3]! * towards[0] + n[i + 4]! * towards[1] + n[i + 5]! * towards[2];
     if (edges.crease[e] === 1 || one > 0 !== two > 0) {
       for (let k = 0; k < 6; k += 1) drawn.push(edges.segments[i + k]!);
     }
@@ -77,17 +69,8 @@ export function edgesSeenFrom(edges: EdgeList, towards: Vec3): Float32Array {
   return Float32Array.from(drawn);
 }
 
-function normalInto(
-  into: Float64Array,
-  t: number,
-  p: Float64Array,
-  triangles: Uint32Array,
-) {
-  const [a, b, c] = [
-    3 * triangles[t]!,
-    3 * triangles[t + 1]!,
-    3 * triangles[t + 2]!,
-  ];
+function normalInto(into: Float64Array, t: number, p: Float64Array, triangles: Uint32Array) {
+  const [a, b, c] = [3 * triangles[t]!, 3 * triangles[t + 1]!, 3 * triangles[t + 2]!];
   const ux = p[b]! - p[a]!;
   const uy = p[b + 1]! - p[a + 1]!;
   const uz = p[b + 2]! - p[a + 2]!;

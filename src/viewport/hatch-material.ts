@@ -1,12 +1,6 @@
-import {
-  Color,
-  DoubleSide,
-  FrontSide,
-  ShaderMaterial,
-  type Plane,
-} from "three";
+import { Color, DoubleSide, FrontSide, ShaderMaterial, type Plane } from 'three';
 
-export type HatchPattern = "unusable" | "headroom" | "deadwood";
+export type HatchPattern = 'unusable' | 'headroom' | 'deadwood';
 
 const patternCode: Record<HatchPattern, number> = {
   unusable: 0,
@@ -66,6 +60,6 @@ export function hatchMaterial(
     transparent: true,
     depthTest: false,
     depthWrite: false,
-    side: pattern === "deadwood" ? DoubleSide : FrontSide,
+    side: pattern === 'deadwood' ? DoubleSide : FrontSide,
   });
 }

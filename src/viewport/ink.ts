@@ -1,4 +1,4 @@
-import { useEffect, useState } from "react";
+import { useEffect, useState } from 'react';
 
 /** The drawing's colours as the style sheet has them now: light film or dark board. */
 export interface Ink {
@@ -15,10 +15,10 @@ export interface Ink {
 export function useInk(): Ink {
   const [ink, setInk] = useState(readInk);
   useEffect(() => {
-    const dark = window.matchMedia("(prefers-color-scheme: dark)");
+    const dark = window.matchMedia('(prefers-color-scheme: dark)');
     const change = () => setInk(readInk());
-    dark.addEventListener("change", change);
-    return () => dark.removeEventListener("change", change);
+    dark.addEventListener('change', change);
+    return () => dark.removeEventListener('change', change);
   }, []);
   return ink;
 }
@@ -27,13 +27,13 @@ function readInk(): Ink {
   const style = getComputedStyle(document.documentElement);
   const of = (name: string) => style.getPropertyValue(`--${name}`).trim();
   return {
-    film: of("film"),
-    sheet: of("sheet"),
-    ink: of("ink"),
-    ink2: of("ink-2"),
-    hair: of("hair"),
-    line: of("line"),
-    wash: of("wash"),
-    datum: of("datum"),
+    film: of('film'),
+    sheet: of('sheet'),
+    ink: of('ink'),
+    ink2: of('ink-2'),
+    hair: of('hair'),
+    line: of('line'),
+    wash: of('wash'),
+    datum: of('datum'),
   };
 }

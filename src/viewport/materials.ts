@@ -1,12 +1,6 @@
-import {
-  DoubleSide,
-  MeshBasicMaterial,
-  type Material,
-  type Plane,
-  type Side,
-} from "three";
-import { hatchMaterial, type HatchPattern } from "./hatch-material";
-import type { Ink } from "./ink";
+import { DoubleSide, MeshBasicMaterial, type Material, type Plane, type Side } from 'three';
+import { hatchMaterial, type HatchPattern } from './hatch-material';
+import type { Ink } from './ink';
 
 const behindEdges = {
   polygonOffset: true,
@@ -15,12 +9,7 @@ const behindEdges = {
 };
 
 /** Flat colour without light, kept a hair behind the edges drawn upon it. */
-export function fill(
-  colour: string,
-  side: Side,
-  clippingPlanes: Plane[],
-  depth: boolean,
-) {
+export function fill(colour: string, side: Side, clippingPlanes: Plane[], depth: boolean) {
   return new MeshBasicMaterial({
     color: colour,
     side,
@@ -43,21 +32,14 @@ export function depthOnly(): Material {
 export function surfaceTone(ink: Ink): string {
   const mix = (i: number) =>
     Math.round(
-      (parseInt(ink.wash.slice(i, i + 2), 16) +
-        parseInt(ink.film.slice(i, i + 2), 16)) /
-        2,
+      (parseInt(ink.wash.slice(i, i + 2), 16) + parseInt(ink.film.slice(i, i + 2), 16)) / 2,
     )
       .toString(16)
-      .padStart(2, "0");
+      .padStart(2, '0');
   return `#${mix(1)}${mix(3)}${mix(5)}`;
 }
 
-export function hatch(
-  pattern: HatchPattern,
-  colour: string,
-  planes: Plane[],
-  pixelRatio: number,
-) {
+export function hatch(pattern: HatchPattern, colour: string, planes: Plane[], pixelRatio: number) {
   const material = hatchMaterial(pattern, colour, planes);
   material.uniforms.pixelRatio!.value = pixelRatio;
   return material;

@@ -1,5 +1,5 @@
-import type { ReadingFrame, TankMesh } from "~/domain/table/preview";
-import type { Vec3 } from "~/domain/tank/solid";
+import type { ReadingFrame, TankMesh } from '~/domain/table/preview';
+import type { Vec3 } from '~/domain/tank/solid';
 
 /**
  * How the tank is looked at. All views are parallel projections, so one 3 × 3 matrix says
@@ -7,9 +7,9 @@ import type { Vec3 } from "~/domain/tank/solid";
  * (the tank's frame turned so that up is z).
  */
 export type View =
-  | { name: "end" | "side" | "plan" | "away" }
+  | { name: 'end' | 'side' | 'plan' | 'away' }
   /** Turned freely: azimuth about plumb and height of the eye, degrees. */
-  | { name: "free"; azimuth: number; elevation: number };
+  | { name: 'free'; azimuth: number; elevation: number };
 
 export type Matrix3 = readonly [Vec3, Vec3, Vec3];
 
@@ -17,39 +17,34 @@ const recedingAngle = (32 * Math.PI) / 180;
 
 export function viewMatrix(view: View, receding: number): Matrix3 {
   switch (view.name) {
-    case "end":
+    case 'end':
       return [
         [0, 1, 0],
         [0, 0, 1],
         [1, 0, 0],
       ];
-    case "side":
+    case 'side':
       return [
         [1, 0, 0],
         [0, 0, 1],
         [0, -1, 0],
       ];
-    case "plan":
+    case 'plan':
       return [
         [1, 0, 0],
         [0, 1, 0],
         [0, 0, 1],
       ];
-    case "away":
+    case 'away':
       return [
         [1, receding * Math.cos(recedingAngle), 0],
         [0, receding * Math.sin(recedingAngle), 1],
         [0, -1, 0],
       ];
-    case "free": {
+    case 'free': {
       const a = (view.azimuth * Math.PI) / 180;
       const e = (view.elevation * Math.PI) / 180;
-      const [sa, ca, se, ce] = [
-        Math.sin(a),
-        Math.cos(a),
-        Math.sin(e),
-        Math.cos(e),
-      ];
+      const [sa, ca, se, ce] = [Math.sin(a), Math.cos(a), Math.sin(e), Math.cos(e)];
       return [
         [ca, sa, 0],
         [-se * sa, se * ca, ce],
@@ -90,11 +85,7 @@ export function apply(m: Matrix3, p: Vec3): [number, number, number] {
 /** The direction of sight in the tank's frame (towards the viewer): m⁻¹ · (0, 0, 1), not normed. */
 export function towardsViewer(m: Matrix3): Vec3 {
   const [a, b] = [m[0], m[1]];
-  return [
-    a[1] * b[2] - a[2] * b[1],
-    a[2] * b[0] - a[0] * b[2],
-    a[0] * b[1] - a[1] * b[0],
-  ];
+  return [a[1] * b[2] - a[2] * b[1], a[2] * b[0] - a[0] * b[2], a[0] * b[1] - a[1] * b[0]];
 }
 
 /** Where the picture may draw, CSS px from its top left corner. */
@@ -121,22 +112,15 @@ export interface Projection {
  * Fits a view onto the plate. Upright views keep the stick's own scale, so that a level is one
  * straight line through picture, stick and table; plan and free views are fitted.
  */
-export function project(
-  mesh: TankMesh,
-  frame: ReadingFrame,
-  view: View,
-  plate: Plate,
-): Projection {
-  const upright =
-    view.name === "end" || view.name === "side" || view.name === "away";
+export function project(mesh: TankMesh, frame: ReadingFrame, view: View, plate: Plate): Projection {
+  const upright = view.name === 'end' || view.name === 'side' || view.name === 'away';
   const stickScale = plate.railPx / (frame.heightMm * frame.levelPerReading);
   const plumb = plumbMatrix(frame.up);
   const room = plate.width - 2 * plate.marginX;
   const flat = extentOf(mesh, plumb);
   const depth = flat.high[1] - flat.low[1];
   const across = flat.high[0] - flat.low[0];
-  const receding =
-    view.name === "away" ? recede(depth, across, stickScale, plate, room) : 0;
+  const receding = view.name === 'away' ? recede(depth, across, stickScale, plate, room) : 0;
   const m = times(viewMatrix(view, receding), plumb);
   const box = extentOf(mesh, m);
   const spanX = box.high[0] - box.low[0];
@@ -149,8 +133,7 @@ export function project(
   const scaleX = upright ? Math.min(scaleY, room / spanX) : scaleY;
   const centreX = plate.width / 2 - (scaleX * (box.low[0] + box.high[0])) / 2;
   // upright: level = zeroLevel stands at the rail's foot; a drawn-away front face keeps its height
-  const frontLift =
-    view.name === "away" ? receding * Math.sin(recedingAngle) * flat.low[1] : 0;
+  const frontLift = view.name === 'away' ? receding * Math.sin(recedingAngle) * flat.low[1] : 0;
   const footY = upright
     ? plate.railTop + plate.railPx + scaleY * (frame.zeroLevelMm + frontLift)
     : plate.height / 2 + (scaleY * (box.low[1] + box.high[1])) / 2;
@@ -169,18 +152,9 @@ export function onPlate(projection: Projection, p: Vec3): [number, number] {
 }
 
 /** How much of the depth is drawn: half, less where the plate is short of room. */
-function recede(
-  depth: number,
-  across: number,
-  scale: number,
-  plate: Plate,
-  room: number,
-): number {
+function recede(depth: number, across: number, scale: number, plate: Plate, room: number): number {
   const rise = Math.sin(recedingAngle) * depth * scale;
-  const run =
-    Math.cos(recedingAngle) *
-    depth *
-    Math.min(scale, room / Math.max(across, 1e-9));
+  const run = Math.cos(recedingAngle) * depth * Math.min(scale, room / Math.max(across, 1e-9));
   return Math.min(0.5, (plate.railTop - 26) / rise, (0.3 * room) / run);
 }
 

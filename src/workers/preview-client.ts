@@ -1,7 +1,7 @@
 import { DipwrightError } from '~/domain/errors';
 import type { Preview } from '~/domain/table/preview';
 import type { TankDocument } from '~/domain/tank/document';
-import type { PreviewReply, PreviewRequest } from './preview-protocol';
+import type { Measured, PreviewReply, PreviewRequest } from './preview-protocol';
 
 /** Computes previews off the page's own thread. Latest wins. */
 export interface PreviewClient {
@@ -11,15 +11,26 @@ export interface PreviewClient {
    * `unavailable` when the worker cannot run.
    */
   compute(design: TankDocument): Promise<Preview | null>;
+  /**
+   * The ± of each row of a preview of that design, litres (JCGM 100, first order: sizes, dip,
+   * computing); null when a later call took its place. Slower than a preview: one run a size.
+   */
+  plusMinus(design: TankDocument, preview: Preview, measured: Measured): Promise<number[] | null>;
   /** Ends the worker; open calls resolve to null. */
   close(): void;
 }
 
 interface Call {
   number: number;
-  resolve(preview: Preview | null): void;
+  resolve(reply: PreviewReply | null): void;
   reject(error: Error): void;
 }
+
+type Asked = PreviewRequest extends infer R
+  ? R extends unknown
+    ? Omit<R, 'number'>
+    : never
+  : never;
 
 /** What the client needs of a worker, so that a test can stand in for the browser's. */
 export interface PreviewWorker {
@@ -30,7 +41,9 @@ export interface PreviewWorker {
 }
 
 /** Only in the browser: starts the worker at once, so that its WebAssembly is warm at the first edit. */
-export function createPreviewClient(startWorker: () => PreviewWorker = startPreviewWorker): PreviewClient {
+export function createPreviewClient(
+  startWorker: () => PreviewWorker = startPreviewWorker,
+): PreviewClient {
   const worker = startWorker();
   let latest = 0;
   let open: Call | null = null;
@@ -39,7 +52,7 @@ export function createPreviewClient(startWorker: () => PreviewWorker = startPrev
     if (!open || data.number !== open.number) return;
     const call = open;
     open = null;
-    if ('preview' in data) call.resolve(data.preview);
+    if (!('refusal' in data)) call.resolve(data);
     else {
       const { code, message, faults } = data.refusal;
       call.reject(new DipwrightError(code, message, { faults }));
@@ -49,19 +62,32 @@ export function createPreviewClient(startWorker: () => PreviewWorker = startPrev
     const call = open;
     open = null;
     call?.reject(
-      new DipwrightError('unavailable', 'The tank cannot be computed here. Reload the page to try again.'),
+      new DipwrightError(
+        'unavailable',
+        'The tank cannot be computed here. Reload the page to try again.',
+      ),
     );
   };
 
+  function ask(request: Asked): Promise<PreviewReply | null> {
+    open?.resolve(null);
+    latest += 1;
+    const number = latest;
+    return new Promise((resolve, reject) => {
+      open = { number, resolve, reject };
+      worker.postMessage({ ...request, number });
+    });
+  }
+
   return {
-    compute(design) {
-      open?.resolve(null);
-      latest += 1;
-      const number = latest;
-      return new Promise((resolve, reject) => {
-        open = { number, resolve, reject };
-        worker.postMessage({ number, design });
-      });
+    async compute(design) {
+      const reply = await ask({ ask: 'preview', design });
+      return reply && 'preview' in reply ? reply.preview : null;
+    },
+    async plusMinus(design, { rows, frame: { heightMm }, errorL }, measured) {
+      const table = { rows: [...rows], heightMm, errorL };
+      const reply = await ask({ ask: 'plus-minus', design, table, measured });
+      return reply && 'plusMinusL' in reply ? reply.plusMinusL : null;
     },
     close() {
       worker.terminate();

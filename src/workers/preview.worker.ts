@@ -2,6 +2,7 @@ import wasmUrl from 'manifold-3d/manifold.wasm?url';
 import { DipwrightError } from '~/domain/errors';
 import { computePreview } from '~/domain/table/compute-preview';
 import type { Preview } from '~/domain/table/preview';
+import { plusMinusOfRows } from '~/domain/table/uncertainty';
 import { loadManifold } from '~/geometry/manifold';
 import { latestWins } from './latest-wins';
 import type { PreviewReply, PreviewRequest } from './preview-protocol';
@@ -14,9 +15,15 @@ const scope = self as unknown as {
 
 const ready = loadManifold({ wasmUrl });
 
-const take = latestWins<PreviewRequest>(async ({ number, design }) => {
+const take = latestWins<PreviewRequest>(async (request) => {
+  const { number, design } = request;
   try {
     await ready;
+    if (request.ask === 'plus-minus') {
+      const plusMinusL = await plusMinusOfRows(design, request.measured, request.table);
+      scope.postMessage({ number, plusMinusL });
+      return;
+    }
     const preview = await computePreview(design);
     scope.postMessage({ number, preview }, buffersOf(preview));
   } catch (error) {
@@ -26,7 +33,10 @@ const take = latestWins<PreviewRequest>(async ({ number, design }) => {
 scope.onmessage = ({ data }) => take(data);
 
 function buffersOf({ space, solids }: Preview): Transferable[] {
-  return [space, ...solids].flatMap(({ positions, triangles }) => [positions.buffer, triangles.buffer]);
+  return [space, ...solids].flatMap(({ positions, triangles }) => [
+    positions.buffer,
+    triangles.buffer,
+  ]);
 }
 
 function refusalOf(error: unknown) {

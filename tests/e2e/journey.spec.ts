@@ -11,7 +11,9 @@ const run = promisify(execFile);
  * then rising 60 over 800 mm; worked by hand: V = 0.05 h + h²/300 up to 60 mm, then 15 + 0.45 (h − 60)
  * litres, so 30 → 4.5, 60 → 15.0, 150 → 55.5, 300 → 123.0.
  */
-test('a sloped water tank is modelled, issued, printed, handed over and dipped', async ({ page }) => {
+test('a sloped water tank is modelled, issued, printed, handed over and dipped', async ({
+  page,
+}) => {
   test.setTimeout(120_000);
   const name = `Fresh water ${Date.now()}`;
 
@@ -66,7 +68,9 @@ test('a sloped water tank is modelled, issued, printed, handed over and dipped',
       ['150', '55.5'],
       ['300', '123.0'],
     ]) {
-      expect(stdout).toMatch(new RegExp(`(^|\\s)${depth}\\s+${litres!.replace('.', '\\.')}\\s`, 'm'));
+      expect(stdout).toMatch(
+        new RegExp(`(^|\\s)${depth}\\s+${litres!.replace('.', '\\.')}\\s`, 'm'),
+      );
     }
     expect(stdout).toContain('Not for trade');
 

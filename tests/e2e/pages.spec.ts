@@ -33,7 +33,11 @@ for (const person of people) {
             .withTags(['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice'])
             .analyze();
           const said = violations.map(
-            ({ id, nodes }) => `${id}: ${nodes.map(({ html }) => html).slice(0, 3).join(' | ')}`,
+            ({ id, nodes }) =>
+              `${id}: ${nodes
+                .map(({ html }) => html)
+                .slice(0, 3)
+                .join(' | ')}`,
           );
           expect(said, `${met.what}, ${sight.name}: axe`).toEqual([]);
           const sideways = await page.evaluate(
@@ -42,7 +46,10 @@ for (const person of people) {
           expect(sideways, `${met.what}, ${sight.name}: sideways scroll`).toBeLessThanOrEqual(0);
         }
         const expected = met.what === 'page that is not there';
-        expect(faults.splice(0).filter((one) => !(expected && one.includes('404'))), met.what).toEqual([]);
+        expect(
+          faults.splice(0).filter((one) => !(expected && one.includes('404'))),
+          met.what,
+        ).toEqual([]);
       });
     }
     expect(browser.isConnected()).toBe(true);

@@ -22,5 +22,7 @@ export async function typeSizes(
 
 /** Waits until the draft says that it is saved. */
 export async function untilSaved(page: Page): Promise<void> {
-  await expect(page.getByRole('status').filter({ hasText: /draft/ })).toContainText(/ saved \d\d:\d\d/);
+  await expect(page.getByRole('status').filter({ hasText: /draft/ })).toContainText(
+    / saved \d\d:\d\d/,
+  );
 }

@@ -1,5 +1,5 @@
-import { describe, expect, it } from "vitest";
-import { startingPoints } from "~/domain/tank/starting-points";
+import { describe, expect, it } from 'vitest';
+import { startingPoints } from '~/domain/tank/starting-points';
 import {
   copySolid,
   freeId,
@@ -11,19 +11,17 @@ import {
   setSize,
   setStick,
   setTurn,
-} from "~/scene/commands";
-import { newScene, sceneReducer } from "~/scene/scene";
+} from '~/scene/commands';
+import { newScene, sceneReducer } from '~/scene/scene';
 
-const sloped = startingPoints.find(
-  ({ code }) => code === "sloped-floor",
-)!.design;
+const sloped = startingPoints.find(({ code }) => code === 'sloped-floor')!.design;
 
-describe("commands on a design", () => {
-  it("sets one size and leaves the document it came from as it was", () => {
+describe('commands on a design', () => {
+  it('sets one size and leaves the document it came from as it was', () => {
     const before = structuredClone(sloped);
-    const after = setSize(sloped, "ramp", ["length"], 800);
+    const after = setSize(sloped, 'ramp', ['length'], 800);
     expect(after.solids[1]).toMatchObject({
-      id: "ramp",
+      id: 'ramp',
       length: 800,
       width: 450,
       height: 70,
@@ -32,62 +30,54 @@ describe("commands on a design", () => {
     expect(after.solids[0]).toBe(sloped.solids[0]);
   });
 
-  it("places and turns one axis at a time, from the defaults when nothing was said", () => {
-    expect(setPlace(sloped, "body", 2, 12).solids[0]?.at).toEqual([0, 0, 12]);
-    expect(setTurn(sloped, "ramp", 0, 90).solids[1]?.turn).toEqual([
-      90, 0, 180,
-    ]);
+  it('places and turns one axis at a time, from the defaults when nothing was said', () => {
+    expect(setPlace(sloped, 'body', 2, 12).solids[0]?.at).toEqual([0, 0, 12]);
+    expect(setTurn(sloped, 'ramp', 0, 90).solids[1]?.turn).toEqual([90, 0, 180]);
   });
 
-  it("copies beside the original under a name of its own", () => {
-    const after = copySolid(sloped, "ramp", 850);
-    expect(after.solids.map(({ id }) => id)).toEqual([
-      "body",
-      "ramp",
-      "ramp 2",
-    ]);
+  it('copies beside the original under a name of its own', () => {
+    const after = copySolid(sloped, 'ramp', 850);
+    expect(after.solids.map(({ id }) => id)).toEqual(['body', 'ramp', 'ramp 2']);
     expect(after.solids[2]).toMatchObject({
       at: [1000, 0, 0],
       turn: [0, 0, 180],
       length: 850,
     });
-    expect(freeId(after, "ramp")).toBe("ramp 3");
+    expect(freeId(after, 'ramp')).toBe('ramp 3');
   });
 
-  it("refuses a name that is taken", () => {
-    expect(renameSolid(sloped, "ramp", "body")).toBeNull();
-    expect(renameSolid(sloped, "ramp", "floor")?.solids[1]?.id).toBe("floor");
+  it('refuses a name that is taken', () => {
+    expect(renameSolid(sloped, 'ramp', 'body')).toBeNull();
+    expect(renameSolid(sloped, 'ramp', 'floor')?.solids[1]?.id).toBe('floor');
   });
 
-  it("says nothing of an attitude that is level, and takes a stick away whole", () => {
+  it('says nothing of an attitude that is level, and takes a stick away whole', () => {
     expect(setAttitude(sloped, { pitch: 2, roll: 0 }).attitude).toEqual({
       pitch: 2,
       roll: 0,
     });
-    expect("attitude" in setAttitude(sloped, { pitch: 0, roll: 0 })).toBe(
-      false,
-    );
-    expect("stick" in setStick(sloped, undefined)).toBe(false);
+    expect('attitude' in setAttitude(sloped, { pitch: 0, roll: 0 })).toBe(false);
+    expect('stick' in setStick(sloped, undefined)).toBe(false);
   });
 
-  it("switches what a solid does and removes it", () => {
-    expect(setRole(sloped, "ramp", "holds").solids[1]?.role).toBe("holds");
-    expect(removeSolid(sloped, "ramp").solids).toHaveLength(1);
+  it('switches what a solid does and removes it', () => {
+    expect(setRole(sloped, 'ramp', 'holds').solids[1]?.role).toBe('holds');
+    expect(removeSolid(sloped, 'ramp').solids).toHaveLength(1);
   });
 });
 
-describe("scene", () => {
-  it("undoes a named edit, and forgets a selection that is gone", () => {
+describe('scene', () => {
+  it('undoes a named edit, and forgets a selection that is gone', () => {
     let scene = newScene(sloped);
-    scene = sceneReducer(scene, { type: "select", id: "ramp" });
+    scene = sceneReducer(scene, { type: 'select', id: 'ramp' });
     scene = sceneReducer(scene, {
-      type: "edit",
-      name: "remove ramp",
-      edit: (now) => removeSolid(now, "ramp"),
+      type: 'edit',
+      name: 'remove ramp',
+      edit: (now) => removeSolid(now, 'ramp'),
     });
     expect(scene.selected).toBeNull();
-    expect(scene.history.past[0]?.name).toBe("remove ramp");
-    scene = sceneReducer(scene, { type: "undo" });
+    expect(scene.history.past[0]?.name).toBe('remove ramp');
+    scene = sceneReducer(scene, { type: 'undo' });
     expect(scene.history.present).toBe(sloped);
   });
 });

@@ -1,5 +1,5 @@
-import { describe, expect, it } from "vitest";
-import { edgesOf, edgesSeenFrom } from "~/viewport/drawn-edges";
+import { describe, expect, it } from 'vitest';
+import { edgesOf, edgesSeenFrom } from '~/viewport/drawn-edges';
 
 /** A closed prism with `n` sides about the x axis, flat ends fanned from their centres. */
 function prism(n: number) {
@@ -20,13 +20,13 @@ function prism(n: number) {
   };
 }
 
-describe("edges that a draughtsman draws", () => {
-  it("are the twelve of a box, not the diagonals of its faces", () => {
+describe('edges that a draughtsman draws', () => {
+  it('are the twelve of a box, not the diagonals of its faces', () => {
     const edges = edgesOf(prism(4));
     expect(edges.crease.reduce((sum, one) => sum + one, 0)).toBe(12);
   });
 
-  it("are the two rims of a round barrel and its outline from the side", () => {
+  it('are the two rims of a round barrel and its outline from the side', () => {
     const edges = edgesOf(prism(48));
     expect(edges.crease.reduce((sum, one) => sum + one, 0)).toBe(2 * 48);
     const seen = edgesSeenFrom(edges, [0, -1, 0]);

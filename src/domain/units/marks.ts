@@ -1,6 +1,6 @@
 /**
  * Marks of a graduated rail: how far apart they stand so that they can be read.
- * Decimal units climb 1, 2, 5, 10 …; inches halve down to an eighth.
+ * Decimal units climb 1, 2, 5, 10, 20, 25, 50 …; inches halve down to an eighth.
  */
 export interface Marks {
   /** Distance between numbered marks, in the unit of the scale. */
@@ -15,17 +15,11 @@ export interface Marks {
  * @param mostFine most fine marks that fit
  * @param eighths true for a scale in inches
  */
-export function marksFor(
-  span: number,
-  most: number,
-  mostFine: number,
-  eighths = false,
-): Marks {
+export function marksFor(span: number, most: number, mostFine: number, eighths = false): Marks {
   const ladder = eighths ? inchLadder : decimalLadder(span);
   const numbered = ladder.find((step) => span / step <= most) ?? span;
   const fine =
-    ladder.find((step) => span / step <= mostFine && divides(step, numbered)) ??
-    numbered;
+    ladder.find((step) => span / step <= mostFine && divides(step, numbered)) ?? numbered;
   return { numbered, fine };
 }
 
@@ -35,15 +29,15 @@ export function multiples(step: number, span: number): number[] {
   return Array.from({ length: count + 1 }, (_, index) => index * step);
 }
 
-const inchLadder = [
-  0.125, 0.25, 0.5, 1, 2, 4, 6, 12, 24, 48, 96, 192, 480, 960,
-];
+const inchLadder = [0.125, 0.25, 0.5, 1, 2, 4, 6, 12, 24, 48, 96, 192, 480, 960];
 
 function decimalLadder(span: number): number[] {
   const lowest = Math.floor(Math.log10(span)) - 3;
   return Array.from({ length: 6 }, (_, decade) =>
-    [1, 2, 5].map((digit) => digit * 10 ** (lowest + decade)),
-  ).flat();
+    [1, 2, 2.5, 5].map((digit) => digit * 10 ** (lowest + decade)),
+  )
+    .flat()
+    .filter((step) => step >= 10 || !/25/.test(String(Number(step.toPrecision(6)))));
 }
 
 function divides(step: number, whole: number): boolean {

@@ -1,20 +1,12 @@
-import {
-  answerAt,
-  safeFillL,
-  safeFillMm,
-  type DipTable,
-} from "~/domain/table/answer-at";
-import { liquids } from "~/domain/liquid/liquids";
-import {
-  formatLength,
-  formatLengthWithUnit,
-} from "~/domain/units/format-length";
-import { formatPlusMinus, formatVolume } from "~/domain/units/format-volume";
-import type { LengthUnit } from "~/domain/units/length-unit";
-import { volumeUnitSigns, type VolumeUnit } from "~/domain/units/volume-unit";
-import { parseHeight } from "./parse-typed";
-import { sentenceToRemember } from "./remember";
-import { TypedNumber } from "./TypedNumber";
+import { answerAt, safeFillL, safeFillMm, type DipTable } from '~/domain/table/answer-at';
+import { liquids } from '~/domain/liquid/liquids';
+import { formatLength, formatLengthWithUnit } from '~/domain/units/format-length';
+import { formatPlusMinus, formatVolume } from '~/domain/units/format-volume';
+import type { LengthUnit } from '~/domain/units/length-unit';
+import { volumeUnitSigns, type VolumeUnit } from '~/domain/units/volume-unit';
+import { parseHeight } from './parse-typed';
+import { sentenceToRemember } from './remember';
+import { TypedNumber } from './TypedNumber';
 
 interface AnswerProps {
   table: DipTable;
@@ -26,24 +18,15 @@ interface AnswerProps {
 }
 
 /** What the reading says, biggest on the page; and the sentence that stays in the head. */
-export function Answer({
-  table,
-  depthMm,
-  onDepth,
-  stands,
-  length,
-  volume,
-}: AnswerProps) {
+export function Answer({ table, depthMm, onDepth, stands, length, volume }: AnswerProps) {
   const answer = answerAt(table, depthMm);
-  const waste = liquids[table.settings.liquid].watch === "high";
+  const waste = liquids[table.settings.liquid].watch === 'high';
   const sign = volumeUnitSigns[volume];
-  const written = (litres: number) =>
-    formatVolume(litres, volume, answer.plusMinusL);
+  const written = (litres: number) => formatVolume(litres, volume, answer.plusMinusL);
   const top = safeFillMm(table);
   const parse = (text: string) => {
     const parsed = parseHeight(length)(text);
-    if ("refused" in parsed || parsed.value <= table.heightMm + 1e-6)
-      return parsed;
+    if ('refused' in parsed || parsed.value <= table.heightMm + 1e-6) return parsed;
     return {
       refused: `The stick ends at ${formatLengthWithUnit(table.heightMm, length)}: give less.`,
     };
@@ -59,7 +42,7 @@ export function Answer({
           label="depth on the stick"
           value={depthMm}
           unit={length}
-          step={length === "in" ? 25.4 / 8 : 1}
+          step={length === 'in' ? 25.4 / 8 : 1}
           parse={parse}
           format={(mm) => formatLength(mm, length)}
           onValue={(mm) => onDepth(Math.min(mm, table.heightMm))}
@@ -67,26 +50,21 @@ export function Answer({
       </div>
       <div aria-live="polite" aria-atomic="true">
         <p className="label">computed, {stands}</p>
-        <p
-          className="whitespace-nowrap font-semibold text-answer"
-          data-testid="answer"
-        >
+        <p className="whitespace-nowrap font-semibold text-answer" data-testid="answer">
           {written(waste ? answer.roomL : answer.usableL)} {sign}
         </p>
         <p className="text-lead">
-          {waste ? "room left" : "usable"}, ±{" "}
-          {formatPlusMinus(answer.plusMinusL, volume)}
+          {waste ? 'room left' : 'usable'}, ± {formatPlusMinus(answer.plusMinusL, volume)}
         </p>
         <p className="text-lead">
           {waste
             ? `${written(answer.volumeL)} ${sign} in the tank`
-            : `${written(answer.roomL)} ${sign} room`}{" "}
+            : `${written(answer.roomL)} ${sign} room`}{' '}
           · {Math.round(answer.massKg)} kg
         </p>
         {answer.aboveSafeFillL > 0 && (
           <p className="fault mt-1">
-            Above safe fill,{" "}
-            {formatVolume(safeFillL(table), volume, answer.plusMinusL)} {sign}
+            Above safe fill, {formatVolume(safeFillL(table), volume, answer.plusMinusL)} {sign}
             {top !== null && ` at ${formatLengthWithUnit(top, length)}`}.
           </p>
         )}

@@ -1,25 +1,25 @@
-import { useEffect, useMemo, useReducer, useState } from "react";
-import { may } from "~/domain/access/permissions";
-import type { Role } from "~/domain/access/roles";
-import { safeFillMm } from "~/domain/table/answer-at";
-import { levelOfReading } from "~/domain/table/level";
-import type { TankDocument } from "~/domain/tank/document";
-import type { Tank } from "~/domain/tank/tank";
-import { formatLengthWithUnit } from "~/domain/units/format-length";
-import { newScene, sceneReducer } from "~/scene/scene";
-import { Query } from "../shared/query";
-import { useUnitsPreference } from "../shared/units-preference";
-import { FineTable } from "../table/FineTable";
-import { Conflict } from "./Conflict";
-import { Drawing } from "./Drawing";
-import { IssuePanel } from "./IssuePanel";
-import { liveTable } from "./live-table";
-import { PartsList } from "./PartsList";
-import { TitleBlock } from "./TitleBlock";
-import { TopLine } from "./TopLine";
-import { useDraftSaving } from "./use-draft-saving";
-import { usePreview } from "./use-preview";
-import { useSettings } from "./use-settings";
+import { useEffect, useMemo, useReducer, useState } from 'react';
+import { may } from '~/domain/access/permissions';
+import type { Role } from '~/domain/access/roles';
+import { safeFillMm } from '~/domain/table/answer-at';
+import { levelOfReading } from '~/domain/table/level';
+import type { TankDocument } from '~/domain/tank/document';
+import type { Tank } from '~/domain/tank/tank';
+import { formatLengthWithUnit } from '~/domain/units/format-length';
+import { newScene, sceneReducer } from '~/scene/scene';
+import { Query } from '../shared/query';
+import { useUnitsPreference } from '../shared/units-preference';
+import { FineTable } from '../table/FineTable';
+import { Conflict } from './Conflict';
+import { Drawing } from './Drawing';
+import { IssuePanel } from './IssuePanel';
+import { liveTable } from './live-table';
+import { PartsList } from './PartsList';
+import { TitleBlock } from './TitleBlock';
+import { TopLine } from './TopLine';
+import { useDraftSaving } from './use-draft-saving';
+import { usePreview } from './use-preview';
+import { useSettings } from './use-settings';
 
 export interface BenchProps {
   tank: Tank;
@@ -43,32 +43,24 @@ function BenchSheet({ tank, design, etag, role, person }: BenchProps) {
   const [scene, dispatch] = useReducer(sceneReducer, design, newScene);
   const document = scene.history.present;
   const [units] = useUnitsPreference(person);
-  const { preview, problem } = usePreview(document);
   const { settings, change, faults, unsaved } = useSettings(tank);
-  const { saving, save, takeTheirs, keepMine } = useDraftSaving(
-    tank.id,
-    document,
-    etag,
-  );
+  const { preview, plusMinusL, problem } = usePreview(document, settings);
+  const { saving, save, takeTheirs, keepMine } = useDraftSaving(tank.id, document, etag);
   const [depthMm, setDepthMm] = useState<number | null>(null);
   const [issuing, setIssuing] = useState(false);
-  const [issued, setIssued] = useState<string | null>(
-    tank.revision?.letter ?? null,
-  );
+  const [issued, setIssued] = useState<string | null>(tank.revision?.letter ?? null);
   const [fresh, setFresh] = useState<string | null>(null);
   useUndoKeys(dispatch);
 
   const table = useMemo(
-    () => (preview ? liveTable(preview, settings, null) : null),
-    [preview, settings],
+    () => (preview && plusMinusL ? liveTable(preview, plusMinusL, settings) : null),
+    [preview, plusMinusL, settings],
   );
   const depth = table
     ? Math.min(depthMm ?? Math.round(table.heightMm / 2), table.heightMm)
     : (depthMm ?? 0);
-  const next = issued ? nextLetter(issued) : "A";
-  const revisionWords = issued
-    ? `draft after ${issued}`
-    : "draft, nothing issued";
+  const next = issued ? nextLetter(issued) : 'A';
+  const revisionWords = issued ? `draft after ${issued}` : 'draft, nothing issued';
   const stands = standsWords(document);
   const levels = useMemo(() => {
     if (!preview || !table) return { unusable: null, safeFill: null };
@@ -77,20 +69,15 @@ function BenchSheet({ tank, design, etag, role, person }: BenchProps) {
       unusable:
         settings.outletMm === null
           ? null
-          : levelOfReading(
-              preview.frame,
-              Math.min(settings.outletMm, table.heightMm),
-            ),
+          : levelOfReading(preview.frame, Math.min(settings.outletMm, table.heightMm)),
       safeFill:
-        safe === null || safe >= table.heightMm
-          ? null
-          : levelOfReading(preview.frame, safe),
+        safe === null || safe >= table.heightMm ? null : levelOfReading(preview.frame, safe),
     };
   }, [preview, table, settings.outletMm]);
 
   const startIssue = async () => {
     setFresh(null);
-    if (saving.state !== "saved") await save();
+    if (saving.state !== 'saved') await save();
     setIssuing(true);
   };
 
@@ -108,30 +95,26 @@ function BenchSheet({ tank, design, etag, role, person }: BenchProps) {
             Print
           </a>
         )}
-        {may(role, "revision.issue") && (
+        {may(role, 'revision.issue') && (
           <button
             type="button"
             className="act"
-            disabled={
-              saving.state === "conflict" ||
-              problem !== null ||
-              preview === null
-            }
+            disabled={saving.state === 'conflict' || problem !== null || preview === null}
             onClick={() => void startIssue()}
           >
             Issue {next}
           </button>
         )}
       </TopLine>
-      {saving.state === "conflict" && (
+      {saving.state === 'conflict' && (
         <Conflict
           conflict={saving}
           mine={document}
           onTakeTheirs={() => {
             takeTheirs(saving.theirs, saving.theirEtag);
             dispatch({
-              type: "replace",
-              name: "take theirs",
+              type: 'replace',
+              name: 'take theirs',
               document: saving.theirs,
             });
           }}
@@ -151,33 +134,20 @@ function BenchSheet({ tank, design, etag, role, person }: BenchProps) {
         />
       )}
       {fresh && (
-        <p
-          role="status"
-          className="border-b border-hair bg-sheet px-4 py-3 sm:px-6"
-        >
-          Revision {fresh} is issued.{" "}
-          <a
-            className="act-text font-semibold"
-            href={`/tanks/${tank.id}#paper`}
-          >
+        <p role="status" className="border-b border-hair bg-sheet px-4 py-3 sm:px-6">
+          Revision {fresh} is issued.{' '}
+          <a className="act-text font-semibold" href={`/tanks/${tank.id}#paper`}>
             Print its chart
           </a>
         </p>
       )}
       {problem && (
-        <p
-          role="alert"
-          className="fault border-b border-hair px-4 py-3 sm:px-6"
-        >
+        <p role="alert" className="fault border-b border-hair px-4 py-3 sm:px-6">
           {problem.message}
         </p>
       )}
       {preview?.notices.map((notice) => (
-        <p
-          key={notice}
-          role="status"
-          className="fault border-b border-hair px-4 py-2 sm:px-6"
-        >
+        <p key={notice} role="status" className="fault border-b border-hair px-4 py-2 sm:px-6">
           {notice}
         </p>
       ))}
@@ -188,7 +158,7 @@ function BenchSheet({ tank, design, etag, role, person }: BenchProps) {
         onDepth={setDepthMm}
         levels={levels}
         selected={scene.selected}
-        onSelect={(id) => dispatch({ type: "select", id })}
+        onSelect={(id) => dispatch({ type: 'select', id })}
         stands={stands}
         length={units.length}
         volume={units.volume}
@@ -218,9 +188,7 @@ function BenchSheet({ tank, design, etag, role, person }: BenchProps) {
           revisionWords={revisionWords}
         />
       </div>
-      {table && (
-        <FineTable table={table} length={units.length} volume={units.volume} />
-      )}
+      {table && <FineTable table={table} length={units.length} volume={units.volume} />}
       <p className="sr-only" role="status">
         {table &&
           `Brim ${formatBrim(table.capacityL)}. Wet line at ${formatLengthWithUnit(depth, units.length)}.`}
@@ -229,9 +197,7 @@ function BenchSheet({ tank, design, etag, role, person }: BenchProps) {
   );
 }
 
-function useUndoKeys(
-  dispatch: (action: { type: "undo" } | { type: "redo" }) => void,
-) {
+function useUndoKeys(dispatch: (action: { type: 'undo' } | { type: 'redo' }) => void) {
   useEffect(() => {
     const press = (event: KeyboardEvent) => {
       if (!(event.ctrlKey || event.metaKey) || event.altKey) return;
@@ -241,26 +207,18 @@ function useUndoKeys(
         event.target.value !== event.target.defaultValue;
       if (field) return;
       const key = event.key.toLowerCase();
-      const type =
-        key === "z"
-          ? event.shiftKey
-            ? "redo"
-            : "undo"
-          : key === "y"
-            ? "redo"
-            : null;
+      const type = key === 'z' ? (event.shiftKey ? 'redo' : 'undo') : key === 'y' ? 'redo' : null;
       if (!type) return;
       event.preventDefault();
       dispatch({ type });
     };
-    window.addEventListener("keydown", press);
-    return () => window.removeEventListener("keydown", press);
+    window.addEventListener('keydown', press);
+    return () => window.removeEventListener('keydown', press);
   }, [dispatch]);
 }
 
 function standsWords({ attitude }: TankDocument): string {
-  if (!attitude || (attitude.pitch === 0 && attitude.roll === 0))
-    return "level";
+  if (!attitude || (attitude.pitch === 0 && attitude.roll === 0)) return 'level';
   return `pitch ${attitude.pitch}°, roll ${attitude.roll}°`;
 }
 
@@ -270,10 +228,9 @@ function formatBrim(litres: number): string {
 
 /** A, B, … Z, AA, AB … */
 export function nextLetter(letter: string): string {
-  const value =
-    [...letter].reduce((sum, one) => sum * 26 + one.charCodeAt(0) - 64, 0) + 1;
+  const value = [...letter].reduce((sum, one) => sum * 26 + one.charCodeAt(0) - 64, 0) + 1;
   let rest = value;
-  let text = "";
+  let text = '';
   while (rest > 0) {
     text = String.fromCharCode(65 + ((rest - 1) % 26)) + text;
     rest = Math.floor((rest - 1) / 26);

@@ -1,22 +1,19 @@
-import { useState } from "react";
-import type { DipTable } from "~/domain/table/answer-at";
-import { answerAt, safeFillMm } from "~/domain/table/answer-at";
-import { levelOfReading } from "~/domain/table/level";
-import type { Preview } from "~/domain/table/preview";
-import {
-  formatLength,
-  formatLengthWithUnit,
-} from "~/domain/units/format-length";
-import { formatVolume } from "~/domain/units/format-volume";
-import type { LengthUnit } from "~/domain/units/length-unit";
-import { volumeUnitWords, type VolumeUnit } from "~/domain/units/volume-unit";
-import type { View } from "~/viewport/projection";
-import { lengthScales, volumeScales } from "../stick/scales";
-import { Stick, stickMarginPx } from "../stick/Stick";
-import { StickTable } from "../table/StickTable";
-import { Answer } from "./Answer";
-import { Picture } from "./picture/Picture";
-import { usePlate } from "./use-plate";
+import { useState } from 'react';
+import type { DipTable } from '~/domain/table/answer-at';
+import { answerAt, safeFillMm } from '~/domain/table/answer-at';
+import { levelOfReading } from '~/domain/table/level';
+import type { Preview } from '~/domain/table/preview';
+import { formatLength, formatLengthWithUnit } from '~/domain/units/format-length';
+import { formatVolume } from '~/domain/units/format-volume';
+import type { LengthUnit } from '~/domain/units/length-unit';
+import { volumeUnitWords, type VolumeUnit } from '~/domain/units/volume-unit';
+import type { View } from '~/viewport/projection';
+import { lengthScales, volumeScales } from '../stick/scales';
+import { Stick, stickMarginPx } from '../stick/Stick';
+import { StickTable } from '../table/StickTable';
+import { Answer } from './Answer';
+import { Picture } from './picture/Picture';
+import { usePlate } from './use-plate';
 
 interface DrawingProps {
   preview: Preview | null;
@@ -32,33 +29,30 @@ interface DrawingProps {
   name: string;
 }
 
-const views: { name: "end" | "side" | "plan" | "away"; label: string }[] = [
-  { name: "end", label: "End" },
-  { name: "side", label: "Side" },
-  { name: "plan", label: "Plan" },
-  { name: "away", label: "Drawn away" },
+const views: { name: 'end' | 'side' | 'plan' | 'away'; label: string }[] = [
+  { name: 'end', label: 'End' },
+  { name: 'side', label: 'Side' },
+  { name: 'plan', label: 'Plan' },
+  { name: 'away', label: 'Drawn away' },
 ];
 
 /** Picture, stick and table at one scale, crossed by one wet line; the answer to their right. */
 export function Drawing(props: DrawingProps) {
   const { preview, table, depthMm, onDepth, length, volume } = props;
-  const [view, setView] = useState<View>({ name: "away" });
+  const [view, setView] = useState<View>({ name: 'away' });
   const { frame, plate } = usePlate();
   const ready = preview && table && plate;
   const yOf = (mm: number) =>
     ready ? plate.railTop + plate.railPx * (1 - mm / table.heightMm) : 0;
   const wetY = yOf(depthMm);
-  const upright =
-    view.name === "end" || view.name === "side" || view.name === "away";
+  const upright = view.name === 'end' || view.name === 'side' || view.name === 'away';
   const spoken = table
     ? `${formatLengthWithUnit(depthMm, length)}, ${spokenVolume(table, depthMm, volume)}`
-    : "";
+    : '';
   const fromY = (y: number) => {
     if (!ready) return;
     const share = 1 - (y - plate.railTop) / plate.railPx;
-    onDepth(
-      Math.min(table.heightMm, Math.max(0, Math.round(share * table.heightMm))),
-    );
+    onDepth(Math.min(table.heightMm, Math.max(0, Math.round(share * table.heightMm))));
   };
 
   return (
@@ -93,11 +87,7 @@ export function Drawing(props: DrawingProps) {
             </p>
           )}
           {ready && (
-            <WetLine
-              y={wetY}
-              text={formatLengthWithUnit(depthMm, length)}
-              across={upright}
-            />
+            <WetLine y={wetY} text={formatLengthWithUnit(depthMm, length)} across={upright} />
           )}
         </div>
         {ready && (
@@ -112,7 +102,7 @@ export function Drawing(props: DrawingProps) {
               length={lengthScales[length]}
               volume={volumeScales[volume]}
               railPx={plate.railPx}
-              keyStepMm={length === "in" ? 25.4 / 8 : 1}
+              keyStepMm={length === 'in' ? 25.4 / 8 : 1}
               spoken={spoken}
             />
           </div>
@@ -121,7 +111,7 @@ export function Drawing(props: DrawingProps) {
           <div className="relative hidden pl-3 lg:block">
             <div
               aria-hidden="true"
-              className="pointer-events-none absolute right-0 left-0 z-10 h-0.5 -translate-y-1/2 bg-datum"
+              className="pointer-events-none absolute right-0 -left-3 z-10 h-0.5 -translate-y-1/2 bg-datum"
               style={{ top: wetY }}
             />
             <StickTable
@@ -152,19 +142,9 @@ export function Drawing(props: DrawingProps) {
   );
 }
 
-function ViewChoice({
-  view,
-  onView,
-}: {
-  view: View;
-  onView(view: View): void;
-}) {
+function ViewChoice({ view, onView }: { view: View; onView(view: View): void }) {
   return (
-    <div
-      role="group"
-      aria-label="View"
-      className="flex flex-wrap items-center gap-x-2"
-    >
+    <div role="group" aria-label="View" className="flex flex-wrap items-center gap-x-2">
       {views.map(({ name, label }, index) => {
         const chosen = view.name === name;
         return (
@@ -177,7 +157,7 @@ function ViewChoice({
             <button
               type="button"
               aria-pressed={chosen}
-              className={`min-h-6 px-0.5 ${chosen ? "font-bold" : ""}`}
+              className={`min-h-6 px-0.5 ${chosen ? 'font-bold' : ''}`}
               onClick={() => onView({ name })}
             >
               {label}
@@ -185,55 +165,41 @@ function ViewChoice({
           </span>
         );
       })}
-      {view.name === "free" && <span className="label">· turned freely</span>}
+      {view.name === 'free' && <span className="label">· turned freely</span>}
     </div>
   );
 }
 
 /** The wet line over the picture, with the reading on its flag beside the stick. */
-function WetLine({
-  y,
-  text,
-  across,
-}: {
-  y: number;
-  text: string;
-  across: boolean;
-}) {
+function WetLine({ y, text, across }: { y: number; text: string; across: boolean }) {
   return (
     <div
       aria-hidden="true"
       className="pointer-events-none absolute right-0 left-0 z-10 flex -translate-y-1/2 items-center"
       style={{ top: y }}
     >
-      <span className={`h-0.5 flex-1 ${across ? "bg-datum" : ""}`} />
-      <span className="flag bg-datum py-0.5 pr-4 pl-2 text-base font-bold text-sheet">
-        {text}
-      </span>
+      <span className={`h-0.5 flex-1 ${across ? 'bg-datum' : ''}`} />
+      <span className="flag bg-datum py-0.5 pr-4 pl-2 text-base font-bold text-sheet">{text}</span>
     </div>
   );
 }
 
 function viewWords(view: View): string {
   switch (view.name) {
-    case "end":
-      return "End view";
-    case "side":
-      return "Side view";
-    case "plan":
-      return "Plan";
-    case "away":
-      return "Drawn away view";
-    case "free":
-      return "View turned freely";
+    case 'end':
+      return 'End view';
+    case 'side':
+      return 'Side view';
+    case 'plan':
+      return 'Plan';
+    case 'away':
+      return 'Drawn away view';
+    case 'free':
+      return 'View turned freely';
   }
 }
 
-function spokenVolume(
-  table: DipTable,
-  depthMm: number,
-  volume: VolumeUnit,
-): string {
+function spokenVolume(table: DipTable, depthMm: number, volume: VolumeUnit): string {
   const answer = answerAt(table, depthMm);
   return `${formatVolume(answer.volumeL, volume, answer.plusMinusL)} ${volumeUnitWords[volume]}`;
 }

@@ -1,11 +1,11 @@
-import { zodResolver } from "@hookform/resolvers/zod";
-import { useMutation } from "@tanstack/react-query";
-import { useEffect, useRef } from "react";
-import { useForm } from "react-hook-form";
-import type { z } from "zod/v4";
-import { newRevision, type NewRevision } from "~/domain/tank/tank";
-import { issueRevision } from "../shared/api";
-import { asProblem } from "../shared/problem";
+import { zodResolver } from '@hookform/resolvers/zod';
+import { useMutation } from '@tanstack/react-query';
+import { useEffect, useRef } from 'react';
+import { useForm } from 'react-hook-form';
+import type { z } from 'zod/v4';
+import { newRevision, type NewRevision } from '~/domain/tank/tank';
+import { issueRevision } from '../shared/api';
+import { asProblem } from '../shared/problem';
 
 interface IssuePanelProps {
   tankId: string;
@@ -15,17 +15,12 @@ interface IssuePanelProps {
 }
 
 /** Issues the draft as the next revision: asks for the step and a note, tells reasons against it. */
-export function IssuePanel({
-  tankId,
-  letter,
-  onIssued,
-  onClose,
-}: IssuePanelProps) {
+export function IssuePanel({ tankId, letter, onIssued, onClose }: IssuePanelProps) {
   const heading = useRef<HTMLHeadingElement>(null);
   useEffect(() => heading.current?.focus(), []);
   const form = useForm<z.input<typeof newRevision>, unknown, NewRevision>({
     resolver: zodResolver(newRevision),
-    defaultValues: { stepMm: 5, note: "" },
+    defaultValues: { stepMm: 5, note: '' },
   });
   const issue = useMutation({
     mutationFn: (body: NewRevision) => issueRevision(tankId, body),
@@ -38,24 +33,18 @@ export function IssuePanel({
   const { errors } = form.formState;
 
   return (
-    <section
-      className="border-b border-ink bg-sheet px-4 py-4 sm:px-6"
-      aria-labelledby="issue"
-    >
+    <section className="border-b border-ink bg-sheet px-4 py-4 sm:px-6" aria-labelledby="issue">
       <h2 id="issue" ref={heading} tabIndex={-1} className="outline-none">
         Issue revision {letter}
       </h2>
       <p className="max-w-2xl">
-        The shape, its settings and the whole table are frozen and kept. An
-        issued revision is never changed or deleted; a later one takes its
-        place.
+        The shape, its settings and the whole table are frozen and kept. An issued revision is never
+        changed or deleted; a later one takes its place.
       </p>
       <form
         className="mt-3 flex flex-wrap items-start gap-x-6 gap-y-3"
         noValidate
-        onSubmit={(event) =>
-          void form.handleSubmit((body) => issue.mutate(body))(event)
-        }
+        onSubmit={(event) => void form.handleSubmit((body) => issue.mutate(body))(event)}
       >
         <label className="label w-40">
           step of the table, mm
@@ -63,8 +52,8 @@ export function IssuePanel({
             className="typed text-base text-ink"
             inputMode="decimal"
             aria-invalid={errors.stepMm !== undefined}
-            aria-describedby={errors.stepMm ? "step-fault" : undefined}
-            {...form.register("stepMm", { valueAsNumber: true })}
+            aria-describedby={errors.stepMm ? 'step-fault' : undefined}
+            {...form.register('stepMm', { valueAsNumber: true })}
           />
           {errors.stepMm && (
             <span id="step-fault" className="fault block">
@@ -77,15 +66,13 @@ export function IssuePanel({
           <input
             className="typed text-base text-ink"
             aria-invalid={errors.note !== undefined}
-            {...form.register("note")}
+            {...form.register('note')}
           />
-          {errors.note && (
-            <span className="fault block">{errors.note.message}</span>
-          )}
+          {errors.note && <span className="fault block">{errors.note.message}</span>}
         </label>
         <div className="flex gap-3 self-end">
           <button type="submit" className="act" disabled={issue.isPending}>
-            {issue.isPending ? "Computing the table …" : `Issue ${letter}`}
+            {issue.isPending ? 'Computing the table …' : `Issue ${letter}`}
           </button>
           <button type="button" className="act-plain" onClick={onClose}>
             Not now

@@ -1,12 +1,12 @@
-import type { Dispatch } from "react";
-import type { FieldFault } from "~/domain/errors";
-import type { TankDocument } from "~/domain/tank/document";
-import { kindOf, kinds, type Solid } from "~/domain/tank/kinds/registry";
-import { formatLength } from "~/domain/units/format-length";
-import type { LengthUnit } from "~/domain/units/length-unit";
-import { addSolid, copySolid, freeId, removeSolid } from "~/scene/commands";
-import type { SceneAction } from "~/scene/scene";
-import { SolidFields } from "./SolidFields";
+import type { Dispatch } from 'react';
+import type { FieldFault } from '~/domain/errors';
+import type { TankDocument } from '~/domain/tank/document';
+import { kindOf, kinds, type Solid } from '~/domain/tank/kinds/registry';
+import { formatLength } from '~/domain/units/format-length';
+import type { LengthUnit } from '~/domain/units/length-unit';
+import { addSolid, copySolid, freeId, removeSolid } from '~/scene/commands';
+import type { SceneAction } from '~/scene/scene';
+import { SolidFields } from './SolidFields';
 
 interface PartsListProps {
   document: TankDocument;
@@ -17,13 +17,7 @@ interface PartsListProps {
 }
 
 /** The parts list: every solid a row; the chosen one opens to be typed in. */
-export function PartsList({
-  document,
-  selected,
-  dispatch,
-  unit,
-  faults,
-}: PartsListProps) {
+export function PartsList({ document, selected, dispatch, unit, faults }: PartsListProps) {
   return (
     <section aria-labelledby="parts">
       <h2 id="parts" className="sr-only">
@@ -93,11 +87,11 @@ function Rows(props: {
   const sizes = kind
     .sizes(solid)
     .map((size) => formatLength(readPath(solid, size.path), unit))
-    .join(" × ");
-  const choose = () => dispatch({ type: "select", id: open ? null : solid.id });
+    .join(' × ');
+  const choose = () => dispatch({ type: 'select', id: open ? null : solid.id });
   return (
     <>
-      <tr className={open ? "bg-wash" : undefined}>
+      <tr className={open ? 'bg-wash' : undefined}>
         <td>
           <span
             aria-hidden="true"
@@ -116,19 +110,15 @@ function Rows(props: {
           >
             {solid.id}
           </button>
-          {faults.length > 0 && !open && (
-            <span className="fault ml-2">see here</span>
-          )}
+          {faults.length > 0 && !open && <span className="fault ml-2">see here</span>}
         </td>
         <td>{solid.role}</td>
         <td>{kind.label}</td>
         <td className="figure whitespace-nowrap">{sizes}</td>
         <td className="figure whitespace-nowrap">
-          {at.map((value) => formatLength(value, unit)).join(", ")}
+          {at.map((value) => formatLength(value, unit)).join(', ')}
         </td>
-        <td className="figure whitespace-nowrap">
-          {turn.map((value) => `${value}°`).join(", ")}
-        </td>
+        <td className="figure whitespace-nowrap">{turn.map((value) => `${value}°`).join(', ')}</td>
       </tr>
       {open && (
         <tr>
@@ -154,7 +144,7 @@ function Rows(props: {
                 disabled={document.solids.length === 1}
                 onClick={() =>
                   dispatch({
-                    type: "edit",
+                    type: 'edit',
                     name: `remove ${solid.id}`,
                     edit: (now) => removeSolid(now, solid.id),
                   })
@@ -163,9 +153,7 @@ function Rows(props: {
                 Remove {solid.id}
               </button>
               {document.solids.length === 1 && (
-                <span className="label">
-                  The last solid stays: a tank needs one.
-                </span>
+                <span className="label">The last solid stays: a tank needs one.</span>
               )}
             </p>
           </td>
@@ -182,22 +170,18 @@ function add(
 ) {
   const id = freeId(document, kind.label);
   dispatch({
-    type: "edit",
+    type: 'edit',
     name: `add ${id}`,
     select: id,
     edit: (now) => addSolid(now, kind.blank(id)),
   });
 }
 
-function copy(
-  document: TankDocument,
-  dispatch: Dispatch<SceneAction>,
-  solid: Solid,
-) {
+function copy(document: TankDocument, dispatch: Dispatch<SceneAction>, solid: Solid) {
   const id = freeId(document, solid.id);
   const shift = kindOf(solid).extent(solid)[0];
   dispatch({
-    type: "edit",
+    type: 'edit',
     name: `copy ${solid.id}`,
     select: id,
     edit: (now) => copySolid(now, solid.id, shift),
@@ -207,9 +191,7 @@ function copy(
 function faultsOf(faults: readonly FieldFault[], index: number): FieldFault[] {
   const start = `/solids/${index}`;
   return faults
-    .filter(
-      ({ pointer }) => pointer === start || pointer.startsWith(`${start}/`),
-    )
+    .filter(({ pointer }) => pointer === start || pointer.startsWith(`${start}/`))
     .map(({ pointer, detail }) => ({
       pointer: pointer.slice(start.length),
       detail,
@@ -221,5 +203,5 @@ export function readPath(value: unknown, path: readonly string[]): number {
     (at, key) => (at as Record<string, unknown> | undefined)?.[key],
     value,
   );
-  return typeof leaf === "number" ? leaf : 0;
+  return typeof leaf === 'number' ? leaf : 0;
 }

@@ -1,21 +1,14 @@
-import { useId, useState, type Dispatch } from "react";
-import type { FieldFault } from "~/domain/errors";
-import type { TankDocument } from "~/domain/tank/document";
-import { kindOf, type Solid } from "~/domain/tank/kinds/registry";
-import { formatLength } from "~/domain/units/format-length";
-import type { LengthUnit } from "~/domain/units/length-unit";
-import {
-  changeSolid,
-  renameSolid,
-  setPlace,
-  setRole,
-  setSize,
-  setTurn,
-} from "~/scene/commands";
-import type { SceneAction } from "~/scene/scene";
-import { parseBetween, parsePlace, parseSize } from "./parse-typed";
-import { readPath } from "./PartsList";
-import { TypedNumber } from "./TypedNumber";
+import { useId, useState, type Dispatch } from 'react';
+import type { FieldFault } from '~/domain/errors';
+import type { TankDocument } from '~/domain/tank/document';
+import { kindOf, type Solid } from '~/domain/tank/kinds/registry';
+import { formatLength } from '~/domain/units/format-length';
+import type { LengthUnit } from '~/domain/units/length-unit';
+import { changeSolid, renameSolid, setPlace, setRole, setSize, setTurn } from '~/scene/commands';
+import type { SceneAction } from '~/scene/scene';
+import { parseBetween, parsePlace, parseSize } from './parse-typed';
+import { readPath } from './PartsList';
+import { TypedNumber } from './TypedNumber';
 
 interface SolidFieldsProps {
   solid: Solid;
@@ -26,24 +19,17 @@ interface SolidFieldsProps {
   faults: readonly FieldFault[];
 }
 
-const axes = ["x", "y", "z"] as const;
+const axes = ['x', 'y', 'z'] as const;
 
 /** Everything of one solid, typed: name, what it does, sizes, place and turn. */
-export function SolidFields({
-  solid,
-  document,
-  dispatch,
-  unit,
-  faults,
-}: SolidFieldsProps) {
+export function SolidFields({ solid, document, dispatch, unit, faults }: SolidFieldsProps) {
   const kind = kindOf(solid);
   const format = (mm: number) => formatLength(mm, unit);
-  const step = unit === "in" ? 25.4 / 8 : unit === "cm" ? 10 : 1;
-  const faultAt = (pointer: string) =>
-    faults.find((fault) => fault.pointer === pointer)?.detail;
-  const whole = faults.filter(({ pointer }) => pointer === "");
+  const step = unit === 'in' ? 25.4 / 8 : unit === 'cm' ? 10 : 1;
+  const faultAt = (pointer: string) => faults.find((fault) => fault.pointer === pointer)?.detail;
+  const whole = faults.filter(({ pointer }) => pointer === '');
   const edit = (name: string, change: (now: TankDocument) => TankDocument) =>
-    dispatch({ type: "edit", name, edit: change });
+    dispatch({ type: 'edit', name, edit: change });
 
   return (
     <div className="flex flex-wrap items-start gap-x-7 gap-y-3 pt-1">
@@ -51,20 +37,14 @@ export function SolidFields({
         <NameField solid={solid} document={document} dispatch={dispatch} />
         <RoleField
           solid={solid}
-          onRole={(role) =>
-            edit(`${solid.id} ${role}`, (now) => setRole(now, solid.id, role))
-          }
+          onRole={(role) => edit(`${solid.id} ${role}`, (now) => setRole(now, solid.id, role))}
         />
-        {"axis" in solid || solid.kind === "cylinder" ? (
+        {'axis' in solid || solid.kind === 'cylinder' ? (
           <AxisField
-            solid={solid as Solid & { axis?: "x" | "y" | "z" }}
+            solid={solid as Solid & { axis?: 'x' | 'y' | 'z' }}
             onAxis={(axis) =>
               edit(`axis of ${solid.id}`, (now) =>
-                changeSolid(
-                  now,
-                  solid.id,
-                  (one) => ({ ...one, axis }) as Solid,
-                ),
+                changeSolid(now, solid.id, (one) => ({ ...one, axis }) as Solid),
               )
             }
           />
@@ -74,13 +54,13 @@ export function SolidFields({
         <legend className="sr-only">Sizes of {solid.id}</legend>
         {kind.sizes(solid).map((size) => (
           <TypedNumber
-            key={size.path.join(".")}
+            key={size.path.join('.')}
             label={size.label}
             value={readPath(solid, size.path)}
             parse={parseSize(unit)}
             format={format}
             step={step}
-            fault={faultAt(`/${size.path.join("/")}`)}
+            fault={faultAt(`/${size.path.join('/')}`)}
             onValue={(value) =>
               edit(`${size.label} of ${solid.id}`, (now) =>
                 setSize(now, solid.id, size.path, value),
@@ -90,13 +70,11 @@ export function SolidFields({
         ))}
       </fieldset>
       <fieldset className="flex items-start gap-x-3">
-        <legend className="sr-only">
-          Place of {solid.id}: its lowest corner before turning
-        </legend>
+        <legend className="sr-only">Place of {solid.id}: its lowest corner before turning</legend>
         {axes.map((axis, index) => (
           <TypedNumber
             key={axis}
-            label={index === 0 ? "at x" : axis}
+            label={index === 0 ? 'at x' : axis}
             value={solid.at?.[index] ?? 0}
             parse={parsePlace(unit)}
             format={format}
@@ -111,15 +89,13 @@ export function SolidFields({
         ))}
       </fieldset>
       <fieldset className="flex items-start gap-x-3">
-        <legend className="sr-only">
-          Turn of {solid.id} about its middle, degrees
-        </legend>
+        <legend className="sr-only">Turn of {solid.id} about its middle, degrees</legend>
         {axes.map((axis, index) => (
           <TypedNumber
             key={axis}
-            label={index === 0 ? "turned about x" : axis}
+            label={index === 0 ? 'turned about x' : axis}
             value={solid.turn?.[index] ?? 0}
-            parse={parseBetween(-360, 360, "An angle lies within ± 360°.")}
+            parse={parseBetween(-360, 360, 'An angle lies within ± 360°.')}
             format={(value) => String(value)}
             unit="°"
             fault={faultAt(`/turn/${index}`)}
@@ -140,26 +116,23 @@ export function SolidFields({
   );
 }
 
-function NameField(
-  props: Pick<SolidFieldsProps, "solid" | "document" | "dispatch">,
-) {
+function NameField(props: Pick<SolidFieldsProps, 'solid' | 'document' | 'dispatch'>) {
   const { solid, document, dispatch } = props;
   const id = useId();
   const [draft, setDraft] = useState<string | null>(null);
   const wanted = draft?.trim() ?? solid.id;
-  const renamed =
-    wanted === "" ? null : renameSolid(document, solid.id, wanted);
+  const renamed = wanted === '' ? null : renameSolid(document, solid.id, wanted);
   const fault =
-    wanted === ""
-      ? "Give the solid a name."
+    wanted === ''
+      ? 'Give the solid a name.'
       : renamed === null
-        ? "Another solid has this name: each is given once."
+        ? 'Another solid has this name: each is given once.'
         : null;
   const take = () => {
     if (draft === null || fault !== null) return;
     if (wanted !== solid.id) {
       dispatch({
-        type: "edit",
+        type: 'edit',
         name: `name of ${solid.id}`,
         select: wanted,
         edit: (now) => renameSolid(now, solid.id, wanted) ?? now,
@@ -169,7 +142,7 @@ function NameField(
   };
   return (
     <div className="w-32">
-      <label htmlFor={id} className="label">
+      <label htmlFor={id} className="label block whitespace-nowrap">
         name
       </label>
       <input
@@ -182,8 +155,8 @@ function NameField(
         onChange={(event) => setDraft(event.target.value)}
         onBlur={take}
         onKeyDown={(event) => {
-          if (event.key === "Enter") take();
-          if (event.key === "Escape") setDraft(null);
+          if (event.key === 'Enter') take();
+          if (event.key === 'Escape') setDraft(null);
         }}
       />
       {fault && (
@@ -195,24 +168,18 @@ function NameField(
   );
 }
 
-function RoleField({
-  solid,
-  onRole,
-}: {
-  solid: Solid;
-  onRole(role: Solid["role"]): void;
-}) {
+function RoleField({ solid, onRole }: { solid: Solid; onRole(role: Solid['role']): void }) {
   const id = useId();
   return (
     <div className="w-28">
-      <label htmlFor={id} className="label">
+      <label htmlFor={id} className="label block whitespace-nowrap">
         does
       </label>
       <select
         id={id}
         className="typed min-h-8 py-0.5"
         value={solid.role}
-        onChange={(event) => onRole(event.target.value as Solid["role"])}
+        onChange={(event) => onRole(event.target.value as Solid['role'])}
       >
         <option value="holds">holds</option>
         <option value="displaces">displaces</option>
@@ -222,22 +189,20 @@ function RoleField({
 }
 
 function AxisField(props: {
-  solid: { axis?: "x" | "y" | "z" };
-  onAxis(axis: "x" | "y" | "z"): void;
+  solid: { axis?: 'x' | 'y' | 'z' };
+  onAxis(axis: 'x' | 'y' | 'z'): void;
 }) {
   const id = useId();
   return (
     <div className="w-30">
-      <label htmlFor={id} className="label">
+      <label htmlFor={id} className="label block whitespace-nowrap">
         axis
       </label>
       <select
         id={id}
         className="typed min-h-8 py-0.5"
-        value={props.solid.axis ?? "x"}
-        onChange={(event) =>
-          props.onAxis(event.target.value as "x" | "y" | "z")
-        }
+        value={props.solid.axis ?? 'x'}
+        onChange={(event) => props.onAxis(event.target.value as 'x' | 'y' | 'z')}
       >
         <option value="x">x, lying along</option>
         <option value="y">y, lying across</option>

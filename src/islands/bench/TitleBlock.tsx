@@ -1,37 +1,18 @@
-import { useId, type Dispatch, type ReactNode } from "react";
-import type { FieldFault } from "~/domain/errors";
-import { liquidCodes, liquids, type LiquidCode } from "~/domain/liquid/liquids";
-import {
-  safeFillL,
-  safeFillMm,
-  unusableL,
-  type DipTable,
-} from "~/domain/table/answer-at";
-import type { TankDocument } from "~/domain/tank/document";
-import {
-  sizePlusMinusByMeans,
-  type TankSettings,
-} from "~/domain/tank/settings";
-import type { TankChange } from "~/domain/tank/tank";
-import {
-  formatLength,
-  formatLengthWithUnit,
-} from "~/domain/units/format-length";
-import {
-  formatVolume,
-  formatVolumeWithPlusMinus,
-} from "~/domain/units/format-volume";
-import type { LengthUnit } from "~/domain/units/length-unit";
-import { volumeUnitSigns, type VolumeUnit } from "~/domain/units/volume-unit";
-import { setAttitude, setStick } from "~/scene/commands";
-import type { SceneAction } from "~/scene/scene";
-import {
-  parseBetween,
-  parseHeight,
-  parsePlace,
-  parseSize,
-} from "./parse-typed";
-import { TypedNumber } from "./TypedNumber";
+import { useId, type Dispatch, type ReactNode } from 'react';
+import type { FieldFault } from '~/domain/errors';
+import { liquidCodes, liquids, type LiquidCode } from '~/domain/liquid/liquids';
+import { safeFillL, safeFillMm, unusableL, type DipTable } from '~/domain/table/answer-at';
+import type { TankDocument } from '~/domain/tank/document';
+import { sizePlusMinusByMeans, type TankSettings } from '~/domain/tank/settings';
+import type { TankChange } from '~/domain/tank/tank';
+import { formatLength, formatLengthWithUnit } from '~/domain/units/format-length';
+import { formatVolume, formatVolumeWithPlusMinus } from '~/domain/units/format-volume';
+import type { LengthUnit } from '~/domain/units/length-unit';
+import { volumeUnitSigns, type VolumeUnit } from '~/domain/units/volume-unit';
+import { setAttitude, setStick } from '~/scene/commands';
+import type { SceneAction } from '~/scene/scene';
+import { parseBetween, parseHeight, parsePlace, parseSize } from './parse-typed';
+import { TypedNumber } from './TypedNumber';
 
 interface TitleBlockProps {
   document: TankDocument;
@@ -50,12 +31,9 @@ interface TitleBlockProps {
 
 /** The title block of the drawing: what belongs to the tank beside its shape, changed in place. */
 export function TitleBlock(props: TitleBlockProps) {
-  const { document, dispatch, settings, onSettings, table, length, volume } =
-    props;
+  const { document, dispatch, settings, onSettings, table, length, volume } = props;
   const format = (mm: number) => formatLength(mm, length);
-  const brimPlusMinus = table
-    ? (table.plusMinusL[table.plusMinusL.length - 1] ?? 0)
-    : 0;
+  const brimPlusMinus = table ? (table.plusMinusL[table.plusMinusL.length - 1] ?? 0) : 0;
   const written = (litres: number) =>
     `${formatVolume(litres, volume, brimPlusMinus)} ${volumeUnitSigns[volume]}`;
   const safeMm = table ? safeFillMm(table) : null;
@@ -64,29 +42,22 @@ export function TitleBlock(props: TitleBlockProps) {
   const shapeFault = (start: string) =>
     props.shapeFaults.find(({ pointer }) => pointer.startsWith(start))?.detail;
   const attitude = document.attitude ?? { pitch: 0, roll: 0 };
-  const tilt = parseBetween(-60, 60, "A slope lies within ± 60°.");
+  const tilt = parseBetween(-60, 60, 'A slope lies within ± 60°.');
 
   return (
-    <section
-      aria-label="Title block"
-      className="grid grid-cols-1 sm:grid-cols-2"
-    >
+    <section aria-label="Title block" className="grid grid-cols-1 sm:grid-cols-2">
       <Cell>
         <LiquidField settings={settings} onSettings={onSettings} />
-        {settings.liquid === "other" && (
+        {settings.liquid === 'other' && (
           <TypedNumber
             wide
             label="density"
             unit="kg/m³"
             value={settings.densityKgPerM3}
-            parse={parseBetween(
-              400,
-              3000,
-              "A density lies between 400 and 3000 kg/m³.",
-            )}
+            parse={parseBetween(400, 3000, 'A density lies between 400 and 3000 kg/m³.')}
             format={String}
             step={10}
-            fault={fault("densityKgPerM3")}
+            fault={fault('densityKgPerM3')}
             onValue={(densityKgPerM3) => onSettings({ densityKgPerM3 })}
           />
         )}
@@ -96,14 +67,14 @@ export function TitleBlock(props: TitleBlockProps) {
           settings={settings}
           onSettings={onSettings}
           length={length}
-          fault={fault("sizePlusMinusMm")}
+          fault={fault('sizePlusMinusMm')}
         />
       </Cell>
       <Cell label="Brim, computed">
         <p className="font-semibold text-lead">
           {table
             ? formatVolumeWithPlusMinus(table.capacityL, volume, brimPlusMinus)
-            : "not computed yet"}
+            : 'not computed yet'}
         </p>
       </Cell>
       <Cell>
@@ -112,20 +83,16 @@ export function TitleBlock(props: TitleBlockProps) {
           label="Safe fill, % of brim"
           unit="%"
           value={settings.safeFillPercent}
-          parse={parseBetween(
-            1,
-            100,
-            "Safe fill lies between 1 and 100 % of brim.",
-          )}
+          parse={parseBetween(1, 100, 'Safe fill lies between 1 and 100 % of brim.')}
           format={String}
-          fault={fault("safeFillPercent")}
+          fault={fault('safeFillPercent')}
           onValue={(safeFillPercent) => onSettings({ safeFillPercent })}
         />
         {table && (
           <p className="font-semibold">
             {written(safeFillL(table))}
             {safeMm !== null &&
-              ` at ${formatLengthWithUnit(safeMm, length, length === "mm" ? 0 : 1)}`}
+              ` at ${formatLengthWithUnit(safeMm, length, length === 'mm' ? 0 : 1)}`}
           </p>
         )}
       </Cell>
@@ -138,14 +105,14 @@ export function TitleBlock(props: TitleBlockProps) {
           placeholder="not told"
           parse={parseHeight(length)}
           format={format}
-          fault={fault("outletMm")}
+          fault={fault('outletMm')}
           onValue={(outletMm) => onSettings({ outletMm })}
           onEmpty={() => onSettings({ outletMm: null })}
         />
         {table && (
           <p className="font-semibold">
             {settings.outletMm === null
-              ? "all counted usable"
+              ? 'all counted usable'
               : `${written(unusableL(table))} unusable`}
           </p>
         )}
@@ -153,33 +120,33 @@ export function TitleBlock(props: TitleBlockProps) {
       <Cell label="Stands">
         <div className="flex gap-4">
           <TypedNumber
-            label="pitch, +x end low"
+            label="pitch, +x low"
             unit="°"
             value={attitude.pitch}
             parse={tilt}
             format={String}
             step={0.5}
-            fault={shapeFault("/attitude/pitch")}
+            fault={shapeFault('/attitude/pitch')}
             onValue={(pitch) =>
               dispatch({
-                type: "edit",
-                name: "pitch",
+                type: 'edit',
+                name: 'pitch',
                 edit: (now) => setAttitude(now, { ...attitude, pitch }),
               })
             }
           />
           <TypedNumber
-            label="roll, +y end low"
+            label="roll, +y low"
             unit="°"
             value={attitude.roll}
             parse={tilt}
             format={String}
             step={0.5}
-            fault={shapeFault("/attitude/roll")}
+            fault={shapeFault('/attitude/roll')}
             onValue={(roll) =>
               dispatch({
-                type: "edit",
-                name: "roll",
+                type: 'edit',
+                name: 'roll',
                 edit: (now) => setAttitude(now, { ...attitude, roll }),
               })
             }
@@ -192,7 +159,7 @@ export function TitleBlock(props: TitleBlockProps) {
           dispatch={dispatch}
           length={length}
           floorZ={props.floorZ}
-          fault={shapeFault("/stick")}
+          fault={shapeFault('/stick')}
         />
       </Cell>
       <Cell>
@@ -204,7 +171,7 @@ export function TitleBlock(props: TitleBlockProps) {
           placeholder="not measured"
           parse={parseSize(length)}
           format={format}
-          fault={fault("referenceHeightMm")}
+          fault={fault('referenceHeightMm')}
           onValue={(referenceHeightMm) => onSettings({ referenceHeightMm })}
           onEmpty={() => onSettings({ referenceHeightMm: null })}
         />
@@ -223,7 +190,7 @@ function Cell({ label, children }: { label?: string; children: ReactNode }) {
   );
 }
 
-function LiquidField(props: Pick<TitleBlockProps, "settings" | "onSettings">) {
+function LiquidField(props: Pick<TitleBlockProps, 'settings' | 'onSettings'>) {
   const id = useId();
   return (
     <>
@@ -238,9 +205,7 @@ function LiquidField(props: Pick<TitleBlockProps, "settings" | "onSettings">) {
           const liquid = event.target.value as LiquidCode;
           props.onSettings({
             liquid,
-            ...(liquid === "other"
-              ? { densityKgPerM3: 1000 }
-              : { densityKgPerM3: null }),
+            ...(liquid === 'other' ? { densityKgPerM3: 1000 } : { densityKgPerM3: null }),
           });
         }}
       >
@@ -255,7 +220,7 @@ function LiquidField(props: Pick<TitleBlockProps, "settings" | "onSettings">) {
 }
 
 function MeasuredField(
-  props: Pick<TitleBlockProps, "settings" | "onSettings" | "length"> & {
+  props: Pick<TitleBlockProps, 'settings' | 'onSettings' | 'length'> & {
     fault: string | undefined;
   },
 ) {
@@ -272,9 +237,9 @@ function MeasuredField(
           className="typed min-h-8 py-0.5 font-semibold"
           value={settings.measuredBy}
           onChange={(event) => {
-            const measuredBy = event.target.value as TankSettings["measuredBy"];
+            const measuredBy = event.target.value as TankSettings['measuredBy'];
             onSettings(
-              measuredBy === "stated"
+              measuredBy === 'stated'
                 ? { measuredBy }
                 : {
                     measuredBy,
@@ -288,7 +253,7 @@ function MeasuredField(
           <option value="stated">stated ±</option>
         </select>
       </div>
-      {settings.measuredBy === "stated" && (
+      {settings.measuredBy === 'stated' && (
         <TypedNumber
           label="± of a size"
           unit={length}
@@ -316,16 +281,14 @@ function StickFields(props: {
   if (!stick) {
     return (
       <>
-        <p className="font-semibold">
-          none: depth is plumb, from the lowest point
-        </p>
+        <p className="font-semibold">none: depth is plumb, from the lowest point</p>
         <button
           type="button"
           className="act-text"
           onClick={() =>
             dispatch({
-              type: "edit",
-              name: "add the stick",
+              type: 'edit',
+              name: 'add the stick',
               edit: (now) => setStick(now, { at: [0, 0] }),
             })
           }
@@ -337,8 +300,8 @@ function StickFields(props: {
   }
   const place = (axis: 0 | 1, value: number) =>
     dispatch({
-      type: "edit",
-      name: "place of the stick",
+      type: 'edit',
+      name: 'place of the stick',
       edit: (now) => {
         const at: [number, number] = [...(now.stick?.at ?? stick.at)];
         at[axis] = value;
@@ -365,20 +328,20 @@ function StickFields(props: {
         <TypedNumber
           label="zero at z"
           value={stick.zero ?? null}
-          placeholder={floorZ === null ? "floor" : `floor, ${format(floorZ)}`}
+          placeholder={floorZ === null ? 'floor' : `floor, ${format(floorZ)}`}
           parse={parsePlace(length)}
           format={format}
           onValue={(zero) =>
             dispatch({
-              type: "edit",
-              name: "zero of the stick",
+              type: 'edit',
+              name: 'zero of the stick',
               edit: (now) => setStick(now, { ...stick, zero }),
             })
           }
           onEmpty={() =>
             dispatch({
-              type: "edit",
-              name: "zero of the stick",
+              type: 'edit',
+              name: 'zero of the stick',
               edit: (now) => setStick(now, { at: stick.at }),
             })
           }
@@ -394,8 +357,8 @@ function StickFields(props: {
         className="act-text"
         onClick={() =>
           dispatch({
-            type: "edit",
-            name: "remove the stick",
+            type: 'edit',
+            name: 'remove the stick',
             edit: (now) => setStick(now, undefined),
           })
         }

@@ -1,4 +1,4 @@
-import { useId, useState, type KeyboardEvent } from "react";
+import { useId, useState, type KeyboardEvent } from 'react';
 
 export type Parsed = { value: number } | { refused: string };
 
@@ -28,64 +28,47 @@ interface TypedNumberProps {
  * beside the field with what was typed still in it.
  */
 export function TypedNumber(props: TypedNumberProps) {
-  const {
-    label,
-    value,
-    parse,
-    format,
-    onValue,
-    onEmpty,
-    unit,
-    step = 1,
-  } = props;
+  const { label, value, parse, format, onValue, onEmpty, unit, step = 1 } = props;
   const id = useId();
   const [draft, setDraft] = useState<string | null>(null);
-  const shown = draft ?? (value === null ? "" : format(value));
-  const parsed: Parsed | null =
-    draft === null || draft.trim() === "" ? null : parse(draft);
+  const shown = draft ?? (value === null ? '' : format(value));
+  const parsed: Parsed | null = draft === null || draft.trim() === '' ? null : parse(draft);
   const refused =
-    parsed && "refused" in parsed
+    parsed && 'refused' in parsed
       ? parsed.refused
-      : draft !== null && draft.trim() === "" && !onEmpty
-        ? "Type a number."
+      : draft !== null && draft.trim() === '' && !onEmpty
+        ? 'Type a number.'
         : null;
   const echo =
-    parsed && "value" in parsed && draft !== null && !isPlain(draft)
-      ? format(parsed.value)
-      : null;
+    parsed && 'value' in parsed && draft !== null && !isPlain(draft) ? format(parsed.value) : null;
   const fault = refused ?? (draft === null ? props.fault : undefined);
 
   const take = () => {
     if (draft === null) return;
-    if (draft.trim() === "") {
+    if (draft.trim() === '') {
       if (!onEmpty) return;
       onEmpty();
-    } else if (parsed && "value" in parsed) {
+    } else if (parsed && 'value' in parsed) {
       if (parsed.value !== value) onValue(parsed.value);
     } else return;
     setDraft(null);
   };
   const press = (event: KeyboardEvent<HTMLInputElement>) => {
-    if (event.key === "Enter") take();
-    if (event.key === "Escape") setDraft(null);
-    if (event.key !== "ArrowUp" && event.key !== "ArrowDown") return;
-    const from = parsed && "value" in parsed ? parsed.value : value;
+    if (event.key === 'Enter') take();
+    if (event.key === 'Escape') setDraft(null);
+    if (event.key !== 'ArrowUp' && event.key !== 'ArrowDown') return;
+    const from = parsed && 'value' in parsed ? parsed.value : value;
     if (from === null) return;
     event.preventDefault();
-    const sign = event.key === "ArrowUp" ? 1 : -1;
+    const sign = event.key === 'ArrowUp' ? 1 : -1;
     const stride = event.shiftKey ? 10 * step : step;
     setDraft(null);
     onValue(Math.round((from + sign * stride) * 1e6) / 1e6);
   };
 
   return (
-    <div className={props.wide ? "min-w-0" : "w-19"}>
-      <label
-        htmlFor={id}
-        className={
-          props.hideLabel ? "sr-only" : "label block whitespace-nowrap"
-        }
-      >
+    <div className={props.wide ? 'min-w-0' : 'w-20'}>
+      <label htmlFor={id} className={props.hideLabel ? 'sr-only' : 'label block whitespace-nowrap'}>
         {label}
       </label>
       <div className="flex items-baseline gap-1">
@@ -110,7 +93,7 @@ export function TypedNumber(props: TypedNumberProps) {
       {echo && (
         <p className="label whitespace-nowrap">
           = {echo}
-          {unit ? ` ${unit}` : ""}
+          {unit ? ` ${unit}` : ''}
         </p>
       )}
       {fault && (

@@ -1,15 +1,13 @@
-import type { LengthUnit } from "~/domain/units/length-unit";
-import { parseLength } from "~/domain/units/parse-length";
-import type { Parsed } from "./TypedNumber";
+import type { LengthUnit } from '~/domain/units/length-unit';
+import { parseLength } from '~/domain/units/parse-length';
+import type { Parsed } from './TypedNumber';
 
 /** A size: a length above nothing, in mm. */
 export function parseSize(unit: LengthUnit) {
   return (text: string): Parsed => {
     const parsed = parseLength(text, unit);
-    if ("refused" in parsed) return parsed;
-    return parsed.mm > 0
-      ? { value: parsed.mm }
-      : { refused: "A length is more than 0." };
+    if ('refused' in parsed) return parsed;
+    return parsed.mm > 0 ? { value: parsed.mm } : { refused: 'A length is more than 0.' };
   };
 }
 
@@ -17,7 +15,7 @@ export function parseSize(unit: LengthUnit) {
 export function parsePlace(unit: LengthUnit) {
   return (text: string): Parsed => {
     const parsed = parseLength(text, unit);
-    return "refused" in parsed ? parsed : { value: parsed.mm };
+    return 'refused' in parsed ? parsed : { value: parsed.mm };
   };
 }
 
@@ -25,10 +23,8 @@ export function parsePlace(unit: LengthUnit) {
 export function parseHeight(unit: LengthUnit) {
   return (text: string): Parsed => {
     const parsed = parseLength(text, unit);
-    if ("refused" in parsed) return parsed;
-    return parsed.mm >= 0
-      ? { value: parsed.mm }
-      : { refused: "A height is 0 or more." };
+    if ('refused' in parsed) return parsed;
+    return parsed.mm >= 0 ? { value: parsed.mm } : { refused: 'A height is 0 or more.' };
   };
 }
 
@@ -37,8 +33,8 @@ export function parseBetween(low: number, high: number, sentence: string) {
   return (text: string): Parsed => {
     const plain = text
       .trim()
-      .replace(/\s*[°%]$/, "")
-      .replace("\u2212", "-");
+      .replace(/\s*[°%]$/, '')
+      .replace('\u2212', '-');
     const value = /^[+-]?\d+(\.\d+)?$/.test(plain) ? Number(plain) : Number.NaN;
     return value >= low && value <= high ? { value } : { refused: sentence };
   };

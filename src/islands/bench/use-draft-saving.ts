@@ -1,18 +1,18 @@
-import { useMutation } from "@tanstack/react-query";
-import { useCallback, useEffect, useRef, useState } from "react";
-import { tankDocument, type TankDocument } from "~/domain/tank/document";
-import { saveDesign } from "../shared/api";
-import { asProblem } from "../shared/problem";
+import { useMutation } from '@tanstack/react-query';
+import { useCallback, useEffect, useRef, useState } from 'react';
+import { tankDocument, type TankDocument } from '~/domain/tank/document';
+import { saveDesign } from '../shared/api';
+import { asProblem } from '../shared/problem';
 
 /** What stands of the draft on the server, as said in the top line. */
 export type Saving =
-  | { state: "saved"; at: Date | null }
-  | { state: "changed" }
-  | { state: "saving" }
+  | { state: 'saved'; at: Date | null }
+  | { state: 'changed' }
+  | { state: 'saving' }
   /** Could not be reached or was refused; tried again by itself only when unreachable. */
-  | { state: "unsaved"; why: string }
+  | { state: 'unsaved'; why: string }
   | {
-      state: "conflict";
+      state: 'conflict';
       theirs: TankDocument;
       theirEtag: string;
       by: string;
@@ -26,14 +26,10 @@ const retryMs = 4000;
  * Saves the draft by itself after a moment of rest, with the version it was read at. Somebody
  * else's save in between is told, never written over.
  */
-export function useDraftSaving(
-  tankId: string,
-  design: TankDocument,
-  firstEtag: string,
-) {
+export function useDraftSaving(tankId: string, design: TankDocument, firstEtag: string) {
   const etag = useRef(firstEtag);
   const savedDesign = useRef(design);
-  const [saving, setSaving] = useState<Saving>({ state: "saved", at: null });
+  const [saving, setSaving] = useState<Saving>({ state: 'saved', at: null });
   const { mutateAsync } = useMutation({
     mutationFn: (send: { design: TankDocument; etag: string }) =>
       saveDesign(tankId, send.design, send.etag),
@@ -47,29 +43,27 @@ export function useDraftSaving(
       if (busy.current) return;
       busy.current = true;
       const sent = latest.current;
-      setSaving({ state: "saving" });
+      setSaving({ state: 'saving' });
       try {
         const answer = await mutateAsync({ design: sent, etag: withEtag });
         etag.current = answer.etag ?? withEtag;
         savedDesign.current = sent;
         setSaving(
-          latest.current === sent
-            ? { state: "saved", at: new Date() }
-            : { state: "changed" },
+          latest.current === sent ? { state: 'saved', at: new Date() } : { state: 'changed' },
         );
       } catch (error) {
         const problem = asProblem(error);
         const theirs = tankDocument.safeParse(problem.facts.design);
-        if (problem.code === "precondition-failed" && theirs.success) {
+        if (problem.code === 'precondition-failed' && theirs.success) {
           setSaving({
-            state: "conflict",
+            state: 'conflict',
             theirs: theirs.data,
             theirEtag: String(problem.facts.etag),
             by: String(problem.facts.savedBy),
             at: String(problem.facts.savedAt),
           });
         } else {
-          setSaving({ state: "unsaved", why: problem.message });
+          setSaving({ state: 'unsaved', why: problem.message });
         }
       } finally {
         busy.current = false;
@@ -79,26 +73,26 @@ export function useDraftSaving(
   );
 
   useEffect(() => {
-    if (design === savedDesign.current || saving.state === "conflict") return;
-    if (saving.state === "saved") setSaving({ state: "changed" });
-    const wait = saving.state === "unsaved" ? retryMs : restMs;
+    if (design === savedDesign.current || saving.state === 'conflict') return;
+    if (saving.state === 'saved') setSaving({ state: 'changed' });
+    const wait = saving.state === 'unsaved' ? retryMs : restMs;
     const timer = setTimeout(() => void save(), wait);
     return () => clearTimeout(timer);
   }, [design, saving.state, save]);
 
   useEffect(() => {
-    const unsaved = saving.state !== "saved";
+    const unsaved = saving.state !== 'saved';
     if (!unsaved) return;
     const ask = (event: BeforeUnloadEvent) => event.preventDefault();
-    window.addEventListener("beforeunload", ask);
-    return () => window.removeEventListener("beforeunload", ask);
+    window.addEventListener('beforeunload', ask);
+    return () => window.removeEventListener('beforeunload', ask);
   }, [saving.state]);
 
   /** Ends a conflict with the other's document, which the bench then shows. */
   const takeTheirs = useCallback((theirs: TankDocument, theirEtag: string) => {
     etag.current = theirEtag;
     savedDesign.current = theirs;
-    setSaving({ state: "saved", at: new Date() });
+    setSaving({ state: 'saved', at: new Date() });
   }, []);
 
   /** Ends a conflict with what stands here, saved over the other's version knowingly. */

@@ -1,5 +1,5 @@
-import { useEffect, useRef, useState } from "react";
-import type { Plate } from "~/viewport/projection";
+import { useEffect, useRef, useState } from 'react';
+import type { Plate } from '~/viewport/projection';
 
 /** Follows the size of the picture's frame: the drawing and the stick share one rail. */
 export function usePlate() {
@@ -29,10 +29,10 @@ export function usePlate() {
     };
     const observer = new ResizeObserver(fit);
     observer.observe(element);
-    window.addEventListener("resize", fit);
+    window.addEventListener('resize', fit);
     return () => {
       observer.disconnect();
-      window.removeEventListener("resize", fit);
+      window.removeEventListener('resize', fit);
     };
   }, []);
   return { frame, plate };

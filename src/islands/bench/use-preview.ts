@@ -1,26 +1,26 @@
-import { useEffect, useRef, useState } from "react";
-import { DipwrightError } from "~/domain/errors";
-import type { Preview } from "~/domain/table/preview";
-import type { TankDocument } from "~/domain/tank/document";
-import {
-  createPreviewClient,
-  type PreviewClient,
-} from "~/workers/preview-client";
+import { useEffect, useRef, useState } from 'react';
+import { DipwrightError } from '~/domain/errors';
+import type { Preview } from '~/domain/table/preview';
+import type { TankDocument } from '~/domain/tank/document';
+import type { TankSettings } from '~/domain/tank/settings';
+import { createPreviewClient, type PreviewClient } from '~/workers/preview-client';
 
 export interface LivePreview {
   /** The last shape that could be computed; it stays while the present one cannot. */
   preview: Preview | null;
+  /** ± of its rows, litres. For the moment after an edit it is still that of the shape before. */
+  plusMinusL: readonly number[] | null;
   /** Why the present design cannot be computed. */
   problem: DipwrightError | null;
 }
 
-/** Computes the design in a worker as it changes; the newest wins. */
-export function usePreview(design: TankDocument): LivePreview {
+/** Computes the design in a worker as it changes, then the ± of its rows; the newest wins. */
+export function usePreview(
+  design: TankDocument,
+  { sizePlusMinusMm, dipPlusMinusMm }: TankSettings,
+): LivePreview {
   const client = useRef<PreviewClient | null>(null);
-  const [live, setLive] = useState<LivePreview>({
-    preview: null,
-    problem: null,
-  });
+  const [live, setLive] = useState<LivePreview>({ preview: null, plusMinusL: null, problem: null });
 
   useEffect(() => {
     const started = createPreviewClient();
@@ -33,29 +33,32 @@ export function usePreview(design: TankDocument): LivePreview {
 
   useEffect(() => {
     let current = true;
-    client.current?.compute(design).then(
-      (preview) => {
-        if (current && preview) setLive({ preview, problem: null });
-      },
-      (error: unknown) => {
+    const follow = async (worker: PreviewClient) => {
+      const preview = await worker.compute(design);
+      if (!current || !preview) return;
+      setLive(({ plusMinusL }) => ({ preview, plusMinusL, problem: null }));
+      const plusMinusL = await worker.plusMinus(design, preview, {
+        sizePlusMinusMm,
+        dipPlusMinusMm,
+      });
+      if (current && plusMinusL) setLive({ preview, plusMinusL, problem: null });
+    };
+    if (client.current) {
+      follow(client.current).catch((error: unknown) => {
         if (!current) return;
         const problem =
           error instanceof DipwrightError
             ? error
-            : new DipwrightError(
-                "unavailable",
-                "The tank cannot be computed here.",
-                {
-                  cause: error,
-                },
-              );
-        setLive((last) => ({ preview: last.preview, problem }));
-      },
-    );
+            : new DipwrightError('unavailable', 'The tank cannot be computed here.', {
+                cause: error,
+              });
+        setLive((last) => ({ ...last, problem }));
+      });
+    }
     return () => {
       current = false;
     };
-  }, [design]);
+  }, [design, sizePlusMinusMm, dipPlusMinusMm]);
 
   return live;
 }

@@ -1,10 +1,10 @@
-import { useMutation } from "@tanstack/react-query";
-import { useCallback, useState } from "react";
-import type { FieldFault } from "~/domain/errors";
-import type { TankSettings } from "~/domain/tank/settings";
-import type { Tank, TankChange } from "~/domain/tank/tank";
-import { changeTank } from "../shared/api";
-import { asProblem } from "../shared/problem";
+import { useMutation } from '@tanstack/react-query';
+import { useCallback, useState } from 'react';
+import type { FieldFault } from '~/domain/errors';
+import type { TankSettings } from '~/domain/tank/settings';
+import type { Tank, TankChange } from '~/domain/tank/tank';
+import { changeTank } from '../shared/api';
+import { asProblem } from '../shared/problem';
 
 /** The tank's settings, changed in place: shown at once, saved one after the other. */
 export function useSettings(tank: Tank) {

@@ -1,7 +1,7 @@
-import { useId, useRef, type KeyboardEvent, type PointerEvent } from "react";
-import { depthAt, type Curve } from "~/domain/table/curve";
-import { marksFor, multiples } from "~/domain/units/marks";
-import { Patterns } from "./Patterns";
+import { useId, useRef, type KeyboardEvent, type PointerEvent } from 'react';
+import { depthAt, type Curve } from '~/domain/table/curve';
+import { marksFor, multiples } from '~/domain/units/marks';
+import { Patterns } from './Patterns';
 
 /** A unit of the scale: how much of the SI unit it is, and how a mark is written in it. */
 export interface Scale {
@@ -85,52 +85,34 @@ export function Stick(props: StickProps) {
         follow(event);
       }}
       onPointerMove={(event) => {
-        if (event.currentTarget.hasPointerCapture(event.pointerId))
-          follow(event);
+        if (event.currentTarget.hasPointerCapture(event.pointerId)) follow(event);
       }}
     >
       <Patterns prefix={prefix} />
       <Rail {...props} prefix={prefix} yOf={yOf} />
-      <LengthMarks
-        heightMm={heightMm}
-        scale={props.length}
-        railPx={railPx}
-        yOf={yOf}
-      />
-      <VolumeMarks
-        heightMm={heightMm}
-        curve={props.curve}
-        scale={props.volume}
-        yOf={yOf}
-      />
-      {depthMm !== null && (
-        <WetLine y={yOf(depthMm)} grip={props.grip === true} />
-      )}
+      <LengthMarks heightMm={heightMm} scale={props.length} railPx={railPx} yOf={yOf} />
+      <VolumeMarks heightMm={heightMm} curve={props.curve} scale={props.volume} yOf={yOf} />
+      {depthMm !== null && <WetLine y={yOf(depthMm)} grip={props.grip === true} />}
     </svg>
   );
 }
 
-function keyTarget(
-  event: KeyboardEvent,
-  depthMm: number,
-  step: number,
-  top: number,
-) {
+function keyTarget(event: KeyboardEvent, depthMm: number, step: number, top: number) {
   const stride = event.shiftKey ? 10 * step : step;
   switch (event.key) {
-    case "ArrowUp":
-    case "ArrowRight":
+    case 'ArrowUp':
+    case 'ArrowRight':
       return depthMm + stride;
-    case "ArrowDown":
-    case "ArrowLeft":
+    case 'ArrowDown':
+    case 'ArrowLeft':
       return depthMm - stride;
-    case "PageUp":
+    case 'PageUp':
       return depthMm + 10 * step;
-    case "PageDown":
+    case 'PageDown':
       return depthMm - 10 * step;
-    case "Home":
+    case 'Home':
       return 0;
-    case "End":
+    case 'End':
       return top;
     default:
       return null;
@@ -139,21 +121,9 @@ function keyTarget(
 
 type Drawn = StickProps & { prefix: string; yOf(mm: number): number };
 
-function Rail({
-  prefix,
-  yOf,
-  heightMm,
-  depthMm,
-  unusableMm,
-  safeFillMm,
-}: Drawn) {
+function Rail({ prefix, yOf, heightMm, depthMm, unusableMm, safeFillMm }: Drawn) {
   const x = leftScalePx;
-  const band = (
-    lowMm: number,
-    highMm: number,
-    className: string,
-    fill?: string,
-  ) => (
+  const band = (lowMm: number, highMm: number, className: string, fill?: string) => (
     <rect
       x={x}
       y={yOf(highMm)}
@@ -165,14 +135,14 @@ function Rail({
   );
   return (
     <g>
-      {band(0, heightMm, "fill-sheet")}
-      {depthMm !== null && band(0, depthMm, "fill-wash")}
+      {band(0, heightMm, 'fill-sheet')}
+      {depthMm !== null && band(0, depthMm, 'fill-wash')}
       {unusableMm !== null &&
         unusableMm > 0 &&
-        band(0, Math.min(unusableMm, heightMm), "", `url(#${prefix}-unusable)`)}
+        band(0, Math.min(unusableMm, heightMm), '', `url(#${prefix}-unusable)`)}
       {safeFillMm !== null &&
         safeFillMm < heightMm &&
-        band(safeFillMm, heightMm, "", `url(#${prefix}-headroom)`)}
+        band(safeFillMm, heightMm, '', `url(#${prefix}-headroom)`)}
       <rect
         x={x}
         y={yOf(heightMm)}
@@ -194,22 +164,12 @@ function LengthMarks(props: {
 }) {
   const { heightMm, scale, railPx, yOf } = props;
   const span = heightMm / scale.per;
-  const { numbered, fine } = marksFor(
-    span,
-    railPx / 36,
-    railPx / 5,
-    scale.eighths,
-  );
+  const { numbered, fine } = marksFor(span, railPx / 36, railPx / 5, scale.eighths);
   const isNumbered = (value: number) =>
     Math.abs(value / numbered - Math.round(value / numbered)) < 1e-6;
   return (
     <g>
-      <text
-        x={leftScalePx - 8}
-        y={8}
-        textAnchor="end"
-        className="fill-ink-2 text-note"
-      >
+      <text x={leftScalePx - 8} y={8} textAnchor="end" className="fill-ink-2 text-note">
         {scale.label}
       </text>
       {multiples(fine, span).map((value) => {
@@ -223,12 +183,7 @@ function LengthMarks(props: {
               strokeWidth={long ? 1.25 : 0.75}
             />
             {long && (
-              <text
-                x={leftScalePx - 8}
-                y={y + 4.5}
-                textAnchor="end"
-                className="fill-ink text-note"
-              >
+              <text x={leftScalePx - 8} y={y + 4.5} textAnchor="end" className="fill-ink text-note">
                 {trim(value)}
               </text>
             )}
@@ -255,10 +210,7 @@ function VolumeMarks(props: {
   const marks: { value: number; y: number }[] = [];
   let lastY = Infinity;
   // the low end of a narrowing tank gets finer marks where they have room
-  const values = [
-    ...multiples(numbered / 4, numbered),
-    ...multiples(numbered, span).slice(2),
-  ];
+  const values = [...multiples(numbered / 4, numbered), ...multiples(numbered, span).slice(2)];
   for (const value of values) {
     const litres = value * scale.per;
     if (litres <= least || litres > most) continue;
@@ -269,27 +221,13 @@ function VolumeMarks(props: {
   }
   return (
     <g>
-      <text
-        x={right - 2}
-        y={8}
-        textAnchor="end"
-        className="fill-ink-2 text-note"
-      >
+      <text x={right - 2} y={8} textAnchor="end" className="fill-ink-2 text-note">
         {scale.label}
       </text>
       {marks.map(({ value, y }) => (
         <g key={value}>
-          <path
-            d={`M${right} ${y}h-9`}
-            className="stroke-ink"
-            strokeWidth="1"
-          />
-          <text
-            x={right - 12}
-            y={y + 4}
-            textAnchor="end"
-            className="fill-ink-2 text-[0.6875rem]"
-          >
+          <path d={`M${right} ${y}h-9`} className="stroke-ink" strokeWidth="1" />
+          <text x={right - 12} y={y + 4} textAnchor="end" className="fill-ink-2 text-[0.6875rem]">
             {trim(value)}
           </text>
         </g>
@@ -303,7 +241,7 @@ function WetLine({ y, grip }: { y: number; grip: boolean }) {
   return (
     <g className="cursor-ns-resize">
       <path
-        d={`M${leftScalePx - 6} ${y}h${railWidthPx + 12}`}
+        d={`M${leftScalePx - 6} ${y}h${railWidthPx + 18}`}
         className="stroke-datum"
         strokeWidth="2"
       />
@@ -324,7 +262,5 @@ function WetLine({ y, grip }: { y: number; grip: boolean }) {
 
 function trim(value: number): string {
   const text = Number(value.toFixed(3)).toString();
-  return Math.abs(value) >= 10_000
-    ? text.replace(/\B(?=(\d{3})+$)/g, "\u2009")
-    : text;
+  return Math.abs(value) >= 10_000 ? text.replace(/\B(?=(\d{3})+$)/g, '\u2009') : text;
 }

@@ -1,9 +1,9 @@
-import { useMemo, useState } from "react";
-import type { DipTable } from "~/domain/table/answer-at";
-import { mmPerLengthUnit, type LengthUnit } from "~/domain/units/length-unit";
-import { marksFor, multiples } from "~/domain/units/marks";
-import { volumeUnitSigns, type VolumeUnit } from "~/domain/units/volume-unit";
-import { rowFigures } from "./figures";
+import { useMemo, useState } from 'react';
+import type { DipTable } from '~/domain/table/answer-at';
+import { mmPerLengthUnit, type LengthUnit } from '~/domain/units/length-unit';
+import { marksFor, multiples } from '~/domain/units/marks';
+import { volumeUnitSigns, type VolumeUnit } from '~/domain/units/volume-unit';
+import { digitsOf, rowFigures } from './figures';
 
 interface FineTableProps {
   table: DipTable;
@@ -19,9 +19,7 @@ export function FineTable({ table, length, volume }: FineTableProps) {
       className="border-t border-hair"
       onToggle={(event) => setOpen(event.currentTarget.open)}
     >
-      <summary className="cursor-pointer px-4 py-3 font-semibold sm:px-6">
-        The full table
-      </summary>
+      <summary className="cursor-pointer px-4 py-3 font-semibold sm:px-6">The full table</summary>
       {open && <Rows table={table} length={length} volume={volume} />}
     </details>
   );
@@ -29,20 +27,18 @@ export function FineTable({ table, length, volume }: FineTableProps) {
 
 function Rows({ table, length, volume }: FineTableProps) {
   const rows = useMemo(() => {
+    const digits = digitsOf(table, volume);
     const per = mmPerLengthUnit[length];
     const span = table.heightMm / per;
-    const step = marksFor(span, 100, 100, length === "in").numbered;
-    const marks = multiples(step, span).map((value) =>
-      Math.min(value * per, table.heightMm),
-    );
-    if (table.heightMm - (marks[marks.length - 1] ?? 0) > 1e-6)
-      marks.push(table.heightMm);
+    const step = marksFor(span, 100, 100, length === 'in').numbered;
+    const marks = multiples(step, span).map((value) => Math.min(value * per, table.heightMm));
+    if (table.heightMm - (marks[marks.length - 1] ?? 0) > 1e-6) marks.push(table.heightMm);
     return marks.map((mm) => ({
       mm,
-      figures: rowFigures(table, mm, length, volume),
+      figures: rowFigures(table, mm, length, digits),
     }));
   }, [table, length, volume]);
-  const litres = volume === "l" ? "litres" : volumeUnitSigns[volume];
+  const litres = volume === 'l' ? 'litres' : volumeUnitSigns[volume];
   return (
     <div
       className="overflow-x-auto px-4 pb-6 sm:px-6"
@@ -63,9 +59,7 @@ function Rows({ table, length, volume }: FineTableProps) {
         <tbody>
           {rows.map(({ mm, figures }) => (
             <tr key={mm}>
-              <td className="figure sticky left-0 bg-film font-semibold">
-                {figures.depth}
-              </td>
+              <td className="figure sticky left-0 bg-film font-semibold">{figures.depth}</td>
               <td className="figure">{figures.litres}</td>
               <td className="figure">{figures.usable}</td>
               <td className="figure">{figures.room}</td>

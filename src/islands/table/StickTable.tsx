@@ -1,9 +1,9 @@
-import { useMemo } from "react";
-import type { DipTable } from "~/domain/table/answer-at";
-import { mmPerLengthUnit, type LengthUnit } from "~/domain/units/length-unit";
-import { marksFor, multiples } from "~/domain/units/marks";
-import { volumeUnitSigns, type VolumeUnit } from "~/domain/units/volume-unit";
-import { rowFigures } from "./figures";
+import { useMemo } from 'react';
+import type { DipTable } from '~/domain/table/answer-at';
+import { mmPerLengthUnit, type LengthUnit } from '~/domain/units/length-unit';
+import { marksFor, multiples } from '~/domain/units/marks';
+import { volumeUnitSigns, type VolumeUnit } from '~/domain/units/volume-unit';
+import { digitsOf, rowFigures } from './figures';
 
 interface StickTableProps {
   table: DipTable;
@@ -16,9 +16,9 @@ interface StickTableProps {
   heightPx: number;
 }
 
-const rowPx = 21;
-const columns = ["depth", "litres", "usable", "room", "kg"] as const;
-const grid = "grid grid-cols-[3.6rem_4.1rem_4.1rem_4.1rem_3.4rem] text-right";
+const rowPx = 20;
+const columns = ['depth', 'litres', 'usable', 'room', 'kg'] as const;
+const grid = 'grid grid-cols-[3.2rem_4rem_4rem_4rem_3rem] text-right';
 
 /**
  * The table beside the stick: every row at its true height, the read one set apart on the wet
@@ -26,35 +26,31 @@ const grid = "grid grid-cols-[3.6rem_4.1rem_4.1rem_4.1rem_3.4rem] text-right";
  */
 export function StickTable(props: StickTableProps) {
   const { table, depthMm, length, volume, yOf, railPx, heightPx } = props;
+  const digits = useMemo(() => digitsOf(table, volume), [table, volume]);
   const rows = useMemo(() => {
     const per = mmPerLengthUnit[length];
     const span = table.heightMm / per;
-    const step = marksFor(
-      span,
-      railPx / rowPx,
-      railPx / rowPx,
-      length === "in",
-    ).numbered;
+    const step = marksFor(span, railPx / rowPx, railPx / rowPx, length === 'in').numbered;
     return multiples(step, span)
       .map((value) => Math.min(value * per, table.heightMm))
-      .map((mm) => ({ mm, figures: rowFigures(table, mm, length, volume) }));
-  }, [table, length, volume, railPx]);
-  const read = rowFigures(table, depthMm, length, volume);
+      .map((mm) => ({ mm, figures: rowFigures(table, mm, length, digits) }));
+  }, [table, length, digits, railPx]);
+  const read = rowFigures(table, depthMm, length, digits);
   const wetY = yOf(depthMm);
-  const headTop = yOf(table.heightMm) - rowPx - 9;
+  const headTop = yOf(table.heightMm) - rowPx - 15;
   const heads = {
     depth: length,
-    litres: volume === "l" ? "litres" : volumeUnitSigns[volume],
-    usable: "usable",
-    room: "room",
-    kg: "kg",
+    litres: volume === 'l' ? 'litres' : volumeUnitSigns[volume],
+    usable: 'usable',
+    room: 'room',
+    kg: 'kg',
   };
 
   return (
     <div
       role="table"
       aria-label="Table beside the stick"
-      className="relative w-max pr-2"
+      className="relative w-[18.2rem]"
       style={{ height: heightPx }}
     >
       <div
@@ -70,7 +66,7 @@ export function StickTable(props: StickTableProps) {
       </div>
       {rows.map(({ mm, figures }) => {
         const y = yOf(mm);
-        if (Math.abs(y - wetY) < rowPx * 0.98) return null;
+        if (y > wetY - 1.6 * rowPx && y < wetY + 0.6 * rowPx) return null;
         return (
           <div
             role="row"
@@ -79,11 +75,7 @@ export function StickTable(props: StickTableProps) {
             style={{ top: y - rowPx / 2, height: rowPx }}
           >
             {columns.map((column) => (
-              <span
-                role="cell"
-                key={column}
-                className="self-center text-[0.875rem]"
-              >
+              <span role="cell" key={column} className="self-center text-[0.875rem]">
                 {figures[column]}
               </span>
             ))}

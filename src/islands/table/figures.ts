@@ -1,12 +1,10 @@
-import { answerAt, type DipTable } from "~/domain/table/answer-at";
-import { densityOf } from "~/domain/table/answer-at";
-import { formatLength } from "~/domain/units/format-length";
-import { formatMass } from "~/domain/units/format-mass";
-import { formatVolume } from "~/domain/units/format-volume";
-import type { LengthUnit } from "~/domain/units/length-unit";
-import type { VolumeUnit } from "~/domain/units/volume-unit";
+import { chartDigits, type ChartDigits } from '~/domain/report/chart-digits';
+import { answerAt, densityOf, type DipTable } from '~/domain/table/answer-at';
+import { formatLength } from '~/domain/units/format-length';
+import type { LengthUnit } from '~/domain/units/length-unit';
+import type { VolumeUnit } from '~/domain/units/volume-unit';
 
-/** One row of a table as it is written: every figure with the digits its ± deserves. */
+/** One row of a table as it is written. */
 export interface RowFigures {
   depth: string;
   litres: string;
@@ -15,23 +13,24 @@ export interface RowFigures {
   kg: string;
 }
 
+/** The digits of a whole table: those that its largest ± deserves, so that columns stay straight. */
+export function digitsOf(table: DipTable, volume: VolumeUnit): ChartDigits {
+  const largest = Array.from(table.plusMinusL).reduce((most, one) => Math.max(most, one), 0);
+  return chartDigits(volume, largest, densityOf(table.settings));
+}
+
 export function rowFigures(
   table: DipTable,
   depthMm: number,
   length: LengthUnit,
-  volume: VolumeUnit,
+  digits: ChartDigits,
 ): RowFigures {
   const answer = answerAt(table, depthMm);
-  const written = (litres: number) =>
-    formatVolume(litres, volume, answer.plusMinusL);
   return {
     depth: formatLength(depthMm, length),
-    litres: written(answer.volumeL),
-    usable: written(answer.usableL),
-    room: written(answer.roomL),
-    kg: formatMass(
-      answer.massKg,
-      (answer.plusMinusL * densityOf(table.settings)) / 1000,
-    ),
+    litres: digits.volume(answer.volumeL),
+    usable: digits.volume(answer.usableL),
+    room: digits.volume(answer.roomL),
+    kg: digits.mass(answer.massKg),
   };
 }

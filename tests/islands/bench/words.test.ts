@@ -1,10 +1,10 @@
-import { describe, expect, it } from "vitest";
-import type { Curve } from "~/domain/table/curve";
-import { startingPoints } from "~/domain/tank/starting-points";
-import { nextLetter } from "~/islands/bench/Bench";
-import { differencesOf } from "~/islands/bench/Conflict";
-import { sentenceToRemember } from "~/islands/bench/remember";
-import { setSize } from "~/scene/commands";
+import { describe, expect, it } from 'vitest';
+import type { Curve } from '~/domain/table/curve';
+import { startingPoints } from '~/domain/tank/starting-points';
+import { nextLetter } from '~/islands/bench/Bench';
+import { differencesOf } from '~/islands/bench/Conflict';
+import { sentenceToRemember } from '~/islands/bench/remember';
+import { setSize } from '~/scene/commands';
 
 /** V = capacity · (h/H)^power, 200 even rows. */
 function power(exponent: number, heightMm: number, capacityL: number): Curve {
@@ -19,40 +19,35 @@ function power(exponent: number, heightMm: number, capacityL: number): Curve {
   };
 }
 
-describe("the sentence to remember", () => {
-  it("says that half the stick of a V hull is a quarter of the tank (V = 0.00072 h²)", () => {
+describe('the sentence to remember', () => {
+  it('says that half the stick of a V hull is a quarter of the tank (V = 0.00072 h²)', () => {
     expect(sentenceToRemember(power(2, 500, 180), 500, 180)).toBe(
-      "Half the stick is a quarter of the tank.",
+      'Half the stick is a quarter of the tank.',
     );
   });
-  it("says half for straight sides", () => {
+  it('says half for straight sides', () => {
     expect(sentenceToRemember(power(1, 300, 135), 300, 135)).toBe(
-      "Half the stick is half of the tank.",
+      'Half the stick is half of the tank.',
     );
   });
-  it("gives a percentage where no plain fraction is near", () => {
+  it('gives a percentage where no plain fraction is near', () => {
     expect(sentenceToRemember(power(1.15, 300, 100), 300, 100)).toBe(
-      "Half the stick is 45 % of the tank.",
+      'Half the stick is 45 % of the tank.',
     );
   });
 });
 
-describe("letters of revisions", () => {
-  it("go from A to Z and on to AA", () => {
-    expect(["A", "Y", "Z", "AZ"].map(nextLetter)).toEqual([
-      "B",
-      "Z",
-      "AA",
-      "BA",
-    ]);
+describe('letters of revisions', () => {
+  it('go from A to Z and on to AA', () => {
+    expect(['A', 'Y', 'Z', 'AZ'].map(nextLetter)).toEqual(['B', 'Z', 'AA', 'BA']);
   });
 });
 
-describe("what differs between two drafts", () => {
-  it("names the solid whose size changed", () => {
+describe('what differs between two drafts', () => {
+  it('names the solid whose size changed', () => {
     const mine = startingPoints[1]!.design;
-    expect(differencesOf(mine, setSize(mine, "ramp", ["height"], 71))).toEqual([
-      "ramp: sizes, place or turn",
+    expect(differencesOf(mine, setSize(mine, 'ramp', ['height'], 71))).toEqual([
+      'ramp: sizes, place or turn',
     ]);
   });
 });

@@ -1,13 +1,7 @@
-import type { Dimension } from "./dimensions";
+import type { Dimension } from './dimensions';
 
 /** A dimension with oblique ticks, its figure standing along the line. */
-export function DimensionLine({
-  dimension,
-  text,
-}: {
-  dimension: Dimension;
-  text: string;
-}) {
+export function DimensionLine({ dimension, text }: { dimension: Dimension; text: string }) {
   const { from, to, offset } = dimension;
   const a = [from[0] + offset[0], from[1] + offset[1]] as const;
   const b = [to[0] + offset[0], to[1] + offset[1]] as const;
@@ -15,11 +9,8 @@ export function DimensionLine({
   if (lengthPx < 28) return null;
   const middle = [(a[0] + b[0]) / 2, (a[1] + b[1]) / 2];
   let angle = (Math.atan2(b[1] - a[1], b[0] - a[0]) * 180) / Math.PI;
-  if (angle > 90 || angle <= -90) angle += 180;
-  const witness = (
-    p: readonly [number, number],
-    q: readonly [number, number],
-  ) => {
+  if (angle > 90 || angle < -90) angle += 180;
+  const witness = (p: readonly [number, number], q: readonly [number, number]) => {
     const size = Math.hypot(q[0] - p[0], q[1] - p[1]) || 1;
     const ux = (q[0] - p[0]) / size;
     const uy = (q[1] - p[1]) / size;
@@ -27,10 +18,7 @@ export function DimensionLine({
   };
   return (
     <g className="stroke-line" strokeWidth="0.9" fill="none">
-      <path
-        d={`${witness(from, a)}${witness(to, b)}`}
-        className="stroke-hair"
-      />
+      <path d={`${witness(from, a)}${witness(to, b)}`} className="stroke-hair" />
       <path d={`M${a[0]} ${a[1]}L${b[0]} ${b[1]}`} />
       <path
         d={`M${a[0] - 5} ${a[1] + 5}l10 -10M${b[0] - 5} ${b[1] + 5}l10 -10`}

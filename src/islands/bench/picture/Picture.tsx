@@ -1,11 +1,11 @@
-import { lazy, Suspense, useMemo, useRef, type PointerEvent } from "react";
-import type { Preview } from "~/domain/table/preview";
-import { project, type Plate, type View } from "~/viewport/projection";
-import { balloonRadius, balloonsOf } from "./balloons";
-import { DimensionLine } from "./DimensionLine";
-import { dimensionsOf } from "./dimensions";
+import { lazy, Suspense, useMemo, useRef, type PointerEvent } from 'react';
+import type { Preview } from '~/domain/table/preview';
+import { project, type Plate, type View } from '~/viewport/projection';
+import { balloonRadius, balloonsOf } from './balloons';
+import { DimensionLine } from './DimensionLine';
+import { dimensionsOf } from './dimensions';
 
-const TankCanvas = lazy(() => import("~/viewport/TankCanvas"));
+const TankCanvas = lazy(() => import('~/viewport/TankCanvas'));
 
 interface PictureProps {
   preview: Preview;
@@ -30,60 +30,47 @@ const reachPx = 14;
 
 /** The picture: the drawn tank with its dimensions and balloons. The wet line can be dragged here too. */
 export function Picture(props: PictureProps) {
-  const {
-    preview,
-    plate,
-    view,
-    onView,
-    levels,
-    wetY,
-    onWetY,
-    selected,
-    onSelect,
-  } = props;
+  const { preview, plate, view, onView, levels, wetY, onWetY, selected, onSelect } = props;
   const projection = useMemo(
     () => project(preview.space, preview.frame, view, plate),
     [preview, view, plate],
   );
   const dimensions = useMemo(
-    () => dimensionsOf(preview.space, view, projection),
-    [preview.space, view, projection],
+    () => dimensionsOf(preview.extent, view, projection),
+    [preview.extent, view, projection],
   );
   const balloons = useMemo(
     () => balloonsOf(preview, projection, plate),
     [preview, projection, plate],
   );
-  const drag = useRef<
-    null | { kind: "wet" } | { kind: "turn"; x: number; y: number; from: View }
-  >(null);
+  const drag = useRef<null | { kind: 'wet' } | { kind: 'turn'; x: number; y: number; from: View }>(
+    null,
+  );
 
   const down = (event: PointerEvent<SVGSVGElement>) => {
     const box = event.currentTarget.getBoundingClientRect();
     const y = event.clientY - box.top;
     const onWet = wetY !== null && Math.abs(y - wetY) <= reachPx;
-    const turns = view.name === "away" || view.name === "free";
+    const turns = view.name === 'away' || view.name === 'free';
     if (!onWet && !turns) return;
     event.currentTarget.setPointerCapture(event.pointerId);
     drag.current = onWet
-      ? { kind: "wet" }
-      : { kind: "turn", x: event.clientX, y: event.clientY, from: view };
+      ? { kind: 'wet' }
+      : { kind: 'turn', x: event.clientX, y: event.clientY, from: view };
   };
   const move = (event: PointerEvent<SVGSVGElement>) => {
     const current = drag.current;
     if (!current) return;
-    if (current.kind === "wet") {
+    if (current.kind === 'wet') {
       onWetY(event.clientY - event.currentTarget.getBoundingClientRect().top);
       return;
     }
-    const from =
-      current.from.name === "free"
-        ? current.from
-        : { azimuth: -24, elevation: 22 };
+    const from = current.from.name === 'free' ? current.from : { azimuth: -24, elevation: 22 };
     const dx = event.clientX - current.x;
     const dy = event.clientY - current.y;
-    if (current.from.name !== "free" && Math.hypot(dx, dy) < 4) return;
+    if (current.from.name !== 'free' && Math.hypot(dx, dy) < 4) return;
     onView({
-      name: "free",
+      name: 'free',
       azimuth: from.azimuth - dx * 0.4,
       elevation: Math.min(89, Math.max(-20, from.elevation + dy * 0.4)),
     });
@@ -93,11 +80,7 @@ export function Picture(props: PictureProps) {
   };
 
   return (
-    <div
-      className="relative h-full w-full"
-      role="img"
-      aria-label={props.spoken}
-    >
+    <div className="relative h-full w-full" role="img" aria-label={props.spoken}>
       <Suspense fallback={null}>
         <TankCanvas
           preview={preview}
@@ -139,28 +122,19 @@ export function Picture(props: PictureProps) {
               strokeWidth="0.9"
               fill="none"
             />
-            <circle
-              cx={balloon.anchor[0]}
-              cy={balloon.anchor[1]}
-              r="2"
-              className="fill-ink"
-            />
+            <circle cx={balloon.anchor[0]} cy={balloon.anchor[1]} r="2" className="fill-ink" />
             <circle
               cx={balloon.centre[0]}
               cy={balloon.centre[1]}
               r={balloonRadius}
-              className={
-                balloon.id === selected
-                  ? "fill-ink stroke-ink"
-                  : "fill-film stroke-ink"
-              }
+              className={balloon.id === selected ? 'fill-ink stroke-ink' : 'fill-film stroke-ink'}
               strokeWidth="1.1"
             />
             <text
               x={balloon.centre[0]}
               y={balloon.centre[1] + 4.5}
               textAnchor="middle"
-              className={`text-note font-semibold ${balloon.id === selected ? "fill-film" : "fill-ink"}`}
+              className={`text-note font-semibold ${balloon.id === selected ? 'fill-film' : 'fill-ink'}`}
             >
               {balloon.number}
             </text>

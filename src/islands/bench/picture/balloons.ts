@@ -1,6 +1,6 @@
-import type { Preview } from "~/domain/table/preview";
-import type { Vec3 } from "~/domain/tank/solid";
-import { onPlate, type Plate, type Projection } from "~/viewport/projection";
+import type { Preview } from '~/domain/table/preview';
+import type { Vec3 } from '~/domain/tank/solid';
+import { onPlate, type Plate, type Projection } from '~/viewport/projection';
 
 /** A numbered balloon and the spot its leader points at, px on the plate. */
 export interface Balloon {
@@ -17,20 +17,15 @@ const gap = 2 * balloonRadius + 8;
  * Balloons stand in a column left or right of the drawing, on the side their solid lies on, at
  * their solid's height where that is free; leaders never cross within a column.
  */
-export function balloonsOf(
-  preview: Preview,
-  projection: Projection,
-  plate: Plate,
-): Balloon[] {
-  const points = preview.solids.map((solid) =>
-    onPlate(projection, middleOf(solid.positions)),
-  );
+export function balloonsOf(preview: Preview, projection: Projection, plate: Plate): Balloon[] {
+  const points = preview.solids.map((solid) => onPlate(projection, middleOf(solid.positions)));
   const { left, right } = extent(preview, projection);
-  const columns: Record<"left" | "right", Balloon[]> = { left: [], right: [] };
+  const columns: Record<'left' | 'right', Balloon[]> = { left: [], right: [] };
   points.forEach((anchor, index) => {
-    const side = anchor[0] < (left + right) / 2 - 1 ? "left" : "right";
+    // the right has the flag of the wet line: only what clearly lies there stands there
+    const side = anchor[0] < left + 0.56 * (right - left) ? 'left' : 'right';
     const x =
-      side === "left"
+      side === 'left'
         ? Math.max(balloonRadius + 4, left - 78)
         : Math.min(plate.width - balloonRadius - 12, right + 44);
     columns[side].push({
@@ -68,19 +63,12 @@ function middleOf(positions: Float64Array): Vec3 {
   return [sum[0] / count, sum[1] / count, sum[2] / count];
 }
 
-function extent(
-  preview: Preview,
-  projection: Projection,
-): { left: number; right: number } {
+function extent(preview: Preview, projection: Projection): { left: number; right: number } {
   let left = Infinity;
   let right = -Infinity;
   const { positions } = preview.space;
   for (let i = 0; i < positions.length; i += 3) {
-    const [x] = onPlate(projection, [
-      positions[i]!,
-      positions[i + 1]!,
-      positions[i + 2]!,
-    ]);
+    const [x] = onPlate(projection, [positions[i]!, positions[i + 1]!, positions[i + 2]!]);
     left = Math.min(left, x);
     right = Math.max(right, x);
   }

@@ -1,6 +1,6 @@
-import type { TankMesh } from "~/domain/table/preview";
-import type { Vec3 } from "~/domain/tank/solid";
-import { onPlate, type Projection, type View } from "~/viewport/projection";
+import type { Preview } from '~/domain/table/preview';
+import type { Vec3 } from '~/domain/tank/solid';
+import { onPlate, type Projection, type View } from '~/viewport/projection';
 
 /** One dimension of the drawing: a measured edge on the plate, and how far off its line stands. */
 export interface Dimension {
@@ -16,12 +16,12 @@ const off = 34;
 
 /** The overall sizes of the liquid space, placed where a draughtsman would for this view. */
 export function dimensionsOf(
-  mesh: TankMesh,
+  extent: Preview['extent'],
   view: View,
   projection: Projection,
 ): Dimension[] {
-  if (view.name === "free") return [];
-  const { low, high } = box(mesh);
+  if (view.name === 'free') return [];
+  const { low, high } = extent;
   const edge = (axis: Axis, at: Vec3, offset: [number, number]): Dimension => {
     const from = [...at] as [number, number, number];
     const to = [...at] as [number, number, number];
@@ -37,37 +37,17 @@ export function dimensionsOf(
   const [x0, y0, z0] = low;
   const [x1, , z1] = high;
   switch (view.name) {
-    case "side":
-      return [
-        edge(0, [x0, y0, z0], [0, off]),
-        edge(2, [x0, y0, z0], [-off, 0]),
-      ];
-    case "end":
-      return [
-        edge(1, [x1, y0, z0], [0, off]),
-        edge(2, [x1, y0, z0], [-off, 0]),
-      ];
-    case "plan":
-      return [
-        edge(0, [x0, y0, z1], [0, off]),
-        edge(1, [x0, y0, z1], [-off, 0]),
-      ];
-    case "away":
+    case 'side':
+      return [edge(0, [x0, y0, z0], [0, off]), edge(2, [x0, y0, z0], [-off, 0])];
+    case 'end':
+      return [edge(1, [x1, y0, z0], [0, off]), edge(2, [x1, y0, z0], [-off, 0])];
+    case 'plan':
+      return [edge(0, [x0, y0, z1], [0, off]), edge(1, [x0, y0, z1], [-off, 0])];
+    case 'away':
       return [
         edge(0, [x0, y0, z0], [0, off]),
         edge(2, [x0, y0, z0], [-off, 0]),
         edge(1, [x1, y0, z0], [14, 18]),
       ];
   }
-}
-
-function box(mesh: TankMesh): { low: Vec3; high: Vec3 } {
-  const low: [number, number, number] = [Infinity, Infinity, Infinity];
-  const high: [number, number, number] = [-Infinity, -Infinity, -Infinity];
-  mesh.positions.forEach((value, index) => {
-    const axis = (index % 3) as Axis;
-    low[axis] = Math.min(low[axis], value);
-    high[axis] = Math.max(high[axis], value);
-  });
-  return { low, high };
 }
