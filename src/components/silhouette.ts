@@ -1,6 +1,7 @@
 import type { TankDocument } from '~/domain/tank/document';
 import type { Solid } from '~/domain/tank/kinds/registry';
 import { highestLevel, placedSolid } from '~/domain/tank/placed-solid';
+import type { Vec3 } from '~/domain/tank/solid';
 
 /** A tank from its side or its end, mm, x to the right and y down, as paths of its solids. */
 export interface SilhouetteDrawing {
@@ -16,6 +17,8 @@ type Point = readonly [number, number];
 interface Outline {
   role: Solid['role'];
   points: readonly Point[];
+  /** Lowest and highest coordinate along the line of sight. */
+  sight: readonly [number, number];
 }
 
 /** Directions in which each solid is felt: right angles and 45° among them, so that boxes stay sharp. */
@@ -25,7 +28,8 @@ const cells = 24;
 /**
  * The small picture of a tank: every solid's outline, exact for flat faces at whole degrees and
  * within a thousandth of its size otherwise, from the kinds' support functions (all of them convex).
- * Of side and end the one that fills less of its frame, which is the one that tells more.
+ * Of side and end the one that fills less of its frame, which is the one that tells more; only what
+ * is cut right through along the line of sight counts as not filled.
  */
 export function silhouetteOf(design: TankDocument): SilhouetteDrawing {
   const [side, end] = [0, 1].map((axis) => view(design.solids, axis as 0 | 1)) as [View, View];
@@ -56,7 +60,7 @@ interface View {
 
 /** `across`: the axis that runs to the right, 0 = x (from the side), 1 = y (from the end). */
 function view(solids: readonly Solid[], across: 0 | 1): View {
-  const outlines = solids.map((solid) => ({ role: solid.role, points: outlineOf(solid, across) }));
+  const outlines = solids.map((solid) => outlineOf(solid, across));
   const all = outlines.filter(({ role }) => role === 'holds').flatMap(({ points }) => points);
   const xs = all.map(([x]) => x);
   const ys = all.map(([, y]) => y);
@@ -66,7 +70,7 @@ function view(solids: readonly Solid[], across: 0 | 1): View {
 }
 
 /** Where neighbouring tangents meet: the corners, each once. */
-function outlineOf(solid: Solid, across: 0 | 1): Point[] {
+function outlineOf(solid: Solid, across: 0 | 1): Outline {
   const placed = placedSolid(solid);
   const lines = Array.from({ length: directions }, (_, i) => {
     const angle = (2 * Math.PI * i) / directions;
@@ -83,18 +87,27 @@ function outlineOf(solid: Solid, across: 0 | 1): Point[] {
     // y runs down on the drawing
     if (last === undefined || Math.hypot(last[0] - x, last[1] + z) > 1e-6) points.push([x, -z]);
   });
-  return points;
+  const away: Vec3 = across === 0 ? [0, 1, 0] : [1, 0, 0];
+  const towards: Vec3 = across === 0 ? [0, -1, 0] : [-1, 0, 0];
+  return { role: solid.role, points, sight: [-highestLevel(placed, towards), highestLevel(placed, away)] };
 }
 
 function filledShare(outlines: readonly Outline[], frame: Frame): number {
+  const held = outlines.filter(({ role }) => role === 'holds');
+  const low = Math.min(...held.map(({ sight }) => sight[0]));
+  const high = Math.max(...held.map(({ sight }) => sight[1]));
+  const slack = 0.01 * (high - low);
+  const cuts = outlines.filter(
+    ({ role, sight }) => role === 'displaces' && sight[0] <= low + slack && sight[1] >= high - slack,
+  );
   let count = 0;
   for (let i = 0; i < cells * cells; i += 1) {
     const point: Point = [
       frame.minX + (((i % cells) + 0.5) / cells) * frame.width,
       frame.minY + ((Math.floor(i / cells) + 0.5) / cells) * frame.height,
     ];
-    const inside = (role: Solid['role']) => outlines.some((o) => o.role === role && contains(o.points, point));
-    if (inside('holds') && !inside('displaces')) count += 1;
+    const inside = (some: readonly Outline[]) => some.some(({ points }) => contains(points, point));
+    if (inside(held) && !inside(cuts)) count += 1;
   }
   return count / (cells * cells);
 }

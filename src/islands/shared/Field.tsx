@@ -79,9 +79,9 @@ function Beside({ id, fault, hint }: { id: string; fault: string | undefined; hi
         </p>
       )}
       {hint && (
-        <p id={`${id}-hint`} className="label mt-1">
+        <div id={`${id}-hint`} className="label mt-1">
           {hint}
-        </p>
+        </div>
       )}
     </>
   );

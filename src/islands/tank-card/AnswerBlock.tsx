@@ -25,12 +25,12 @@ export function AnswerBlock({ answer, settings, unit }: { answer: Answer; settin
       </p>
       <ul className="mt-4 grid gap-1">
         {waste ? (
-          <Figure figure={volume(answer.usableL)} unit={sign} name={usableName} />
+          <Figure figure={volume(answer.volumeL)} unit={sign} name="in the tank" />
         ) : (
           <Figure figure={volume(answer.roomL)} unit={sign} name="room to safe fill" />
         )}
         <Figure figure={kilograms} unit="kg" name="in the tank" />
-        <Figure figure={volume(answer.volumeL)} unit={sign} name="total, unusable too" />
+        {!waste && settings.outletMm !== null && <Figure figure={volume(answer.volumeL)} unit={sign} name="total, unusable too" />}
       </ul>
       {answer.aboveSafeFillL > 0 && (
         <p className="fault mt-3">

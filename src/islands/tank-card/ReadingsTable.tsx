@@ -12,7 +12,9 @@ export function ReadingsTable({ readings, units }: { readings: readonly Reading[
       <table className="drawn-table">
         <thead>
           <tr>
-            <th scope="col">when</th>
+            <th scope="col" className="sticky left-0 bg-film">
+              when
+            </th>
             <th scope="col" className="figure">
               depth, {units.length}
             </th>
@@ -25,12 +27,12 @@ export function ReadingsTable({ readings, units }: { readings: readonly Reading[
         <tbody>
           {readings.map((reading) => (
             <tr key={reading.id}>
-              <td>
+              <td className="sticky left-0 bg-film">
                 <Moment at={reading.at} />
               </td>
               <td className="figure">{formatLength(reading.depthMm, units.length)}</td>
               <td className="figure">{formatVolume(reading.usableL, units.volume, reading.plusMinusL)}</td>
-              <td>
+              <td className="whitespace-nowrap">
                 {reading.by}, {reading.revision}
               </td>
             </tr>

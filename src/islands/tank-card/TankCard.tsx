@@ -1,4 +1,5 @@
 import { useMemo, useState } from 'react';
+import { liquids } from '~/domain/liquid/liquids';
 import type { Reading } from '~/domain/reading/reading';
 import { answerAt, safeFillMm, type DipTable } from '~/domain/table/answer-at';
 import { curveFromRows } from '~/domain/table/curve';
@@ -52,8 +53,9 @@ export function TankCard(props: TankCardProps) {
       setText(formatLength(next === 'depth' ? dip.depthMm : revision.heightMm - dip.depthMm, units.length));
     }
   };
+  const waste = liquids[settings.liquid].watch === 'high';
   const spoken = answer
-    ? `${formatLengthWithUnit(answer.depthMm, units.length)}, ${formatVolume(answer.usableL, units.volume, answer.plusMinusL)} ${volumeUnitSigns[units.volume]} usable`
+    ? `${formatLengthWithUnit(answer.depthMm, units.length)}, ${formatVolume(waste ? answer.roomL : answer.usableL, units.volume, answer.plusMinusL)} ${volumeUnitSigns[units.volume]} ${waste ? 'room' : 'usable'}`
     : 'nothing read yet';
 
   return (

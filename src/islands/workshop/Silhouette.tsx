@@ -13,7 +13,7 @@ export function Silhouette({ drawing, className }: { drawing: SilhouetteDrawing;
   const id = useId();
   const { hatchMm: h } = drawing;
   return (
-    <svg viewBox={drawing.viewBox} className={className} preserveAspectRatio="xMidYMid meet" aria-hidden="true">
+    <svg viewBox={drawing.viewBox} className={className} preserveAspectRatio="xMidYMid meet" strokeLinejoin="round" aria-hidden="true">
       <defs>
         <pattern id={`${id}h`} width={h} height={h} patternUnits="userSpaceOnUse" patternTransform="rotate(45)">
           <path d={`M0 0V${h}`} className="stroke-ink-2" strokeWidth={h / 6} />
@@ -25,10 +25,10 @@ export function Silhouette({ drawing, className }: { drawing: SilhouetteDrawing;
         </clipPath>
       </defs>
       {drawing.holds.map((d) => (
-        <path key={d} d={d} className="fill-none stroke-ink" strokeWidth="3" vectorEffect="non-scaling-stroke" />
+        <path key={d} d={d} className="fill-none stroke-ink" strokeWidth="3.4" vectorEffect="non-scaling-stroke" />
       ))}
       {drawing.holds.map((d) => (
-        <path key={d} d={d} className="fill-wash stroke-wash" strokeWidth="0.5" vectorEffect="non-scaling-stroke" />
+        <path key={d} d={d} className="fill-wash stroke-wash" strokeWidth="1.2" vectorEffect="non-scaling-stroke" />
       ))}
       <g clipPath={`url(#${id}c)`}>
         {drawing.displaces.map((d) => (

@@ -23,7 +23,7 @@ export function StartingPointChoice({
   return (
     <fieldset aria-describedby={fault ? `${id}-fault` : undefined}>
       <legend className="label">Begin from</legend>
-      <ul className="mt-1 grid grid-cols-2 gap-2 sm:grid-cols-3 lg:grid-cols-6">
+      <ul className="mt-1 grid grid-cols-2 gap-2 sm:grid-cols-3 lg:grid-cols-5">
         {shapes.map(({ code, label, words, drawing }, index) => (
           <li key={code}>
             <label className="flex h-full flex-col gap-2 rounded border border-hair p-3 has-checked:border-ink has-checked:bg-wash has-focus-visible:outline-2 has-focus-visible:outline-offset-2 has-focus-visible:outline-ink">
