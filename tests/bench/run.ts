@@ -1,0 +1,126 @@
+import Module from 'manifold-3d';
+import { loadManifold, spaceOf } from '~/geometry/manifold';
+import { enclosedVolume } from '~/geometry/mesh';
+import { sweep } from '~/geometry/sweep';
+import { computePreview } from '~/domain/table/compute-preview';
+import { computeTable } from '~/domain/table/compute-table';
+import type { TankDocument } from '~/domain/tank/document';
+import { startingPoints } from '~/domain/tank/starting-points';
+import { placedShape, placedSolid } from '~/domain/tank/placed-solid';
+
+/**
+ * npm run bench: what the engine costs, measured against the mesh library's own way (cut off what is above,
+ * ask for the volume) on the same mesh in the same run. Exits 1 when a limit is missed.
+ */
+const rows = 400;
+const facets = 128;
+const wantedRatio = 100;
+const wantedPreviewMs = 50;
+
+const cylinderOnBox: TankDocument = {
+  format: 'dipwright-tank',
+  version: 1,
+  name: 'Cylinder with a box through its top and a column in it',
+  solids: [
+    { id: 'barrel', role: 'holds', kind: 'cylinder', diameter: 1400, length: 2400 },
+    { id: 'box', role: 'holds', kind: 'box', length: 900, width: 800, height: 1200, at: [950, 400, 600] },
+    { id: 'column', role: 'displaces', kind: 'cylinder', diameter: 300, length: 1900, axis: 'z', at: [300, 500, -50] },
+  ],
+  attitude: { pitch: 3, roll: 2 },
+};
+
+await loadManifold();
+let missed = 0;
+
+console.log(`A table of ${rows} rows, build included, at ${facets} facets a turn`);
+for (const design of [startingPoints.find(({ code }) => code === 'lying-cylinder')!.design, cylinderOnBox]) {
+  const solids = design.solids.map(placedSolid);
+  const shapes = (role: string) =>
+    solids.filter(({ solid }) => solid.role === role).map((one) => placedShape(one, facets));
+  const [holds, displaces] = [shapes('holds'), shapes('displaces')];
+
+  const ours = quickest(9, () => {
+    const mesh = spaceOf(holds, displaces, [0, 0, 0]);
+    return sweep(mesh, [0, 0, 1], levelsOf(mesh.positions)).volume;
+  });
+  const mesh = spaceOf(holds, displaces, [0, 0, 0]);
+  const theirs = await cutRowByRow(mesh, levelsOf(mesh.positions));
+  const ratio = theirs.ms / ours.ms;
+  const whole = enclosedVolume(mesh);
+  const gap = Math.max(...ours.result.map((volume, row) => Math.abs(volume - theirs.volumes[row]!))) / whole;
+  if (ratio < wantedRatio) missed += 1;
+  console.log(
+    `  ${design.name}: ${mesh.triangles.length / 3} triangles, ours ${ours.ms.toFixed(2)} ms, cut row by row ` +
+      `${theirs.ms.toFixed(0)} ms, ratio ${ratio.toFixed(0)} (wanted ${wantedRatio}); they differ by ${gap.toExponential(1)} of the whole`,
+  );
+}
+
+console.log('A live preview, warm');
+for (const { label, design } of startingPoints) {
+  let slowest = 0;
+  const times: number[] = [];
+  for (let run = 0; run < 15; run += 1) {
+    const start = performance.now();
+    await computePreview(design);
+    const ms = performance.now() - start;
+    if (run >= 5) times.push(ms);
+    slowest = Math.max(...times);
+  }
+  times.sort((a, b) => a - b);
+  const median = times[times.length >> 1]!;
+  if (median > wantedPreviewMs) missed += 1;
+  console.log(`  ${label}: median ${median.toFixed(1)} ms, slowest of ten ${slowest.toFixed(1)} ms (wanted ${wantedPreviewMs})`);
+}
+
+console.log('A published table at 1 mm (N and 2N, bound), warm');
+for (const design of [...startingPoints.map((one) => one.design), cylinderOnBox]) {
+  await computeTable(design, { stepMm: 1 });
+  const start = performance.now();
+  const { rows: made, triangles, errorL, capacityL } = await computeTable(design, { stepMm: 1 });
+  const ms = performance.now() - start;
+  console.log(
+    `  ${design.name}: ${made.length} rows, ${triangles} triangles, ${ms.toFixed(0)} ms, bound ${(errorL / capacityL).toExponential(1)} of capacity`,
+  );
+}
+process.exitCode = missed > 0 ? 1 : 0;
+
+function levelsOf(positions: Float64Array): Float64Array {
+  let low = Infinity;
+  let high = -Infinity;
+  for (let i = 2; i < positions.length; i += 3) {
+    low = Math.min(low, positions[i]!);
+    high = Math.max(high, positions[i]!);
+  }
+  return Float64Array.from({ length: rows }, (_, i) => low + ((high - low) * (i + 1)) / (rows + 1));
+}
+
+function quickest<T>(runs: number, work: () => T): { ms: number; result: T } {
+  let ms = Infinity;
+  let result = work();
+  for (let run = 0; run < runs; run += 1) {
+    const start = performance.now();
+    result = work();
+    ms = Math.min(ms, performance.now() - start);
+  }
+  return { ms, result };
+}
+
+/** The library's own way; building the mesh is not even counted. */
+async function cutRowByRow(mesh: { positions: Float64Array; triangles: Uint32Array }, levels: Float64Array) {
+  const library = await Module();
+  library.setup();
+  const { Manifold, Mesh } = library;
+  const solid = Manifold.ofMesh(
+    new Mesh({ numProp: 3, vertProperties: Float32Array.from(mesh.positions), triVerts: mesh.triangles }),
+  );
+  const start = performance.now();
+  const volumes = Array.from(levels, (level) => {
+    const wet = solid.trimByPlane([0, 0, -1], -level);
+    const volume = wet.volume();
+    wet.delete();
+    return volume;
+  });
+  const ms = performance.now() - start;
+  solid.delete();
+  return { ms, volumes };
+}
