@@ -17,7 +17,7 @@ export const mostCharacters = 80;
 const mostNodes = 60;
 
 /** Only these characters can belong to arithmetic with units; all else is refused before parsing. */
-const readable = /^[\d.+\-*/() a-z³]*$/i;
+const readable = /^[\d.+\-*/() a-z]*$/i;
 
 /**
  * mathjs only parses here: its tree is copied node by node into ours, and its evaluation is never

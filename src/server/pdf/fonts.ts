@@ -1,5 +1,6 @@
 import { createRequire } from 'node:module';
 import { dirname, join } from 'node:path';
+import PDFDocument from 'pdfkit';
 
 /** Faces of Source Sans 3 that prints use, embedded as subsets. */
 export const faces = {
@@ -10,10 +11,26 @@ export const faces = {
 } as const;
 export type Face = keyof typeof faces;
 
+type OpenedFont = PDFKit.Mixins.PDFFontSource;
+let opened: Map<string, OpenedFont> | undefined;
+
 /** Registers the faces by name. The files come from the installed package, also when this code is bundled. */
 export function registerFaces(document: PDFKit.PDFDocument): void {
+  opened ??= openFaces();
+  for (const [name, font] of opened) document.registerFont(name, font);
+}
+
+/**
+ * Reading the tables of a face takes longer than drawing a page with it, so every face is opened once
+ * for all prints. A document takes an opened font as its source and makes its own subset of it.
+ */
+function openFaces(): Map<string, OpenedFont> {
   const folder = dirname(createRequire(import.meta.url).resolve('source-sans/package.json'));
-  for (const [name, file] of Object.entries(faces)) {
-    document.registerFont(name, join(folder, 'TTF', file));
-  }
+  const opener = new PDFDocument({ autoFirstPage: false });
+  return new Map(
+    Object.entries(faces).map(([name, file]) => {
+      opener.font(join(folder, 'TTF', file));
+      return [name, (opener as unknown as { _font: { font: OpenedFont } })._font.font];
+    }),
+  );
 }
