@@ -5,6 +5,7 @@ import tailwindcss from '@tailwindcss/vite';
 import { defineConfig, passthroughImageService } from 'astro/config';
 import { computeWorkerBuild } from './src/commands/build/compute-worker-build.mjs';
 import { precompress } from './src/commands/build/precompress.mjs';
+import { schemasWithoutEval } from './src/commands/build/schemas-without-eval.mjs';
 import { serverEntryPlugin } from './src/commands/build/server-entry-plugin.mjs';
 
 // docs/decisions/0200 and 0201 say why our own entry stands in front and how the CSP is made.
@@ -13,7 +14,7 @@ export default defineConfig({
   // npm start and npm test give each build a folder of its own beside this one.
   outDir: './dist/by-hand',
   adapter: node({ mode: 'middleware' }),
-  integrations: [react(), computeWorkerBuild(), precompress()],
+  integrations: [react(), schemasWithoutEval(), computeWorkerBuild(), precompress()],
   security: {
     // server/http judges Origin and Sec-Fetch-Site for every kind of body. This check knows only
     // 127.0.0.1 and localhost, and would refuse a DELETE under any other name.
