@@ -4,8 +4,8 @@ import { z } from 'zod/v4';
 export const depthAnswer = z.object({
   depthMm: z.number(),
   volumeL: z.number(),
-  /** null where the free surface has no width, as at the edge of a keel. */
-  plusMinusMm: z.number().nullable(),
+  /** How far the reading moves when the litres move by their ±. */
+  plusMinusMm: z.number(),
   /** Letter of the revision that says so. */
   revision: z.string(),
   current: z.boolean(),

@@ -2,7 +2,11 @@ import { requirePermission } from '~/domain/access/permissions';
 import type { TankDocument } from '~/domain/tank/document';
 import type { Actor, Context } from '../context';
 import { currentRevisions } from '../database/repositories/revisions';
-import { draftDesigns, handedOverAmong, plusMinusAtTop } from '../database/repositories/tank-overviews';
+import {
+  draftDesigns,
+  handedOverAmong,
+  plusMinusAtTop,
+} from '../database/repositories/tank-overviews';
 import { listTankRecords } from '../database/repositories/tanks';
 import { scopeOf } from './scope-of';
 
@@ -16,7 +20,10 @@ export interface TankOverview {
 }
 
 /** By tank; for members who may read drafts. */
-export async function listTankOverviews(context: Context, actor: Actor): Promise<Map<string, TankOverview>> {
+export async function listTankOverviews(
+  context: Context,
+  actor: Actor,
+): Promise<Map<string, TankOverview>> {
   requirePermission(actor.role, 'design.read');
   const scope = scopeOf(context, actor);
   const ids = (await listTankRecords(scope)).map(({ id }) => id);

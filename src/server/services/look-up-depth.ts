@@ -1,5 +1,5 @@
 import { requirePermission } from '~/domain/access/permissions';
-import { depthAt } from '~/domain/table/curve';
+import { depthAt, type Curve } from '~/domain/table/curve';
 import type { DepthAnswer } from '~/domain/table/depth-answer';
 import type { Actor, Context } from '../context';
 import { listRows } from '../database/repositories/strapping-rows';
@@ -18,15 +18,24 @@ export async function lookUpDepth(
   const { revision, current } = await revisionInSight(scope, actor, input.revisionId);
   const table = askable(revision, current, await listRows(scope, revision.id));
   const depthMm = depthAt(table.curve, input.volumeL);
-  const { surfaceCm2, plusMinusL } = lookUpAt(table, depthMm);
-  // dV/dreading: 1 cm² × 1 mm = 1e-4 L
-  const litresPerMm = surfaceCm2 * 1e-4 * revision.levelPerReading;
+  const { plusMinusL } = lookUpAt(table, depthMm);
   return {
     depthMm,
     volumeL: input.volumeL,
-    // where the surface has no width, no ± of litres says anything of the depth
-    plusMinusMm: litresPerMm > 0 ? plusMinusL / litresPerMm : null,
+    plusMinusMm: depthSpread(table.curve, depthMm, input.volumeL, plusMinusL),
     revision: revision.letter,
     current,
   };
+}
+
+/**
+ * How far the reading moves when the litres move by their ±, the larger of up and down, mm. Through
+ * the curve rather than its slope, which is nothing at the edge of a keel; inside the table.
+ */
+function depthSpread(curve: Curve, depthMm: number, volumeL: number, plusMinusL: number): number {
+  const least = curve.volumeL[0]!;
+  const most = curve.volumeL[curve.volumeL.length - 1]!;
+  const higher = depthAt(curve, Math.min(volumeL + plusMinusL, most)) - depthMm;
+  const lower = depthMm - depthAt(curve, Math.max(volumeL - plusMinusL, least));
+  return Math.max(higher, lower);
 }

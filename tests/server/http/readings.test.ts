@@ -1,8 +1,8 @@
 import { afterAll, beforeAll, expect, it } from 'vitest';
 import type { Team } from '../../../db/seeds/add-workshop';
 import { addDraft, addIssuedTank, type Made } from '../support/add-tank';
-import { callApi, signInAs } from '../support/call-api';
-import { addTestWorkshop, openHouse, password, type House } from '../support/house';
+import { callApi, cookieOf } from '../support/call-api';
+import { addTestWorkshop, openHouse, type House } from '../support/house';
 
 let house: House;
 let team: Team;
@@ -12,7 +12,7 @@ beforeAll(async () => {
   house = await openHouse();
   team = await addTestWorkshop(house);
   made = await addIssuedTank(house, team);
-  cookie = await signInAs(house, team.owner.email, password);
+  cookie = await cookieOf(house, team.owner);
 });
 afterAll(() => house.drop());
 
@@ -105,7 +105,7 @@ it('refuses a time that cannot be', async () => {
 
 it('says that a tank without a table has no litres', async () => {
   const { tank } = await addDraft(house, team);
-  const fitters = await signInAs(house, team.fitter.email, password);
+  const fitters = await cookieOf(house, team.fitter);
   const response = await callApi(house, 'POST', `/api/v1/tanks/${tank.id}/readings`, {
     cookie: fitters,
     json: dip,

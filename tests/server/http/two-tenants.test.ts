@@ -5,8 +5,8 @@ import { recordReading } from '~/server/services/record-reading';
 import type { Team } from '../../../db/seeds/add-workshop';
 import { addDraft, addIssuedTank, type Made } from '../support/add-tank';
 import { boxDesign } from '../support/box-design';
-import { callApi, signInAs, type Sent } from '../support/call-api';
-import { addTestWorkshop, openHouse, password, type House } from '../support/house';
+import { callApi, cookieOf, type Sent } from '../support/call-api';
+import { addTestWorkshop, openHouse, type House } from '../support/house';
 
 let house: House;
 let ours: Team;
@@ -27,8 +27,8 @@ beforeAll(async () => {
     idempotencyKey: 'one',
     reading: { at: '2026-11-30T08:15:00Z', depthMm: 100, note: 'Secret note' },
   });
-  cookie = await signInAs(house, theirs.manager.email, password);
-  ownersCookie = await signInAs(house, ours.owner.email, password);
+  cookie = await cookieOf(house, theirs.manager);
+  ownersCookie = await cookieOf(house, ours.owner);
 });
 afterAll(() => house.drop());
 
@@ -98,7 +98,7 @@ it('a tank cannot be put into an installation of another workshop', async () => 
 });
 
 it('a tank cannot be handed over to somebody of another workshop', async () => {
-  const fitters = await signInAs(house, ours.fitter.email, password);
+  const fitters = await cookieOf(house, ours.fitter);
   const path = `/api/v1/tanks/${made.tank.id}/handovers`;
   const response = await callApi(house, 'POST', path, { cookie: fitters, json: { userId: theirs.owner.userId } });
   expect(response.status).toBe(422);

@@ -1,4 +1,5 @@
 import type { APIContext, APIRoute } from 'astro';
+import type { Actor } from '~/domain/access/actor';
 import { newId } from '~/server/database/new-id';
 import { ownOrigin, type House } from './house';
 
@@ -67,4 +68,9 @@ export async function signInAs(house: House, email: string, password: string): P
   const response = await callApi(house, 'POST', '/api/v1/session', { json: { email, password } });
   if (response.status !== 204) throw new Error(`Signing in as ${email} gave ${response.status}.`);
   return response.headers.get('set-cookie')!.split(';')[0]!;
+}
+
+/** The Cookie header of a session of theirs, begun without a password. */
+export async function cookieOf(house: House, actor: Actor): Promise<string> {
+  return (await house.context.sessions.begin(actor)).split(';')[0]!;
 }
