@@ -27,18 +27,13 @@ export function chartFigures(
   const atBrim = levels.at(heightMm).plusMinusL;
   const atSafeFill = levels.safeFillMm === null ? atBrim : levels.at(levels.safeFillMm).plusMinusL;
   const atOutlet = levels.outletMm === null ? 0 : levels.at(levels.outletMm).plusMinusL;
-  const brim = figure(
-    'Brim, computed',
-    levels.capacityL,
-    atBrim,
-    `${digits.mass(massOf(levels, levels.capacityL))} kg when full`,
-  );
+  const brim = figure('Brim, computed', levels.capacityL, atBrim, weightWhenFull(levels, digits));
   const safe = figure(
     `Safe fill, ${settings.safeFillPercent} % of brim`,
     levels.safeFillL,
     atSafeFill,
     levels.safeFillMm === null
-      ? 'above the stick'
+      ? 'above the reach of the stick'
       : `stop at ${markReading(levels.safeFillMm, options.length, 'down')}`,
   );
   const unusable =
@@ -66,6 +61,7 @@ export function chartFigures(
     : [brim, safe, unusable, usable];
 }
 
-function massOf({ densityKgPerM3 }: ChartLevels, litres: number): number {
-  return (litres * densityKgPerM3) / 1000;
+function weightWhenFull({ densityKgPerM3, capacityL }: ChartLevels, digits: ChartDigits): string {
+  const kg = (densityKgPerM3 * capacityL) / 1000;
+  return Number.isFinite(kg) ? `${digits.mass(kg)} kg when full` : 'weight not known';
 }

@@ -1,3 +1,4 @@
+import { densityOf } from '../table/answer-at';
 import { liquids } from '../liquid/liquids';
 import { formatLength } from '../units/format-length';
 import { mmPerInch, type LengthUnit } from '../units/length-unit';
@@ -25,7 +26,10 @@ const supply: readonly ChartColumn['key'][] = [
   'mass',
 ];
 
-/** Columns: where full is the emergency, the room left stands first. */
+/**
+ * Columns: where full is the emergency, the room left stands first. Without a density there are no
+ * kilograms.
+ */
 export function chartColumns({ settings, options }: ChartInput): ChartColumn[] {
   const heads: Record<ChartColumn['key'], string> = {
     depth: options.length,
@@ -36,7 +40,8 @@ export function chartColumns({ settings, options }: ChartInput): ChartColumn[] {
     mass: 'kg',
   };
   const keys = liquids[settings.liquid].watch === 'high' ? waste : supply;
-  return keys.map((key) => ({ key, head: heads[key] }));
+  const weighed = Number.isFinite(densityOf(settings));
+  return keys.filter((key) => key !== 'mass' || weighed).map((key) => ({ key, head: heads[key] }));
 }
 
 /**
@@ -66,7 +71,7 @@ export function chartRows(
       plusMinus: digits.plusMinus(answer.plusMinusL),
       usable: digits.volume(answer.usableL),
       room: over ? 'over' : digits.volume(answer.roomL),
-      mass: digits.mass(answer.massKg),
+      mass: Number.isFinite(answer.massKg) ? digits.mass(answer.massKg) : '',
     };
     return {
       depthMm,
@@ -87,11 +92,11 @@ export function decimalsOf(stepMm: number, unit: LengthUnit): number {
   return unit === 'cm' && !isMultiple(stepMm, 10) ? 1 : 0;
 }
 
-/** Rows from one strong row to the next: five, or as many as an inch has. */
+/** Rows from one strong row to the next: five, or a whole inch or more. */
 export function rowGroup(input: ChartInput): number {
   if (input.options.length !== 'in') return 5;
   const perInch = Math.round(mmPerInch / stepOf(input));
-  return perInch > 1 ? perInch : 4;
+  return perInch > 2 ? perInch : 4;
 }
 
 function stepOf({ options, heightMm }: ChartInput): number {

@@ -218,7 +218,7 @@ describe('words of the print', () => {
     expect(report.rows.at(-1)?.cells[0]).toBe('top');
     expect(report.rows[0]?.cells.slice(0, 2)).toEqual(['0', '2.0']);
     expect(report.box.find(({ label }) => label.startsWith('Safe fill'))?.detail).toBe(
-      'above the stick',
+      'above the reach of the stick',
     );
   });
 
@@ -248,6 +248,32 @@ describe('words of the print', () => {
       design: { ...input.design, wall: { thickness: 6, sizes: 'outside' } },
     });
     expect(words(report)).toMatch(/Computed from outside sizes less the wall/);
+  });
+});
+
+describe('a liquid of no known density', () => {
+  it('has no kilograms, and the print says so', () => {
+    const base = vHullInput();
+    const report = buildChart({ ...base, settings: { ...base.settings, liquid: 'other' } });
+    expect(report.columns.map(({ key }) => key)).not.toContain('mass');
+    expect(report.rows.every(({ cells }) => cells.length === report.columns.length)).toBe(true);
+    expect(report.box[0]?.detail).toBe('weight not known');
+    expect(words(report)).toMatch(/Kilograms are not known/);
+  });
+});
+
+describe('strong rows', () => {
+  it.each([
+    ['mm', 10, 5],
+    ['in', 3.175, 8],
+    ['in', 6.35, 4],
+    ['in', 12.7, 4],
+    ['in', 25.4, 4],
+  ] as const)('%s by %d mm: every %d rows', (length, stepMm, group) => {
+    const report = buildChart(vHullInput({ options: options({ length, stepMm }) }));
+    expect(report.rowGroup).toBe(group);
+    const strong = report.rows.findIndex((row) => row.strong);
+    expect(strong).toBe(group - 1);
   });
 });
 
