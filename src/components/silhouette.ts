@@ -37,9 +37,12 @@ export function silhouetteOf(design: TankDocument): SilhouetteDrawing {
   const { frame, outlines } = chosen;
   const size = Math.max(frame.width, frame.height);
   const pad = size * 0.03;
-  const paths = (role: Solid['role']) => outlines.filter((o) => o.role === role).map((o) => pathOf(o.points));
+  const paths = (role: Solid['role']) =>
+    outlines.filter((o) => o.role === role).map((o) => pathOf(o.points));
   return {
-    viewBox: [frame.minX - pad, frame.minY - pad, frame.width + 2 * pad, frame.height + 2 * pad].map(short).join(' '),
+    viewBox: [frame.minX - pad, frame.minY - pad, frame.width + 2 * pad, frame.height + 2 * pad]
+      .map(short)
+      .join(' '),
     hatchMm: size / 16,
     holds: paths('holds'),
     displaces: paths('displaces'),
@@ -89,7 +92,11 @@ function outlineOf(solid: Solid, across: 0 | 1): Outline {
   });
   const away: Vec3 = across === 0 ? [0, 1, 0] : [1, 0, 0];
   const towards: Vec3 = across === 0 ? [0, -1, 0] : [-1, 0, 0];
-  return { role: solid.role, points, sight: [-highestLevel(placed, towards), highestLevel(placed, away)] };
+  return {
+    role: solid.role,
+    points,
+    sight: [-highestLevel(placed, towards), highestLevel(placed, away)],
+  };
 }
 
 function filledShare(outlines: readonly Outline[], frame: Frame): number {
@@ -98,7 +105,8 @@ function filledShare(outlines: readonly Outline[], frame: Frame): number {
   const high = Math.max(...held.map(({ sight }) => sight[1]));
   const slack = 0.01 * (high - low);
   const cuts = outlines.filter(
-    ({ role, sight }) => role === 'displaces' && sight[0] <= low + slack && sight[1] >= high - slack,
+    ({ role, sight }) =>
+      role === 'displaces' && sight[0] <= low + slack && sight[1] >= high - slack,
   );
   let count = 0;
   for (let i = 0; i < cells * cells; i += 1) {

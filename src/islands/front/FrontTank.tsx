@@ -45,16 +45,23 @@ export function FrontTank({ signedIn }: { signedIn: boolean }) {
         <HullSizesFields sizes={sizes} onSizes={setSizes} />
         {preview && fault && <p className="fault">{fault}</p>}
         <div>
-          <button type="button" className="act min-h-11 w-full text-lead sm:w-auto" disabled={!awake} onClick={modelYourOwn}>
+          <button
+            type="button"
+            className="act min-h-11 w-full text-lead sm:w-auto"
+            disabled={!awake}
+            onClick={modelYourOwn}
+          >
             Model your own
           </button>
           <p className="label mt-2">
-            {signedIn ? 'This hull comes along as a draft.' : 'This hull comes along; the account takes a minute.'}
+            {signedIn
+              ? 'This hull comes along as a draft.'
+              : 'This hull comes along; the account takes a minute.'}
           </p>
           {uncarried && (
             <p role="alert" className="fault mt-2">
-              This browser keeps nothing, so the hull cannot come along. <a href="/sign-up">Open a workshop</a> and
-              choose “V hull” there.
+              This browser keeps nothing, so the hull cannot come along.{' '}
+              <a href="/sign-up">Open a workshop</a> and choose “V hull” there.
             </p>
           )}
         </div>
@@ -67,7 +74,15 @@ function useCurve(preview: Preview) {
   return useMemo(() => curveFromRows(preview.rows, preview.frame.levelPerReading), [preview]);
 }
 
-function DrawnTank({ preview, share, onShare }: { preview: Preview; share: number; onShare(share: number): void }) {
+function DrawnTank({
+  preview,
+  share,
+  onShare,
+}: {
+  preview: Preview;
+  share: number;
+  onShare(share: number): void;
+}) {
   const prefix = useId();
   const box = useRef<HTMLDivElement>(null);
   const width = useWidth(box);
@@ -118,7 +133,10 @@ function DrawnTank({ preview, share, onShare }: { preview: Preview; share: numbe
               prefix={prefix}
             />
           </div>
-          <div className="absolute" style={{ left: plate.width + 8, top: plate.railTop - stickMarginPx }}>
+          <div
+            className="absolute"
+            style={{ left: plate.width + 8, top: plate.railTop - stickMarginPx }}
+          >
             <Stick
               heightMm={heightMm}
               curve={curve}
@@ -134,7 +152,13 @@ function DrawnTank({ preview, share, onShare }: { preview: Preview; share: numbe
               grip={narrow}
             />
           </div>
-          <WetLine width={plate.width + stickPx} height={plate.height} end={plate.width - 2} y={y} reading={`${formatNumber(readingMm, 0)} mm`} />
+          <WetLine
+            width={plate.width + stickPx}
+            height={plate.height}
+            end={plate.width - 2}
+            y={y}
+            reading={`${formatNumber(readingMm, 0)} mm`}
+          />
         </>
       )}
     </div>
@@ -142,7 +166,13 @@ function DrawnTank({ preview, share, onShare }: { preview: Preview; share: numbe
 }
 
 /** One straight line through the liquid and the stick, with what was read on it. */
-function WetLine(props: { width: number; height: number; end: number; y: number; reading: string }) {
+function WetLine(props: {
+  width: number;
+  height: number;
+  end: number;
+  y: number;
+  reading: string;
+}) {
   const { y, end } = props;
   return (
     <svg
@@ -153,7 +183,12 @@ function WetLine(props: { width: number; height: number; end: number; y: number;
     >
       <path d={`M0 ${y}H${props.width - 4}`} className="stroke-datum" strokeWidth="1.75" />
       <path d={`M${end - 68} ${y - 11}h58l10 11l-10 11h-58z`} className="fill-datum" />
-      <text x={end - 36} y={y + 5} textAnchor="middle" className="fill-sheet text-base font-semibold">
+      <text
+        x={end - 36}
+        y={y + 5}
+        textAnchor="middle"
+        className="fill-sheet text-base font-semibold"
+      >
         {props.reading}
       </text>
     </svg>
@@ -170,14 +205,15 @@ function Litres({ preview, share }: { preview: Preview; share: number }) {
   return (
     <div>
       <p className="text-huge font-bold whitespace-nowrap">
-        {formatVolume(litres, 'l', plusMinusL)} <span className="text-[0.5em] font-semibold">L</span>
+        {formatVolume(litres, 'l', plusMinusL)}{' '}
+        <span className="text-[0.5em] font-semibold">L</span>
       </p>
       <p className="mt-1 text-lead">
         in the tank, ± {formatPlusMinus(plusMinusL, 'l')} for a dip read to ± {dipPlusMinusMm} mm
       </p>
       <p className="mt-3 text-lead font-semibold">
-        {formatNumber(share * 100, 0)} % of the stick is {formatNumber((litres / preview.capacityL) * 100, 0)} % of the
-        tank.
+        {formatNumber(share * 100, 0)} % of the stick is{' '}
+        {formatNumber((litres / preview.capacityL) * 100, 0)} % of the tank.
       </p>
       <p className="text-ink-2">Brim, computed: {formatNumber(preview.capacityL, 1)} L</p>
     </div>

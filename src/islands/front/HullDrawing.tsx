@@ -28,7 +28,10 @@ export function HullDrawing({
   prefix: string;
 }) {
   const { space, frame } = preview;
-  const projection = useMemo(() => project(space, frame, { name: 'away' }, plate), [space, frame, plate]);
+  const projection = useMemo(
+    () => project(space, frame, { name: 'away' }, plate),
+    [space, frame, plate],
+  );
   const lines = useMemo(() => linesOf(edgesOf(space), projection), [space, projection]);
   const level = levelOfReading(frame, readingMm);
   const outlet = levelOfReading(frame, Math.min(unusableMm, readingMm));
@@ -38,7 +41,12 @@ export function HullDrawing({
   const headroom =
     safeFillMm === null
       ? []
-      : facesBetween(space, frame.up, levelOfReading(frame, Math.max(safeFillMm, readingMm)), Infinity);
+      : facesBetween(
+          space,
+          frame.up,
+          levelOfReading(frame, Math.max(safeFillMm, readingMm)),
+          Infinity,
+        );
   const d = (polygons: readonly Vec3[][]) => filled(polygons, projection);
   return (
     <svg width={plate.width} height={plate.height} aria-hidden="true" className="block">
@@ -48,8 +56,19 @@ export function HullDrawing({
       <path d={d(wet) + d(surface)} className="fill-wash" />
       <path d={d(unusable)} fill={`url(#${prefix}-unusable)`} />
       <path d={lines.hidden} className="stroke-line" strokeWidth="0.75" fill="none" />
-      <path d={outlined(surface, projection)} className="stroke-datum" strokeWidth="1.25" fill="none" />
-      <path d={lines.seen} className="stroke-ink" strokeWidth="1.75" strokeLinecap="round" fill="none" />
+      <path
+        d={outlined(surface, projection)}
+        className="stroke-datum"
+        strokeWidth="1.25"
+        fill="none"
+      />
+      <path
+        d={lines.seen}
+        className="stroke-ink"
+        strokeWidth="1.75"
+        strokeLinecap="round"
+        fill="none"
+      />
     </svg>
   );
 }
@@ -62,13 +81,19 @@ function linesOf(edges: EdgeList, projection: Projection): { seen: string; hidde
   edges.crease.forEach((crease, e) => {
     const looks = [0, 3].map((k) => {
       const i = 6 * e + k;
-      return edges.normals[i]! * tx + edges.normals[i + 1]! * ty + edges.normals[i + 2]! * tz > 1e-9;
+      return (
+        edges.normals[i]! * tx + edges.normals[i + 1]! * ty + edges.normals[i + 2]! * tz > 1e-9
+      );
     });
     const outline = looks[0] !== looks[1];
     if (crease === 0 && !outline) return;
     const end = (k: number): string => {
       const i = 6 * e + k;
-      return point(projection, [edges.segments[i]!, edges.segments[i + 1]!, edges.segments[i + 2]!]);
+      return point(projection, [
+        edges.segments[i]!,
+        edges.segments[i + 1]!,
+        edges.segments[i + 2]!,
+      ]);
     };
     (outline || looks[0] ? seen : hidden).push(`M${end(0)}L${end(3)}`);
   });

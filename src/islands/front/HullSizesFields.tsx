@@ -14,14 +14,25 @@ const fields = [
 const [leastMm, mostMm] = [50, 5000];
 
 /** The three inside sizes of the hull, typed as people write them. */
-export function HullSizesFields({ sizes, onSizes }: { sizes: HullSizes; onSizes(sizes: HullSizes): void }) {
+export function HullSizesFields({
+  sizes,
+  onSizes,
+}: {
+  sizes: HullSizes;
+  onSizes(sizes: HullSizes): void;
+}) {
   const awake = useAwake();
   return (
     <fieldset disabled={!awake}>
       <legend className="label">Inside sizes, mm: change one</legend>
       <div className="grid grid-cols-3 gap-4">
         {fields.map(({ key, label }) => (
-          <SizeField key={key} label={label} mm={sizes[key]} onMm={(mm) => onSizes({ ...sizes, [key]: mm })} />
+          <SizeField
+            key={key}
+            label={label}
+            mm={sizes[key]}
+            onMm={(mm) => onSizes({ ...sizes, [key]: mm })}
+          />
         ))}
       </div>
     </fieldset>

@@ -5,7 +5,10 @@ import { createPreviewClient, type PreviewClient } from '~/workers/preview-clien
 import { asProblem } from '../shared/problem';
 
 /** The latest computed preview of a design; the last good one stands while the next is computed. */
-export function usePreview(design: TankDocument): { preview: Preview | null; fault: string | null } {
+export function usePreview(design: TankDocument): {
+  preview: Preview | null;
+  fault: string | null;
+} {
   const client = useRef<PreviewClient | null>(null);
   const [preview, setPreview] = useState<Preview | null>(null);
   const [fault, setFault] = useState<string | null>(null);

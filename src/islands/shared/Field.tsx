@@ -19,7 +19,13 @@ export function Field<In extends FieldValues, Out>({
       <label htmlFor={id} className="label block">
         {label}
       </label>
-      <input {...input} {...of.form.register(name)} id={id} className="typed" {...described(id, fault, hint)} />
+      <input
+        {...input}
+        {...of.form.register(name)}
+        id={id}
+        className="typed"
+        {...described(id, fault, hint)}
+      />
       <Beside id={id} fault={fault} hint={hint} />
     </div>
   );

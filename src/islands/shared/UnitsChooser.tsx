@@ -15,7 +15,9 @@ export function UnitsChooser({ person }: { person: string }) {
         <select
           className="typed text-base"
           value={units.length}
-          onChange={(event) => change({ length: event.target.value as (typeof lengthUnits)[number] })}
+          onChange={(event) =>
+            change({ length: event.target.value as (typeof lengthUnits)[number] })
+          }
         >
           {lengthUnits.map((unit) => (
             <option key={unit} value={unit}>
@@ -29,7 +31,9 @@ export function UnitsChooser({ person }: { person: string }) {
         <select
           className="typed text-base"
           value={units.volume}
-          onChange={(event) => change({ volume: event.target.value as (typeof volumeUnits)[number] })}
+          onChange={(event) =>
+            change({ volume: event.target.value as (typeof volumeUnits)[number] })
+          }
         >
           {volumeUnits.map((unit) => (
             <option key={unit} value={unit}>

@@ -39,7 +39,9 @@ const valueOf = async <T>(answered: Promise<Answered<T>>): Promise<T> => (await 
 export const signIn = (body: SignIn) => valueOf(call('/session', { method: 'POST', body }));
 export const signOut = () => valueOf(call('/session', { method: 'DELETE' }));
 export const signUp = (body: SignUp) =>
-  valueOf(call('/workshops', { method: 'POST', body, answer: z.object({ workshopId: z.string() }) }));
+  valueOf(
+    call('/workshops', { method: 'POST', body, answer: z.object({ workshopId: z.string() }) }),
+  );
 export const readMe = () => valueOf(call('/me', { answer: me }));
 export const listMembers = () => valueOf(call('/members', { answer: z.array(member) }));
 
@@ -105,7 +107,8 @@ export const recordReading = (id: string, body: NewReading, idempotencyKey: stri
   );
 
 export const compute = (
-  body: { design: TankDocument; stepMm: number } | { design: TankDocument; atMm: readonly number[] },
+  body:
+    { design: TankDocument; stepMm: number } | { design: TankDocument; atMm: readonly number[] },
   signal?: AbortSignal,
 ) =>
   valueOf(

@@ -19,7 +19,10 @@ export interface Answered<T> {
  * One call of `/api/v1`: JSON in, checked JSON out, refusals thrown as `ApiProblem`. Only api.ts
  * uses it. Aborting rejects with the browser's own AbortError, which react-query expects.
  */
-export async function call<T = undefined>(path: string, options: Call<T> = {}): Promise<Answered<T>> {
+export async function call<T = undefined>(
+  path: string,
+  options: Call<T> = {},
+): Promise<Answered<T>> {
   const response = await send(path, options);
   if (!response.ok) throw await problemFrom(response);
   const etag = response.headers.get('etag');
@@ -35,7 +38,10 @@ export async function call<T = undefined>(path: string, options: Call<T> = {}): 
   return { value: parsed.data, etag };
 }
 
-async function send<T>(path: string, { method = 'GET', body, headers, signal }: Call<T>): Promise<Response> {
+async function send<T>(
+  path: string,
+  { method = 'GET', body, headers, signal }: Call<T>,
+): Promise<Response> {
   try {
     return await fetch(`/api/v1${path}`, {
       method,

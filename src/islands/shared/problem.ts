@@ -47,7 +47,8 @@ export async function problemFrom(response: Response): Promise<ApiProblem> {
   return new ApiProblem({
     code: text(body['code']) ?? 'unknown',
     status: response.status,
-    message: text(body['detail']) ?? text(body['title']) ?? `The server answered with ${response.status}.`,
+    message:
+      text(body['detail']) ?? text(body['title']) ?? `The server answered with ${response.status}.`,
     faults: faultsOf(body['errors']),
     facts: Object.fromEntries(Object.entries(body).filter(([key]) => !known.has(key))),
     requestId: text(body['requestId']),
@@ -59,7 +60,8 @@ export function unreachable(): ApiProblem {
   return new ApiProblem({
     code: 'unreachable',
     status: 0,
-    message: 'No answer from the server. What you typed is still here: try again when you have signal.',
+    message:
+      'No answer from the server. What you typed is still here: try again when you have signal.',
   });
 }
 

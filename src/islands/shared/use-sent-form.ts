@@ -1,6 +1,12 @@
 import { zodResolver } from '@hookform/resolvers/zod';
 import { useId, useState } from 'react';
-import { useForm, type DefaultValues, type FieldValues, type Path, type UseFormReturn } from 'react-hook-form';
+import {
+  useForm,
+  type DefaultValues,
+  type FieldValues,
+  type Path,
+  type UseFormReturn,
+} from 'react-hook-form';
 import type { z } from 'zod/v4';
 import { asProblem } from './problem';
 
@@ -56,10 +62,14 @@ export function useSentForm<In extends FieldValues, Out, Answer>(options: {
     } catch (error) {
       const problem = asProblem(error);
       const nameOf = options.fieldOf ?? ((pointer: string) => pointer.slice(1));
-      const placed = problem.faults.map(({ pointer, detail }) => ({ name: nameOf(pointer), detail }));
+      const placed = problem.faults.map(({ pointer, detail }) => ({
+        name: nameOf(pointer),
+        detail,
+      }));
       const loose = placed.filter(({ name }) => !names.includes(name)).map(({ detail }) => detail);
       for (const { name, detail } of placed) {
-        if (names.includes(name)) form.setError(name as Path<In>, { type: 'server', message: detail });
+        if (names.includes(name))
+          form.setError(name as Path<In>, { type: 'server', message: detail });
       }
       setGeneral(placed.length === 0 ? [problem.message] : loose);
       setFailures((count) => count + 1);

@@ -15,8 +15,21 @@ export function SignIn({ next }: { next: string }) {
   return (
     <form onSubmit={sent.submit} noValidate className="grid gap-5" aria-label="Sign in">
       <FaultSummary faults={sent.faults} failures={sent.failures} />
-      <Field of={sent} name="email" label="E-mail" type="email" autoComplete="username" inputMode="email" />
-      <Field of={sent} name="password" label="Password" type="password" autoComplete="current-password" />
+      <Field
+        of={sent}
+        name="email"
+        label="E-mail"
+        type="email"
+        autoComplete="username"
+        inputMode="email"
+      />
+      <Field
+        of={sent}
+        name="password"
+        label="Password"
+        type="password"
+        autoComplete="current-password"
+      />
       <div>
         <button className="act" disabled={sent.sending}>
           {sent.sending ? 'Signing in…' : 'Sign in'}

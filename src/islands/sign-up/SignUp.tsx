@@ -19,7 +19,8 @@ export function SignUp() {
 function SignUpForm({ draft }: { draft: CarriedDraft | null }) {
   const sent = useSentForm({
     schema: signUp.extend({
-      installationName: draft === null ? newInstallation.shape.name.optional() : newInstallation.shape.name,
+      installationName:
+        draft === null ? newInstallation.shape.name.optional() : newInstallation.shape.name,
     }),
     defaults: {
       workshopName: '',
@@ -45,7 +46,14 @@ function SignUpForm({ draft }: { draft: CarriedDraft | null }) {
         hint="The firm, as it shall stand on your charts."
       />
       <Field of={sent} name="name" label="Your name" autoComplete="name" />
-      <Field of={sent} name="email" label="E-mail" type="email" autoComplete="username" inputMode="email" />
+      <Field
+        of={sent}
+        name="email"
+        label="E-mail"
+        type="email"
+        autoComplete="username"
+        inputMode="email"
+      />
       <Field
         of={sent}
         name="password"

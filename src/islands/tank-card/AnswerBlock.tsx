@@ -9,7 +9,15 @@ import { volumeUnitSigns, type VolumeUnit } from '~/domain/units/volume-unit';
  * The answer to a dip, the biggest thing on the page: usable litres, or the room left where a full
  * tank is the emergency. Every figure under its own name.
  */
-export function AnswerBlock({ answer, settings, unit }: { answer: Answer; settings: TankSettings; unit: VolumeUnit }) {
+export function AnswerBlock({
+  answer,
+  settings,
+  unit,
+}: {
+  answer: Answer;
+  settings: TankSettings;
+  unit: VolumeUnit;
+}) {
   const waste = liquids[settings.liquid].watch === 'high';
   const sign = volumeUnitSigns[unit];
   const volume = (litres: number) => formatVolume(litres, unit, answer.plusMinusL);
@@ -18,7 +26,8 @@ export function AnswerBlock({ answer, settings, unit }: { answer: Answer; settin
   return (
     <div aria-live="polite">
       <p data-testid="answer" className="text-answer font-bold whitespace-nowrap sm:text-huge">
-        {volume(waste ? answer.roomL : answer.usableL)} <span className="text-[0.5em] font-semibold">{sign}</span>
+        {volume(waste ? answer.roomL : answer.usableL)}{' '}
+        <span className="text-[0.5em] font-semibold">{sign}</span>
       </p>
       <p className="mt-1 text-lead">
         {waste ? 'room to safe fill' : usableName}, ± {formatPlusMinus(answer.plusMinusL, unit)}
@@ -30,7 +39,9 @@ export function AnswerBlock({ answer, settings, unit }: { answer: Answer; settin
           <Figure figure={volume(answer.roomL)} unit={sign} name="room to safe fill" />
         )}
         <Figure figure={kilograms} unit="kg" name="in the tank" />
-        {!waste && settings.outletMm !== null && <Figure figure={volume(answer.volumeL)} unit={sign} name="total, unusable too" />}
+        {!waste && settings.outletMm !== null && (
+          <Figure figure={volume(answer.volumeL)} unit={sign} name="total, unusable too" />
+        )}
       </ul>
       {answer.aboveSafeFillL > 0 && (
         <p className="fault mt-3">

@@ -50,7 +50,12 @@ export function DipField(props: {
   );
 }
 
-function Means(props: { value: DipMeans; chosen: DipMeans; text: string; onChoose(means: DipMeans): void }) {
+function Means(props: {
+  value: DipMeans;
+  chosen: DipMeans;
+  text: string;
+  onChoose(means: DipMeans): void;
+}) {
   return (
     <label className="flex min-h-8 items-center gap-1.5 whitespace-nowrap">
       <input

@@ -18,19 +18,30 @@ export function ReadingsBlock({ readings, units }: { readings: Readings; units: 
                 <span>
                   {formatLengthWithUnit(reading.depthMm, units.length)}, <Moment at={reading.at} />
                 </span>
-                <button type="button" className="act-text min-h-8" onClick={() => readings.drop(key)}>
+                <button
+                  type="button"
+                  className="act-text min-h-8"
+                  onClick={() => readings.drop(key)}
+                >
                   Drop it
                 </button>
               </li>
             ))}
           </ul>
-          <button type="button" className="act-plain mt-2" disabled={readings.sending} onClick={readings.sendAgain}>
+          <button
+            type="button"
+            className="act-plain mt-2"
+            disabled={readings.sending}
+            onClick={readings.sendAgain}
+          >
             Send again
           </button>
         </div>
       )}
       {readings.kept.length === 0 ? (
-        <p className="text-ink-2">None yet. Dip the tank, type the depth and keep it: two dated readings show the use.</p>
+        <p className="text-ink-2">
+          None yet. Dip the tank, type the depth and keep it: two dated readings show the use.
+        </p>
       ) : (
         <ReadingsTable readings={readings.kept.slice(0, 8)} units={units} />
       )}

@@ -6,7 +6,13 @@ import { Moment } from '../shared/Moment';
 import type { UnitsPreference } from '../shared/units-preference';
 
 /** Kept readings, latest first, in one person's units. */
-export function ReadingsTable({ readings, units }: { readings: readonly Reading[]; units: UnitsPreference }) {
+export function ReadingsTable({
+  readings,
+  units,
+}: {
+  readings: readonly Reading[];
+  units: UnitsPreference;
+}) {
   return (
     <div className="overflow-x-auto" tabIndex={0} role="region" aria-label="Readings">
       <table className="drawn-table">
@@ -31,7 +37,9 @@ export function ReadingsTable({ readings, units }: { readings: readonly Reading[
                 <Moment at={reading.at} />
               </td>
               <td className="figure">{formatLength(reading.depthMm, units.length)}</td>
-              <td className="figure">{formatVolume(reading.usableL, units.volume, reading.plusMinusL)}</td>
+              <td className="figure">
+                {formatVolume(reading.usableL, units.volume, reading.plusMinusL)}
+              </td>
               <td className="whitespace-nowrap">
                 {reading.by}, {reading.revision}
               </td>

@@ -45,12 +45,23 @@ export function TankCard(props: TankCardProps) {
   const answer = dip.is === 'read' ? answerAt(table, dip.depthMm) : null;
 
   const drag = (depthMm: number) =>
-    setText(formatLength(means === 'depth' ? depthMm : revision.heightMm - depthMm, units.length, dragDecimals[units.length]));
+    setText(
+      formatLength(
+        means === 'depth' ? depthMm : revision.heightMm - depthMm,
+        units.length,
+        dragDecimals[units.length],
+      ),
+    );
   const switchMeans = (next: DipMeans) => {
     setMeans(next);
     // the liquid did not move: the same level, measured the other way
     if (dip.is === 'read' && next !== means) {
-      setText(formatLength(next === 'depth' ? dip.depthMm : revision.heightMm - dip.depthMm, units.length));
+      setText(
+        formatLength(
+          next === 'depth' ? dip.depthMm : revision.heightMm - dip.depthMm,
+          units.length,
+        ),
+      );
     }
   };
   const waste = liquids[settings.liquid].watch === 'high';
@@ -62,7 +73,14 @@ export function TankCard(props: TankCardProps) {
     <div className="grid gap-8 lg:grid-cols-2 lg:gap-16">
       <div className="grid grid-cols-[minmax(0,1fr)_auto] gap-x-3">
         <div className="grid content-start gap-6">
-          <DipField text={text} means={means} unit={units.length} dip={dip} onText={setText} onMeans={switchMeans} />
+          <DipField
+            text={text}
+            means={means}
+            unit={units.length}
+            dip={dip}
+            onText={setText}
+            onMeans={switchMeans}
+          />
           {answer ? (
             <AnswerBlock answer={answer} settings={settings} unit={units.volume} />
           ) : (
@@ -94,13 +112,16 @@ export function TankCard(props: TankCardProps) {
               className="act min-h-13 w-full text-lead"
               disabled={answer === null || readings.sending}
               onClick={() => {
-                if (answer) void readings.keep({ at: new Date().toISOString(), depthMm: answer.depthMm });
+                if (answer)
+                  void readings.keep({ at: new Date().toISOString(), depthMm: answer.depthMm });
               }}
             >
               {readings.sending ? 'Sending…' : 'Keep this reading'}
             </button>
             <p role="status" className="mt-2 min-h-6">
-              {readings.said && <span className={readings.said.ok ? '' : 'fault'}>{readings.said.text}</span>}
+              {readings.said && (
+                <span className={readings.said.ok ? '' : 'fault'}>{readings.said.text}</span>
+              )}
             </p>
           </div>
         )}

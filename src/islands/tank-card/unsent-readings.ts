@@ -12,7 +12,9 @@ const keyOf = (tankId: string): string => `dipwright.unsent-readings.${tankId}`;
 
 export function unsentReadings(tankId: string): UnsentReading[] {
   try {
-    const parsed = z.array(unsentReading).safeParse(JSON.parse(localStorage.getItem(keyOf(tankId)) ?? '[]'));
+    const parsed = z
+      .array(unsentReading)
+      .safeParse(JSON.parse(localStorage.getItem(keyOf(tankId)) ?? '[]'));
     return parsed.success ? parsed.data : [];
   } catch {
     return [];

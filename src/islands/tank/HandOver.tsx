@@ -14,7 +14,11 @@ interface Owner {
 }
 
 /** Who sees this tank, and one more owner to hand it over to. */
-export function HandOver(props: { tankId: string; owners: readonly Owner[]; handovers: readonly Handover[] }) {
+export function HandOver(props: {
+  tankId: string;
+  owners: readonly Owner[];
+  handovers: readonly Handover[];
+}) {
   const [handovers, setHandovers] = useState(props.handovers);
   const left = props.owners.filter(({ id }) => !handovers.some(({ userId }) => userId === id));
   return (
@@ -23,16 +27,21 @@ export function HandOver(props: { tankId: string; owners: readonly Owner[]; hand
         <ul>
           {handovers.map((one) => (
             <li key={one.userId} className="border-b border-hair py-2">
-              <strong className="font-semibold">{one.name}</strong> since <Moment at={one.handedOverAt} withTime={false} />
+              <strong className="font-semibold">{one.name}</strong> since{' '}
+              <Moment at={one.handedOverAt} withTime={false} />
               <span className="label"> by {one.handedOverBy}</span>
             </li>
           ))}
         </ul>
       )}
       {props.owners.length === 0 && (
-        <p className="text-ink-2">The workshop has no member with the role owner yet, so there is nobody to hand over to.</p>
+        <p className="text-ink-2">
+          The workshop has no member with the role owner yet, so there is nobody to hand over to.
+        </p>
       )}
-      {props.owners.length > 0 && left.length === 0 && <p className="text-ink-2">Every owner of the workshop sees it.</p>}
+      {props.owners.length > 0 && left.length === 0 && (
+        <p className="text-ink-2">Every owner of the workshop sees it.</p>
+      )}
       {left.length > 0 && (
         <HandOverForm
           key={left.map(({ id }) => id).join()}
@@ -45,7 +54,11 @@ export function HandOver(props: { tankId: string; owners: readonly Owner[]; hand
   );
 }
 
-function HandOverForm(props: { tankId: string; owners: readonly Owner[]; onDone(handovers: readonly Handover[]): void }) {
+function HandOverForm(props: {
+  tankId: string;
+  owners: readonly Owner[];
+  onDone(handovers: readonly Handover[]): void;
+}) {
   const awake = useAwake();
   const sent = useSentForm({
     schema: newHandover,

@@ -9,10 +9,22 @@ const papers = [
 ];
 
 /** The chart of one revision as a download, in the units and on the paper that this person last chose. */
-export function PaperChoice({ revisionId, letter, person }: { revisionId: string; letter: string; person: string }) {
+export function PaperChoice({
+  revisionId,
+  letter,
+  person,
+}: {
+  revisionId: string;
+  letter: string;
+  person: string;
+}) {
   const awake = useAwake();
   const [units, change] = useUnitsPreference(person);
-  const query = new URLSearchParams({ paper: units.paper, length: units.length, volume: units.volume });
+  const query = new URLSearchParams({
+    paper: units.paper,
+    length: units.length,
+    volume: units.volume,
+  });
   const set = (key: keyof UnitsPreference) => (value: string) => change({ [key]: value });
   return (
     <div className="grid max-w-2xl gap-5">
@@ -33,7 +45,11 @@ export function PaperChoice({ revisionId, letter, person }: { revisionId: string
         />
       </fieldset>
       <p>
-        <a className="act" href={`/api/v1/revisions/${encodeURIComponent(revisionId)}/chart.pdf?${query}`} download>
+        <a
+          className="act"
+          href={`/api/v1/revisions/${encodeURIComponent(revisionId)}/chart.pdf?${query}`}
+          download
+        >
           Print the chart of {letter} (PDF)
         </a>
       </p>
@@ -50,7 +66,11 @@ function Picked(props: {
   return (
     <label className="label">
       {props.label}
-      <select className="typed text-base" value={props.value} onChange={(event) => props.onPick(event.target.value)}>
+      <select
+        className="typed text-base"
+        value={props.value}
+        onChange={(event) => props.onPick(event.target.value)}
+      >
         {props.options.map(({ value, text }) => (
           <option key={value} value={value}>
             {text}

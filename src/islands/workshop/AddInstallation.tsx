@@ -16,12 +16,24 @@ export function AddInstallation() {
     schema: newInstallation,
     defaults: { name: '', kind: 'vehicle' },
     send: createInstallation,
-    done: ({ id }) => window.location.assign(`/home?installation=${encodeURIComponent(id)}#new-tank`),
+    done: ({ id }) =>
+      window.location.assign(`/home?installation=${encodeURIComponent(id)}#new-tank`),
   });
   return (
-    <form onSubmit={sent.submit} noValidate className="grid max-w-md gap-5" aria-label="Add an installation">
+    <form
+      onSubmit={sent.submit}
+      noValidate
+      className="grid max-w-md gap-5"
+      aria-label="Add an installation"
+    >
       <FaultSummary faults={sent.faults} failures={sent.failures} />
-      <Field of={sent} name="name" label="Name" hint="As people call it: “Service van 3”, “Workboat Skua”." autoComplete="off" />
+      <Field
+        of={sent}
+        name="name"
+        label="Name"
+        hint="As people call it: “Service van 3”, “Workboat Skua”."
+        autoComplete="off"
+      />
       <Choice of={sent} name="kind" label="It is a" options={kinds} />
       <div>
         <button className="act" disabled={sent.sending}>

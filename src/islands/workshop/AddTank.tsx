@@ -25,7 +25,12 @@ export function AddTank(props: Props) {
   return <AddTankForm key={carried === null ? 'plain' : 'carried'} {...props} carried={carried} />;
 }
 
-function AddTankForm({ installations, chosen, shapes, carried }: Props & { carried: CarriedDraft | null }) {
+function AddTankForm({
+  installations,
+  chosen,
+  shapes,
+  carried,
+}: Props & { carried: CarriedDraft | null }) {
   const sent = useSentForm({
     schema: newTankForm,
     defaults: {
@@ -41,14 +46,18 @@ function AddTankForm({ installations, chosen, shapes, carried }: Props & { carri
       return tank;
     },
     done: ({ id }) => window.location.assign(`/tanks/${encodeURIComponent(id)}/bench`),
-    fieldOf: (pointer) => (pointer.startsWith('/design') ? 'startingPoint' : pointer.split('/').at(-1)!),
+    fieldOf: (pointer) =>
+      pointer.startsWith('/design') ? 'startingPoint' : pointer.split('/').at(-1)!,
   });
   const liquid = useWatch({ control: sent.form.control, name: 'liquid' });
   const hull = shapes.find(({ code }) => code === 'v-hull');
   const offered =
     carried === null || hull === undefined
       ? shapes
-      : [{ ...hull, code: carriedCode, label: 'Your hull', words: 'from the front page' }, ...shapes];
+      : [
+          { ...hull, code: carriedCode, label: 'Your hull', words: 'from the front page' },
+          ...shapes,
+        ];
   return (
     <form onSubmit={sent.submit} noValidate className="grid gap-5" aria-label="Add a tank">
       <FaultSummary faults={sent.faults} failures={sent.failures} />
@@ -59,7 +68,13 @@ function AddTankForm({ installations, chosen, shapes, carried }: Props & { carri
           label="Fitted in"
           options={installations.map(({ id, name }) => ({ value: id, text: name }))}
         />
-        <Field of={sent} name="name" label="Name" hint="Where it sits tells it from its twin: “Port diesel tank”." autoComplete="off" />
+        <Field
+          of={sent}
+          name="name"
+          label="Name"
+          hint="Where it sits tells it from its twin: “Port diesel tank”."
+          autoComplete="off"
+        />
         <Choice
           of={sent}
           name="liquid"
@@ -68,7 +83,14 @@ function AddTankForm({ installations, chosen, shapes, carried }: Props & { carri
           hint={<NoGas />}
         />
         {liquids[liquid].densityKgPerM3 === null && (
-          <Field of={sent} name="densityKgPerM3" label="Density, kg/m³" inputMode="decimal" hint="Fresh water is 998, diesel about 840." autoComplete="off" />
+          <Field
+            of={sent}
+            name="densityKgPerM3"
+            label="Density, kg/m³"
+            inputMode="decimal"
+            hint="Fresh water is 998, diesel about 840."
+            autoComplete="off"
+          />
         )}
       </div>
       <StartingPointChoice of={sent} shapes={offered} />

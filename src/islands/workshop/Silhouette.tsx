@@ -9,13 +9,31 @@ export interface SilhouetteDrawing {
 }
 
 /** A tank small, in ink: what holds liquid as one outline, what displaces it hatched. */
-export function Silhouette({ drawing, className }: { drawing: SilhouetteDrawing; className?: string }) {
+export function Silhouette({
+  drawing,
+  className,
+}: {
+  drawing: SilhouetteDrawing;
+  className?: string;
+}) {
   const id = useId();
   const { hatchMm: h } = drawing;
   return (
-    <svg viewBox={drawing.viewBox} className={className} preserveAspectRatio="xMidYMid meet" strokeLinejoin="round" aria-hidden="true">
+    <svg
+      viewBox={drawing.viewBox}
+      className={className}
+      preserveAspectRatio="xMidYMid meet"
+      strokeLinejoin="round"
+      aria-hidden="true"
+    >
       <defs>
-        <pattern id={`${id}h`} width={h} height={h} patternUnits="userSpaceOnUse" patternTransform="rotate(45)">
+        <pattern
+          id={`${id}h`}
+          width={h}
+          height={h}
+          patternUnits="userSpaceOnUse"
+          patternTransform="rotate(45)"
+        >
           <path d={`M0 0V${h}`} className="stroke-ink-2" strokeWidth={h / 6} />
         </pattern>
         <clipPath id={`${id}c`}>
@@ -25,16 +43,34 @@ export function Silhouette({ drawing, className }: { drawing: SilhouetteDrawing;
         </clipPath>
       </defs>
       {drawing.holds.map((d) => (
-        <path key={d} d={d} className="fill-none stroke-ink" strokeWidth="3.4" vectorEffect="non-scaling-stroke" />
+        <path
+          key={d}
+          d={d}
+          className="fill-none stroke-ink"
+          strokeWidth="3.4"
+          vectorEffect="non-scaling-stroke"
+        />
       ))}
       {drawing.holds.map((d) => (
-        <path key={d} d={d} className="fill-wash stroke-wash" strokeWidth="1.2" vectorEffect="non-scaling-stroke" />
+        <path
+          key={d}
+          d={d}
+          className="fill-wash stroke-wash"
+          strokeWidth="1.2"
+          vectorEffect="non-scaling-stroke"
+        />
       ))}
       <g clipPath={`url(#${id}c)`}>
         {drawing.displaces.map((d) => (
           <g key={d}>
             <path d={d} className="fill-sheet" />
-            <path d={d} fill={`url(#${id}h)`} className="stroke-ink" strokeWidth="1" vectorEffect="non-scaling-stroke" />
+            <path
+              d={d}
+              fill={`url(#${id}h)`}
+              className="stroke-ink"
+              strokeWidth="1"
+              vectorEffect="non-scaling-stroke"
+            />
           </g>
         ))}
       </g>

@@ -21,7 +21,11 @@ export const newTankForm = z
     if (liquids[liquid].densityKgPerM3 !== null) return;
     const parsed = tankSettings.shape.densityKgPerM3.unwrap().safeParse(numberOf(densityKgPerM3));
     if (!parsed.success) {
-      context.addIssue({ code: 'custom', path: ['densityKgPerM3'], message: parsed.error.issues[0]!.message });
+      context.addIssue({
+        code: 'custom',
+        path: ['densityKgPerM3'],
+        message: parsed.error.issues[0]!.message,
+      });
     }
   });
 export type NewTankForm = z.output<typeof newTankForm>;

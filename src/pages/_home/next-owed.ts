@@ -32,6 +32,7 @@ export function nextOwed(tank: Tank, handedOver: boolean, role: Role): Owed | nu
     return { words, href: `${page}/bench` };
   }
   if (state === 'draft-only') return null;
-  if (!handedOver && may(role, 'tank.hand-over')) return { words: 'hand over', href: `${page}#hand-over` };
+  if (!handedOver && may(role, 'tank.hand-over'))
+    return { words: 'hand over', href: `${page}#hand-over` };
   return handedOver ? null : { words: 'print the chart', href: `${page}#paper` };
 }

@@ -5,9 +5,12 @@ import { facesBetween, surfaceLoops } from '~/islands/front/slice-mesh';
 
 /** The unit cube × 100, outward. */
 const cube: TankMesh = {
-  positions: Float64Array.from([0, 0, 0, 100, 0, 0, 100, 100, 0, 0, 100, 0, 0, 0, 100, 100, 0, 100, 100, 100, 100, 0, 100, 100]),
+  positions: Float64Array.from([
+    0, 0, 0, 100, 0, 0, 100, 100, 0, 0, 100, 0, 0, 0, 100, 100, 0, 100, 100, 100, 100, 0, 100, 100,
+  ]),
   triangles: Uint32Array.from([
-    0, 2, 1, 0, 3, 2, 4, 5, 6, 4, 6, 7, 0, 1, 5, 0, 5, 4, 1, 2, 6, 1, 6, 5, 2, 3, 7, 2, 7, 6, 3, 0, 4, 3, 4, 7,
+    0, 2, 1, 0, 3, 2, 4, 5, 6, 4, 6, 7, 0, 1, 5, 0, 5, 4, 1, 2, 6, 1, 6, 5, 2, 3, 7, 2, 7, 6, 3, 0,
+    4, 3, 4, 7,
   ]),
 };
 const up: Vec3 = [0, 0, 1];
@@ -46,7 +49,12 @@ function area3(polygon: readonly Vec3[]): number {
   for (let i = 1; i + 1 < polygon.length; i += 1) {
     const u = polygon[i]!.map((v, k) => v - a![k]!);
     const v = polygon[i + 1]!.map((w, k) => w - a![k]!);
-    sum += Math.hypot(u[1]! * v[2]! - u[2]! * v[1]!, u[2]! * v[0]! - u[0]! * v[2]!, u[0]! * v[1]! - u[1]! * v[0]!) / 2;
+    sum +=
+      Math.hypot(
+        u[1]! * v[2]! - u[2]! * v[1]!,
+        u[2]! * v[0]! - u[0]! * v[2]!,
+        u[0]! * v[1]! - u[1]! * v[0]!,
+      ) / 2;
   }
   return sum;
 }

@@ -10,7 +10,10 @@ afterEach(() => fetch.mockReset());
 
 const design = startingPoints[0]!.design;
 const refused = async (work: Promise<unknown>): Promise<ApiProblem> => {
-  const error: unknown = await work.then(() => null, (thrown: unknown) => thrown);
+  const error: unknown = await work.then(
+    () => null,
+    (thrown: unknown) => thrown,
+  );
   expect(error).toBeInstanceOf(ApiProblem);
   return error as ApiProblem;
 };
@@ -28,7 +31,9 @@ describe('calls of the API', () => {
 
   it('reads the draft with its entity tag and gives it back when saving', async () => {
     fetch.mockResolvedValueOnce(
-      new Response(JSON.stringify(design), { headers: { 'content-type': 'application/json', etag: '"7"' } }),
+      new Response(JSON.stringify(design), {
+        headers: { 'content-type': 'application/json', etag: '"7"' },
+      }),
     );
     const { value, etag } = await readDesign('t1');
     expect([value, etag]).toEqual([design, '"7"']);
@@ -43,7 +48,10 @@ describe('calls of the API', () => {
         code: 'precondition-failed',
         detail: 'Idris Vaughan saved first.',
         requestId: 'r1',
-        errors: [{ pointer: '/solids/0/length', detail: 'A length is more than 0 mm.' }, { detail: 'no pointer' }],
+        errors: [
+          { pointer: '/solids/0/length', detail: 'A length is more than 0 mm.' },
+          { detail: 'no pointer' },
+        ],
         etag: '"8"',
         savedBy: 'Idris Vaughan',
       }),
@@ -62,7 +70,9 @@ describe('calls of the API', () => {
   it('says in a sentence that no answer came, or one that nobody can read', async () => {
     fetch.mockRejectedValueOnce(new TypeError('Failed to fetch'));
     expect(await refused(signOut())).toMatchObject({ code: 'unreachable', status: 0 });
-    fetch.mockResolvedValueOnce(new Response('<html>', { status: 502, headers: { 'content-type': 'text/html' } }));
+    fetch.mockResolvedValueOnce(
+      new Response('<html>', { status: 502, headers: { 'content-type': 'text/html' } }),
+    );
     const error = await refused(signOut());
     expect(error).toMatchObject({ code: 'unreadable', status: 502 });
     expect(error.message).toMatch(/^The server answered with 502/);

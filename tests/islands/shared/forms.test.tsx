@@ -35,7 +35,9 @@ describe('forms', () => {
   });
 
   it('shows a refusal without a field in the summary and keeps what was typed', async () => {
-    fetch.mockResolvedValueOnce(problem(401, { code: 'unauthenticated', detail: 'Address or password is wrong.' }));
+    fetch.mockResolvedValueOnce(
+      problem(401, { code: 'unauthenticated', detail: 'Address or password is wrong.' }),
+    );
     render(<SignIn next="/home" />);
     type('E-mail', 'fitter@tarnside.example');
     type('Password', 'wrong');

@@ -25,11 +25,25 @@ it('makes the carried hull a tank of the new workshop and leads to its bench', a
     sizePlusMinusMm: 2,
     dipPlusMinusMm: 2,
   };
-  const tank = { id: 't1', installationId: 'i1', installationName: 'Skua', name: 'V hull', settings, revision: null, draftDiffers: true };
-  fetch.mockResolvedValueOnce(json(201, { id: 'i1', name: 'Skua', kind: 'boat' })).mockResolvedValueOnce(json(201, tank));
+  const tank = {
+    id: 't1',
+    installationId: 'i1',
+    installationName: 'Skua',
+    name: 'V hull',
+    settings,
+    revision: null,
+    draftDiffers: true,
+  };
+  fetch
+    .mockResolvedValueOnce(json(201, { id: 'i1', name: 'Skua', kind: 'boat' }))
+    .mockResolvedValueOnce(json(201, tank));
   expect(await settleDraft('Skua')).toBe('/tanks/t1/bench');
   expect(sent(fetch.mock.calls, 0).body).toEqual({ name: 'Skua', kind: 'boat' });
-  expect(sent(fetch.mock.calls, 1).body).toMatchObject({ installationId: 'i1', liquid: 'diesel', design: hull });
+  expect(sent(fetch.mock.calls, 1).body).toMatchObject({
+    installationId: 'i1',
+    liquid: 'diesel',
+    design: hull,
+  });
   expect(carriedDraft()).toBeNull();
 });
 
@@ -42,7 +56,10 @@ it('keeps the draft for the home when something fails on the way', async () => {
 
 it('goes home without a draft, and takes nothing that is no design', async () => {
   expect(await settleDraft(undefined)).toBe('/home');
-  localStorage.setItem('dipwright.carried-draft', '{"design":{"format":"other"},"liquid":"diesel"}');
+  localStorage.setItem(
+    'dipwright.carried-draft',
+    '{"design":{"format":"other"},"liquid":"diesel"}',
+  );
   expect(await settleDraft('Skua')).toBe('/home');
   expect(fetch).not.toHaveBeenCalled();
 });

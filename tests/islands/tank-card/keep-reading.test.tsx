@@ -74,7 +74,9 @@ describe('keeping a reading', () => {
   });
 
   it('does not hold back a reading that the server refused: it would be refused again', async () => {
-    fetch.mockResolvedValueOnce(problem(422, { code: 'invalid', detail: 'Give a depth from 0 to 290 mm.' }));
+    fetch.mockResolvedValueOnce(
+      problem(422, { code: 'invalid', detail: 'Give a depth from 0 to 290 mm.' }),
+    );
     render(<TankCard {...cistern} />);
     readAndKeep();
     expect(await screen.findByText('Give a depth from 0 to 290 mm.')).toBeDefined();

@@ -2,14 +2,17 @@ import { expect, it } from 'vitest';
 import { silhouetteOf } from '~/components/silhouette';
 import { startingPoints } from '~/domain/tank/starting-points';
 
-const drawn = (code: string) => silhouetteOf(startingPoints.find((point) => point.code === code)!.design);
+const drawn = (code: string) =>
+  silhouetteOf(startingPoints.find((point) => point.code === code)!.design);
 const corners = (path: string) => path.slice(1, -1).split('L');
 
 it('draws a box from the side by its four corners', () => {
   const { holds, displaces } = drawn('plain-box');
   expect(holds).toHaveLength(1);
   // 800 × 300, y runs down
-  expect(new Set(corners(holds[0]!).map((p) => p.replace('-0', '0')))).toEqual(new Set(['0 0', '800 0', '800 -300', '0 -300']));
+  expect(new Set(corners(holds[0]!).map((p) => p.replace('-0', '0')))).toEqual(
+    new Set(['0 0', '800 0', '800 -300', '0 -300']),
+  );
   expect(displaces).toEqual([]);
 });
 

@@ -3,7 +3,10 @@ import type { Scope } from '../scope';
 import type { RevisionHead } from './revisions';
 
 /** The drafts' designs by tank, as stored. */
-export async function draftDesigns(scope: Scope, tankIds: readonly string[]): Promise<Map<string, string>> {
+export async function draftDesigns(
+  scope: Scope,
+  tankIds: readonly string[],
+): Promise<Map<string, string>> {
   const found = await scope.database.models.drafts.findAll({
     where: { workshopId: scope.workshopId, tankId: [...tankIds] },
     attributes: ['tankId', 'design'],
@@ -13,7 +16,10 @@ export async function draftDesigns(scope: Scope, tankIds: readonly string[]): Pr
 }
 
 /** Which of these tanks were handed over to anybody. */
-export async function handedOverAmong(scope: Scope, tankIds: readonly string[]): Promise<Set<string>> {
+export async function handedOverAmong(
+  scope: Scope,
+  tankIds: readonly string[],
+): Promise<Set<string>> {
   const found = await scope.database.models.handovers.findAll({
     where: { workshopId: scope.workshopId, tankId: [...tankIds] },
     attributes: ['tankId'],
@@ -23,10 +29,15 @@ export async function handedOverAmong(scope: Scope, tankIds: readonly string[]):
 }
 
 /** ± of the litres at the last row of each of these revisions, by revision. */
-export async function plusMinusAtTop(scope: Scope, revisions: readonly RevisionHead[]): Promise<Map<string, number>> {
+export async function plusMinusAtTop(
+  scope: Scope,
+  revisions: readonly RevisionHead[],
+): Promise<Map<string, number>> {
   if (revisions.length === 0) return new Map();
   const found = await scope.database.models.strappingRows.findAll({
-    where: { [Op.or]: revisions.map(({ id, rowCount }) => ({ revisionId: id, rowNo: rowCount - 1 })) },
+    where: {
+      [Op.or]: revisions.map(({ id, rowCount }) => ({ revisionId: id, rowNo: rowCount - 1 })),
+    },
     attributes: ['revisionId', 'plusMinusL'],
     transaction: scope.transaction,
   });
