@@ -3,6 +3,7 @@ import { areaPreservingFactor } from './circle';
 import { exactPoints } from './exact-points';
 import type { Mesh } from './mesh';
 import { toTank, type Placing } from './placing';
+import { isConvex, prismMesh } from './prism-mesh';
 import { axisOrder, type Axis, type Shape } from './shape';
 import type { Vec3 } from './vec3';
 
@@ -16,6 +17,9 @@ export interface ManifoldSource {
   wasmUrl?: string;
   wasmBinary?: ArrayBuffer | Uint8Array;
 }
+
+/** Up to so many corners a convex outline is cheaper as the hull of its corners, which keeps their doubles. */
+const fewCorners = 8;
 
 let loading: Promise<void> | undefined;
 let library: ManifoldToplevel | undefined;
@@ -47,6 +51,9 @@ export interface PlacedShape {
 
 /** The mesh of one shape alone, in the tank's frame moved by −origin. */
 export function meshOf(placed: PlacedShape, origin: Vec3): Mesh {
+  const { shape, place } = placed;
+  const direct = shape.form === 'extrusion' ? prismMesh(shape, place, origin) : null;
+  if (direct) return direct;
   const made = make(placed, origin);
   try {
     return read(made);
@@ -64,6 +71,7 @@ export function spaceOf(
   displaces: readonly PlacedShape[],
   origin: Vec3,
 ): Mesh {
+  if (holds.length === 1 && displaces.length === 0) return meshOf(holds[0]!, origin);
   const { Manifold } = loadedLibrary();
   const bin: Manifold[] = [];
   const keep = (one: Manifold) => {
@@ -91,6 +99,11 @@ function loadedLibrary(): ManifoldToplevel {
 
 function make({ shape, place }: PlacedShape, origin: Vec3): Manifold {
   const { Manifold } = loadedLibrary();
+  if (shape.form === 'extrusion' && shape.outline.length <= fewCorners && isConvex(shape.outline)) {
+    const { positions } = prismMesh(shape, place, origin)!;
+    const corners = Array.from({ length: positions.length / 3 }, (_, i) => vertexOf(positions, i));
+    return Manifold.hull(corners);
+  }
   const raw =
     shape.form === 'extrusion'
       ? Manifold.extrude([mutable(shape.outline)], shape.length, 0, 0, [1, 1], true)
@@ -147,6 +160,10 @@ function turnedIn(axis: Axis): IntoOwn {
     own[third] = c;
     return own;
   };
+}
+
+function vertexOf(positions: Float64Array, i: number): [number, number, number] {
+  return [positions[3 * i]!, positions[3 * i + 1]!, positions[3 * i + 2]!];
 }
 
 function mutable(outline: readonly (readonly [number, number])[]): MutableVec2[] {

@@ -1,7 +1,7 @@
 import { horizontalAxes } from './horizontal-axes';
 import { levels as vertexLevels, type Mesh } from './mesh';
 import { advance, carriedQuartic, join } from './quartic';
-import { dot, type Vec3 } from './vec3';
+import type { Vec3 } from './vec3';
 
 /** What stands below each level: arrays as long as the levels given. */
 export interface Sweep {
@@ -153,7 +153,10 @@ export function sweep(mesh: Mesh, up: Vec3, atLevels: Float64Array): Sweep {
     return from;
   }
 
-  const moments = [new Float64Array(rows), new Float64Array(rows), new Float64Array(rows)] as const;
+  const [mx, my, mz] = [new Float64Array(rows), new Float64Array(rows), new Float64Array(rows)];
+  const [ux, uy, uz] = up;
+  const [ax, ay, az] = e1;
+  const [bx, by, bz] = e2;
   for (let row = 0; row < rows; row += 1) {
     const h = atLevels[row]!;
     const step = row === 0 ? 0 : h - atLevels[row - 1]!;
@@ -162,15 +165,14 @@ export function sweep(mesh: Mesh, up: Vec3, atLevels: Float64Array): Sweep {
     advance(mb, row, step);
     volume[row]! += q.run[1]!;
     surface[row]! += 2 * q.run[2]!;
-    const parts: Vec3 = [
-      alongA[row]! + ma.run[0]!,
-      alongB[row]! + mb.run[0]!,
-      h * volume[row]! - (integral[row]! + q.run[0]!),
-    ];
-    for (let axis = 0; axis < 3; axis += 1) {
-      moments[axis]![row] = dot([e1[axis]!, e2[axis]!, up[axis]!], parts);
-    }
+    const a1 = alongA[row]! + ma.run[0]!;
+    const b1 = alongB[row]! + mb.run[0]!;
+    const u1 = h * volume[row]! - (integral[row]! + q.run[0]!);
+    mx[row] = ax * a1 + bx * b1 + ux * u1;
+    my[row] = ay * a1 + by * b1 + uy * u1;
+    mz[row] = az * a1 + bz * b1 + uz * u1;
   }
+  const moments = [mx, my, mz] as const;
   return { volume, surface, moments };
 }
 

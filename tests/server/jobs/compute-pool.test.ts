@@ -1,0 +1,60 @@
+import { afterAll, describe, expect, it } from 'vitest';
+import { createComputePool } from '~/server/jobs/compute-pool';
+import { box, cylinder, design, slopedCistern } from '../../domain/table/designs';
+
+const pool = createComputePool({ threads: 2 });
+afterAll(() => pool.close());
+
+const settings = {
+  liquid: 'drinking-water',
+  densityKgPerM3: null,
+  safeFillPercent: 100,
+  outletMm: null,
+  referenceHeightMm: null,
+  measuredBy: 'tape',
+  sizePlusMinusMm: 2,
+  dipPlusMinusMm: 2,
+} as const;
+
+describe('the compute pool', { timeout: 60_000 }, () => {
+  it('computes in a thread while the event loop stays free', async () => {
+    let turns = 0;
+    const timer = setInterval(() => (turns += 1), 1);
+    const many = design(
+      Array.from({ length: 6 }, (_, i) => cylinder(`c${i}`, 300, 900, { axis: 'z', at: [200 * i, 0, 0] })),
+    );
+    const [table] = await Promise.all([
+      pool.table(slopedCistern, { atMm: [30, 60, 150, 300] }),
+      pool.table(many, { stepMm: 1 }),
+    ]);
+    clearInterval(timer);
+    expect(table.rows.map(({ volumeL }) => Math.round(volumeL * 1e9) / 1e9)).toEqual([4.5, 15, 55.5, 123]);
+    expect(turns).toBeGreaterThan(3);
+  });
+
+  it('issues, and refuses as data that keeps code and pointers', async () => {
+    const { rows } = await pool.issue(slopedCistern, settings, 50);
+    expect(rows).toHaveLength(7);
+    const apart = design([box('a', [100, 100, 100]), box('b', [100, 100, 100], { at: [300, 0, 0] })]);
+    await expect(pool.issue(apart, settings, 50)).rejects.toMatchObject({
+      name: 'DipwrightError',
+      code: 'invalid',
+      faults: [{ pointer: '/solids' }],
+    });
+    await expect(pool.table(slopedCistern, { atMm: [301] })).rejects.toMatchObject({
+      faults: [{ pointer: '/atMm/0' }],
+    });
+  });
+
+  it('gives up at the time limit, says so, and works on', async () => {
+    const hasty = createComputePool({ threads: 1, limitSeconds: { table: 0.005 } });
+    await expect(hasty.table(slopedCistern, { stepMm: 1 })).rejects.toMatchObject({
+      code: 'unavailable',
+      message: expect.stringMatching(/not ready after 0.005 seconds/),
+    });
+    const { rows } = await hasty.issue(slopedCistern, settings, 100);
+    expect(rows).toHaveLength(4);
+    await hasty.close();
+    await expect(hasty.table(slopedCistern, { stepMm: 1 })).rejects.toMatchObject({ code: 'unavailable' });
+  });
+});
