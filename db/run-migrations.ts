@@ -53,7 +53,9 @@ function appliedMigrations(sequelize: Sequelize): UmzugStorage<Sequelize> {
       });
     },
     async unlogMigration({ name }) {
-      await sequelize.query('DELETE FROM applied_migrations WHERE name = ?', { replacements: [name] });
+      await sequelize.query('DELETE FROM applied_migrations WHERE name = ?', {
+        replacements: [name],
+      });
     },
     async executed() {
       const rows = await sequelize.query<{ name: string }>(

@@ -8,7 +8,9 @@ try {
   const context = await composeContext(readConfig());
   try {
     const seeded = await once(context, 'demo', seedDemo);
-    process.stdout.write(seeded ? 'The demo workshop stands.\n' : 'The demo workshop was put in before.\n');
+    process.stdout.write(
+      seeded ? 'The demo workshop stands.\n' : 'The demo workshop was put in before.\n',
+    );
   } finally {
     await context.close();
   }

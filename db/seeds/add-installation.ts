@@ -11,5 +11,8 @@ export async function addInstallation(
   input: NewInstallation,
 ): Promise<Installation> {
   const installations = await listInstallations(context, actor);
-  return installations.find(({ name }) => name === input.name) ?? createInstallation(context, actor, input);
+  return (
+    installations.find(({ name }) => name === input.name) ??
+    createInstallation(context, actor, input)
+  );
 }

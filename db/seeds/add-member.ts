@@ -3,7 +3,10 @@ import type { Role } from '../../src/domain/access/roles';
 import { hashPassword } from '../../src/server/auth/passwords';
 import type { Context } from '../../src/server/context';
 import { newId } from '../../src/server/database/new-id';
-import { findMembership, insertMembership } from '../../src/server/database/repositories/memberships';
+import {
+  findMembership,
+  insertMembership,
+} from '../../src/server/database/repositories/memberships';
 import { findUserByEmail, insertUser } from '../../src/server/database/repositories/users';
 import { inTransaction } from '../../src/server/database/transaction';
 

@@ -11,11 +11,16 @@ export type Team = Record<Role, Actor>;
 /** A workshop with one member of every role; what is there already is left as it is. */
 export async function addWorkshop(
   context: Context,
-  workshop: { name: string; password: string; people: Record<Role, { name: string; email: string }> },
+  workshop: {
+    name: string;
+    password: string;
+    people: Record<Role, { name: string; email: string }>;
+  },
 ): Promise<Team> {
   const { password, people } = workshop;
   const place = { workshopId: await workshopOf(context, workshop), workshopName: workshop.name };
-  const add = (role: Role): Promise<Actor> => addMember(context, place, { ...people[role], role, password });
+  const add = (role: Role): Promise<Actor> =>
+    addMember(context, place, { ...people[role], role, password });
   return {
     manager: await add('manager'),
     designer: await add('designer'),

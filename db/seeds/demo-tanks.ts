@@ -31,7 +31,15 @@ const hull: TankDocument = {
   ...head,
   name: 'Port diesel tank',
   solids: [
-    { id: 'port side', role: 'holds', kind: 'wedge', length: 300, width: 1200, height: 500, turn: [0, 180, 0] },
+    {
+      id: 'port side',
+      role: 'holds',
+      kind: 'wedge',
+      length: 300,
+      width: 1200,
+      height: 500,
+      turn: [0, 180, 0],
+    },
     {
       id: 'starboard side',
       role: 'holds',
@@ -92,7 +100,13 @@ export const demoInstallations: readonly (NewInstallation & { tanks: readonly Ta
         name: 'Drinking water cistern',
         liquid: 'drinking-water',
         design: cistern,
-        issues: [{ hoursAgo: 30 * day, stepMm: 10, note: 'Measured inside with a tape before the lid went on.' }],
+        issues: [
+          {
+            hoursAgo: 30 * day,
+            stepMm: 10,
+            note: 'Measured inside with a tape before the lid went on.',
+          },
+        ],
         handedOver: true,
         readings: [
           { hoursAgo: 21 * day, depthMm: 296, by: 'fitter', note: 'Filled at handover.' },
@@ -108,7 +122,9 @@ export const demoInstallations: readonly (NewInstallation & { tanks: readonly Ta
         settings: { safeFillPercent: 97, measuredBy: 'drawing' },
         issues: [{ hoursAgo: 29 * day, stepMm: 10 }],
         handedOver: true,
-        readings: [{ hoursAgo: 2 * day, depthMm: 419, by: 'owner', note: 'Stick showed 16 4/8 in.' }],
+        readings: [
+          { hoursAgo: 2 * day, depthMm: 419, by: 'owner', note: 'Stick showed 16 4/8 in.' },
+        ],
       },
     ],
   },

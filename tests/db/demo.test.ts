@@ -24,11 +24,14 @@ beforeAll(async () => {
   let issues = 0;
   const failing: ComputePool = {
     ...pool,
-    issue: (...of) => ((issues += 1) === 3 ? Promise.reject(new Error('power cut')) : pool.issue(...of)),
+    issue: (...of) =>
+      (issues += 1) === 3 ? Promise.reject(new Error('power cut')) : pool.issue(...of),
   };
   const context = { ...house.context, computePool: failing };
   await expect(once(context, 'demo', seedDemo)).rejects.toThrow('power cut');
-  expect(await once(house.context, 'demo', async (whole) => (team = await seedDemo(whole)))).toBe(true);
+  expect(await once(house.context, 'demo', async (whole) => (team = await seedDemo(whole)))).toBe(
+    true,
+  );
   tanks = new Map((await listTanks(house.context, team.manager)).map((tank) => [tank.name, tank]));
 }, 120_000);
 afterAll(async () => {
@@ -73,7 +76,11 @@ describe('the demo workshop', () => {
 
   it('shows the owner the three tanks that were handed over', async () => {
     const seen = await listTanks(house.context, team.owner);
-    expect(seen.map(({ name }) => name)).toEqual(['Drinking water cistern', 'Heating oil', 'Port diesel tank']);
+    expect(seen.map(({ name }) => name)).toEqual([
+      'Drinking water cistern',
+      'Heating oil',
+      'Port diesel tank',
+    ]);
     const tankId = tanks.get('Drinking water cistern')!.id;
     const readings = await listReadings(house.context, team.owner, { tankId });
     expect(readings.map(({ depthMm }) => depthMm)).toEqual([150, 174, 231, 296]);
@@ -114,7 +121,11 @@ describe('look-ups against closed forms', () => {
       expect(found.massKg).toBeCloseTo(volume * 0.84, 4);
       expect(found).toMatchObject({ revision: 'B', current: true });
     }
-    for (const [volumeL, depthMm] of [[90, 353.553], [100, 372.678], [171, 487.34]] as const) {
+    for (const [volumeL, depthMm] of [
+      [90, 353.553],
+      [100, 372.678],
+      [171, 487.34],
+    ] as const) {
       const found = await lookUpDepth(house.context, team.owner, {
         revisionId: revisionOf('Port diesel tank'),
         volumeL,
@@ -137,10 +148,15 @@ describe('look-ups against closed forms', () => {
   it('lying cylinder', async () => {
     const radius = 600;
     const litres = (h: number) =>
-      ((radius ** 2 * Math.acos((radius - h) / radius) - (radius - h) * Math.sqrt(2 * radius * h - h * h)) * 2000) / 1e6;
+      ((radius ** 2 * Math.acos((radius - h) / radius) -
+        (radius - h) * Math.sqrt(2 * radius * h - h * h)) *
+        2000) /
+      1e6;
     for (const depthMm of [50, 141.6, 419.1, 600, 804.7, 1117, 1150]) {
       // between rows the curve is good to 3e-8 of capacity, and the mesh to 6e-7
-      expect(Math.abs((await at('Heating oil', depthMm)).volumeL - litres(depthMm))).toBeLessThan(2e-6 * 2261.9);
+      expect(Math.abs((await at('Heating oil', depthMm)).volumeL - litres(depthMm))).toBeLessThan(
+        2e-6 * 2261.9,
+      );
     }
     const dip = await at('Heating oil', 419.1);
     expect(dip.volumeL).toBeCloseTo(703.5, 1);

@@ -12,7 +12,12 @@ afterEach(async () => {
 describe('migrations', () => {
   it('make every table InnoDB, utf8mb4 and with a primary key, and never count on auto-increment', async () => {
     fresh = await freshDatabase();
-    const tables = await fresh.sql<{ name: string; engine: string; collation: string; auto: number | null }>(
+    const tables = await fresh.sql<{
+      name: string;
+      engine: string;
+      collation: string;
+      auto: number | null;
+    }>(
       `SELECT table_name AS name, engine, table_collation AS collation, auto_increment AS auto
        FROM information_schema.tables WHERE table_schema = DATABASE()`,
     );
@@ -42,7 +47,8 @@ describe('migrations', () => {
     fresh = await freshDatabase();
     const { sequelize } = fresh.database;
     // as if the first had died before it was noted, with its last tables not made yet
-    for (const table of ['applied_seeds', 'readings', 'handovers']) await sequelize.query(`DROP TABLE ${table}`);
+    for (const table of ['applied_seeds', 'readings', 'handovers'])
+      await sequelize.query(`DROP TABLE ${table}`);
     await sequelize.query("DELETE FROM applied_migrations WHERE name = '0001-first-tables'");
     expect((await runMigrations(sequelize)).applied).toEqual(['0001-first-tables']);
     expect(await fresh.sql('SELECT * FROM readings')).toEqual([]);
@@ -52,10 +58,14 @@ describe('migrations', () => {
 describe('the guards of what was issued', () => {
   it('say so where the right to make triggers is missing', async () => {
     for (const errno of [1142, 1044, 1419]) {
-      const refusing = { query: () => Promise.reject(Object.assign(new Error('no'), { parent: { errno } })) };
+      const refusing = {
+        query: () => Promise.reject(Object.assign(new Error('no'), { parent: { errno } })),
+      };
       expect(await guardIssued(refusing as never)).toContain('Grant TRIGGER');
     }
-    const failing = { query: () => Promise.reject(Object.assign(new Error('gone'), { parent: { errno: 2006 } })) };
+    const failing = {
+      query: () => Promise.reject(Object.assign(new Error('gone'), { parent: { errno: 2006 } })),
+    };
     await expect(guardIssued(failing as never)).rejects.toThrow('gone');
   });
 });

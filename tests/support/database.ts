@@ -16,8 +16,17 @@ export interface FreshDatabase {
 export async function freshDatabase(options: { migrate?: boolean } = {}): Promise<FreshDatabase> {
   const server = testServer();
   const name = `${server.prefix}_${process.pid}_${randomBytes(4).toString('hex')}`;
-  await onServer(server, `CREATE DATABASE ${name} CHARACTER SET utf8mb4 COLLATE utf8mb4_unicode_ci`);
-  const address = { host: server.host, port: server.port, user: server.user, password: server.password, name };
+  await onServer(
+    server,
+    `CREATE DATABASE ${name} CHARACTER SET utf8mb4 COLLATE utf8mb4_unicode_ci`,
+  );
+  const address = {
+    host: server.host,
+    port: server.port,
+    user: server.user,
+    password: server.password,
+    name,
+  };
   const database = connect(address, { poolSize: 12 });
   if (options.migrate !== false) await runMigrations(database.sequelize);
   return {
@@ -44,7 +53,9 @@ function testServer(): TestServer {
   const setting = (name: string): string => {
     const value = process.env[`DIPWRIGHT_TEST_DATABASE_${name}`];
     if (value === undefined || value === '') {
-      throw new Error('No test database: run `node src/commands/test.mjs --only server`, which starts one.');
+      throw new Error(
+        'No test database: run `node src/commands/test.mjs --only server`, which starts one.',
+      );
     }
     return value;
   };

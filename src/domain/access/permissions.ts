@@ -3,7 +3,7 @@ import type { Role } from './roles';
 
 /**
  * Who may do what: the one map. Services ask `requirePermission` first, so that no route can
- * forget it; tests/domain/access holds the full role × operation matrix.
+ * forget it; tests/server/services/role-matrix.test.ts holds the full role × use case matrix.
  */
 export const permissions = {
   'workshop.read': ['manager', 'designer', 'fitter', 'owner'],

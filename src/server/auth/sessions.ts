@@ -43,7 +43,13 @@ export function createSessions(database: Database, options: { tls: boolean }): S
     if (session === null) return null;
     const membership = await findMembership(database, session.workshopId, user.id);
     if (membership === null) return null;
-    return { userId: user.id, workshopId: session.workshopId, name: user.name, email: user.email, ...membership };
+    return {
+      userId: user.id,
+      workshopId: session.workshopId,
+      name: user.name,
+      email: user.email,
+      ...membership,
+    };
   };
 
   const end: Sessions['end'] = async (cookieHeader) => {
@@ -75,7 +81,11 @@ function createLucia(database: Database, tls: boolean) {
       name: tls ? '__Host-dipwright' : 'dipwright',
       attributes: { secure: tls, sameSite: 'lax', path: '/' },
     },
-    getSessionAttributes: ({ workshopId, createdAt, endsAt }) => ({ workshopId, createdAt, endsAt }),
+    getSessionAttributes: ({ workshopId, createdAt, endsAt }) => ({
+      workshopId,
+      createdAt,
+      endsAt,
+    }),
     getUserAttributes: ({ name, email }) => ({ name, email }),
   });
 }

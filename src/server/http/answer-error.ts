@@ -11,7 +11,10 @@ export function answerError(error: unknown, log: Log, requestId: string): Respon
   if (isLostDatabase(error)) {
     log.error('the database does not answer', { requestId, error });
     return problem(
-      new DipwrightError('unavailable', 'The database does not answer just now. Nothing was kept: try again in a few seconds.'),
+      new DipwrightError(
+        'unavailable',
+        'The database does not answer just now. Nothing was kept: try again in a few seconds.',
+      ),
       requestId,
     );
   }

@@ -24,5 +24,7 @@ function faultsOf(issue: z.core.$ZodIssue): FieldFault[] {
 
 /** RFC 6901. */
 export function pointerTo(path: readonly PropertyKey[]): string {
-  return path.map((step) => `/${String(step).replaceAll('~', '~0').replaceAll('/', '~1')}`).join('');
+  return path
+    .map((step) => `/${String(step).replaceAll('~', '~0').replaceAll('/', '~1')}`)
+    .join('');
 }

@@ -35,8 +35,12 @@ export function endpoint<B, Q, A extends Access>(
       if (operation.limit !== undefined) checkLimit(context, operation.limit, locals.clientAddress);
       const actor = actorFor(operation, locals);
       const id = idIn(operation, params);
-      const query = operation.query === undefined ? undefined : checkBySchema(operation.query, readQuery(url));
-      const body = operation.body === undefined ? undefined : checkBySchema(operation.body, await readJson(request));
+      const query =
+        operation.query === undefined ? undefined : checkBySchema(operation.query, readQuery(url));
+      const body =
+        operation.body === undefined
+          ? undefined
+          : checkBySchema(operation.body, await readJson(request));
       return await handle({ context, actor, id, body: body as B, query: query as Q, request });
     } catch (error) {
       return answerError(error, context.log, requestId);
@@ -49,7 +53,10 @@ function actorFor<A extends Access>(
   locals: App.Locals,
 ): Call<unknown, unknown, A>['actor'] {
   if (operation.access === 'member' && locals.actor === null) {
-    throw new DipwrightError('unauthenticated', 'Sign in first: this is for members of a workshop.');
+    throw new DipwrightError(
+      'unauthenticated',
+      'Sign in first: this is for members of a workshop.',
+    );
   }
   return locals.actor as Call<unknown, unknown, A>['actor'];
 }

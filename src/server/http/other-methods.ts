@@ -15,7 +15,10 @@ export function otherMethods(routes: Readonly<Partial<Record<string, APIRoute>>>
       const full = await get(call);
       return new Response(null, { status: full.status, headers: full.headers });
     }
-    const error = new DipwrightError('method-not-allowed', `This address answers ${allow}, not ${call.request.method}.`);
+    const error = new DipwrightError(
+      'method-not-allowed',
+      `This address answers ${allow}, not ${call.request.method}.`,
+    );
     return problem(error, call.locals.requestId, { allow });
   };
 }

@@ -1,4 +1,4 @@
-import { DipwrightError, type ErrorCode } from '~/domain/errors';
+import type { DipwrightError, ErrorCode } from '~/domain/errors';
 
 /** The one map from our codes to HTTP. */
 export const statusOf: Record<ErrorCode, number> = {
@@ -53,7 +53,10 @@ export function problem(
     requestId,
     errors: faults,
   };
-  return answer(status, body, { ...(wait === null ? {} : { 'retry-after': String(wait) }), ...headers });
+  return answer(status, body, {
+    ...(wait === null ? {} : { 'retry-after': String(wait) }),
+    ...headers,
+  });
 }
 
 /** A fault of ours: its cause is in the log under the request's id, not in the answer. */
@@ -69,7 +72,11 @@ export function internalProblem(requestId: string): Response {
   });
 }
 
-function answer(status: number, body: object, headers: Readonly<Record<string, string>> = {}): Response {
+function answer(
+  status: number,
+  body: object,
+  headers: Readonly<Record<string, string>> = {},
+): Response {
   return new Response(JSON.stringify(body), {
     status,
     headers: {

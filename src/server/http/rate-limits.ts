@@ -26,9 +26,13 @@ export function checkLimit(context: Context, name: LimitName, clientAddress: str
   const waitS = buckets[name].take(clientKey(clientAddress), context.clock.now().getTime());
   if (waitS === 0) return;
   const retryAfterS = Math.ceil(waitS);
-  throw new DipwrightError('rate-limited', `Too many calls from your address: try again in ${retryAfterS} s.`, {
-    facts: { retryAfterS },
-  });
+  throw new DipwrightError(
+    'rate-limited',
+    `Too many calls from your address: try again in ${retryAfterS} s.`,
+    {
+      facts: { retryAfterS },
+    },
+  );
 }
 
 /** An IPv6 client holds a whole /64, so that is what is counted. */

@@ -7,14 +7,21 @@ export const mostBytes = 1024 * 1024;
 export async function readJson(request: Request): Promise<unknown> {
   const [mediaType = ''] = (request.headers.get('content-type') ?? '').split(';');
   if (mediaType.trim().toLowerCase() !== 'application/json') {
-    throw new DipwrightError('unsupported-media-type', 'Send JSON, with the header "Content-Type: application/json".');
+    throw new DipwrightError(
+      'unsupported-media-type',
+      'Send JSON, with the header "Content-Type: application/json".',
+    );
   }
   const text = decoded(await bytesOf(request));
-  if (text.trim() === '') throw new DipwrightError('bad-request', 'The body is empty: send a JSON document.');
+  if (text.trim() === '')
+    throw new DipwrightError('bad-request', 'The body is empty: send a JSON document.');
   try {
     return JSON.parse(text);
   } catch {
-    throw new DipwrightError('bad-request', 'The body is not JSON: check quotes, commas and brackets.');
+    throw new DipwrightError(
+      'bad-request',
+      'The body is not JSON: check quotes, commas and brackets.',
+    );
   }
 }
 
@@ -24,7 +31,10 @@ async function bytesOf(request: Request): Promise<Uint8Array> {
   for await (const chunk of (request.body ?? []) as AsyncIterable<Uint8Array>) {
     length += chunk.byteLength;
     if (length > mostBytes) {
-      throw new DipwrightError('too-large', 'The body is larger than 1 MB: send a smaller document.');
+      throw new DipwrightError(
+        'too-large',
+        'The body is larger than 1 MB: send a smaller document.',
+      );
     }
     chunks.push(chunk);
   }

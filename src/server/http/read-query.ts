@@ -7,7 +7,9 @@ export function readQuery(url: URL): Record<string, string> {
   for (const [name, value] of url.searchParams) {
     if (Object.hasOwn(query, name)) {
       const detail = `Give "${name.slice(0, 64)}" once.`;
-      throw new DipwrightError('invalid', detail, { faults: [{ pointer: pointerTo([name]), detail }] });
+      throw new DipwrightError('invalid', detail, {
+        faults: [{ pointer: pointerTo([name]), detail }],
+      });
     }
     Object.defineProperty(query, name, { value, enumerable: true });
   }

@@ -27,7 +27,10 @@ export function file(
   disposition: 'attachment' | 'inline' = 'attachment',
 ): Response {
   const plain = fileName.replaceAll(/[^A-Za-z0-9._-]+/g, '-');
-  const full = encodeURIComponent(fileName).replaceAll(/['()*]/g, (sign) => `%${sign.charCodeAt(0).toString(16)}`);
+  const full = encodeURIComponent(fileName).replaceAll(
+    /['()*]/g,
+    (sign) => `%${sign.charCodeAt(0).toString(16)}`,
+  );
   return new Response(bytes as BodyInit, {
     headers: {
       ...unkept,

@@ -39,7 +39,10 @@ export function openApiDocument(origin: string, version: string): Json {
   const { schemas } = z.toJSONSchema(named, { uri: refTo, io: 'input', unrepresentable: 'any' });
   const paths: Record<string, Json> = {};
   for (const operation of operations) {
-    paths[operation.path] = { ...paths[operation.path], [operation.method.toLowerCase()]: described(operation) };
+    paths[operation.path] = {
+      ...paths[operation.path],
+      [operation.method.toLowerCase()]: described(operation),
+    };
   }
   return {
     openapi: '3.1.0',
@@ -53,7 +56,9 @@ export function openApiDocument(origin: string, version: string): Json {
     servers: [{ url: origin }],
     paths,
     components: {
-      schemas: Object.fromEntries(Object.entries(schemas).map(([id, schema]) => [id, withoutMeta(schema)])),
+      schemas: Object.fromEntries(
+        Object.entries(schemas).map(([id, schema]) => [id, withoutMeta(schema)]),
+      ),
       securitySchemes: {
         session: {
           type: 'apiKey',
@@ -76,7 +81,12 @@ function described(operation: Operation): Json {
     parameters: parametersOf(operation),
     ...(body === undefined
       ? {}
-      : { requestBody: { required: true, content: { 'application/json': { schema: shapeOf(body, 'input') } } } }),
+      : {
+          requestBody: {
+            required: true,
+            content: { 'application/json': { schema: shapeOf(body, 'input') } },
+          },
+        }),
     responses: {
       ...Object.fromEntries(answers.map((answer) => [String(answer.status), responseOf(answer)])),
       default: {
@@ -110,13 +120,23 @@ function parametersOf({ path, query, headers = {} }: Operation): Json[] {
   return [...inPath, ...inHeaders, ...inQuery];
 }
 
-function responseOf({ description, schema, mediaType = 'application/json', headers = {} }: Answer): Json {
+function responseOf({
+  description,
+  schema,
+  mediaType = 'application/json',
+  headers = {},
+}: Answer): Json {
   return {
     description,
     headers: Object.fromEntries(
-      Object.entries(headers).map(([name, text]) => [name, { description: text, schema: { type: 'string' } }]),
+      Object.entries(headers).map(([name, text]) => [
+        name,
+        { description: text, schema: { type: 'string' } },
+      ]),
     ),
-    ...(schema === undefined ? {} : { content: { [mediaType]: { schema: shapeOf(schema, 'output') } } }),
+    ...(schema === undefined
+      ? {}
+      : { content: { [mediaType]: { schema: shapeOf(schema, 'output') } } }),
   };
 }
 

@@ -13,7 +13,9 @@ export interface Check {
 const leastFreeMb = 256;
 
 /** Whether this process can do its work just now, and if not, why. No secret and no path is told. */
-export async function checkReadiness(context: Context): Promise<{ ready: boolean; checks: Check[] }> {
+export async function checkReadiness(
+  context: Context,
+): Promise<{ ready: boolean; checks: Check[] }> {
   const applied = await appliedMigrations(context.database).catch(() => null);
   const checks: Check[] = [
     {
@@ -44,6 +46,8 @@ async function diskCheck(): Promise<Check> {
   const { bavail, bsize } = await statfs('.');
   const freeMb = Math.floor((bavail * bsize) / 1e6);
   const fit = freeMb >= leastFreeMb;
-  const detail = fit ? 'There is room on the disk.' : `Only ${freeMb} MB are free: ${leastFreeMb} MB are needed.`;
+  const detail = fit
+    ? 'There is room on the disk.'
+    : `Only ${freeMb} MB are free: ${leastFreeMb} MB are needed.`;
   return { name: 'disk', fit, detail };
 }

@@ -17,7 +17,11 @@ import { scopeOf } from './scope-of';
 /** A new tank and its draft: the design that was sent, or else a plain box to begin from. */
 export async function createTank(context: Context, actor: Actor, input: NewTank): Promise<Tank> {
   requirePermission(actor.role, 'tank.create');
-  const settings = changedSettings(startingSettings(input.liquid), input.settings ?? {}, '/settings');
+  const settings = changedSettings(
+    startingSettings(input.liquid),
+    input.settings ?? {},
+    '/settings',
+  );
   const design = input.design ?? plainBox(input.name);
   const tankId = newId();
   const now = context.clock.now();

@@ -23,7 +23,10 @@ export async function handOverTank(
     ? await findMembership(context.database, actor.workshopId, userId)
     : null;
   if (membership?.role !== 'owner') {
-    throw invalid('/userId', 'Choose a member of your workshop who is an owner: the others see every tank.');
+    throw invalid(
+      '/userId',
+      'Choose a member of your workshop who is an owner: the others see every tank.',
+    );
   }
   await insertHandover(scope, {
     tankId,

@@ -5,7 +5,9 @@ import { forgetAttemptsBefore } from '../database/repositories/sign-in-attempts'
 const hourMs = 3_600_000;
 
 /** Every hour, removes sessions that are over and failed sign-ins that no longer count. Returns how to stop it. */
-export function keepTidy(context: Pick<Context, 'database' | 'sessions' | 'clock' | 'log'>): () => void {
+export function keepTidy(
+  context: Pick<Context, 'database' | 'sessions' | 'clock' | 'log'>,
+): () => void {
   const timer = setInterval(() => void tidy(context), hourMs);
   timer.unref();
   return () => clearInterval(timer);

@@ -12,5 +12,8 @@ export async function listInstallations(context: Context, actor: Actor): Promise
   const scope = scopeOf(context, actor);
   if (actor.role !== 'owner') return listInstallationRecords(scope);
   const tanks = await listTankRecords(scope, await tankIdsHandedOverTo(scope, actor.userId));
-  return listInstallationRecords(scope, tanks.map(({ installationId }) => installationId));
+  return listInstallationRecords(
+    scope,
+    tanks.map(({ installationId }) => installationId),
+  );
 }

@@ -17,6 +17,9 @@ export async function listRevisions(
   const scope = scopeOf(context, actor);
   await tankInSight(scope, actor, input.tankId);
   const revisions = await listRevisionHeads(scope, input.tankId);
-  const names = await namesOfUsers(context.database, revisions.map(({ issuedBy }) => issuedBy));
+  const names = await namesOfUsers(
+    context.database,
+    revisions.map(({ issuedBy }) => issuedBy),
+  );
   return revisions.map((revision, index) => summaryOf(revision, index === 0, names));
 }

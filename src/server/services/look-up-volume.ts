@@ -22,7 +22,10 @@ export async function lookUpVolume(
   const { heightMm } = revision;
   if ('ullageMm' in input && !(input.ullageMm >= 0 && input.ullageMm <= heightMm)) {
     const most = Math.round(heightMm * 10) / 10;
-    throw invalid('/ullageMm', `Give a space above the liquid from 0 to ${most} mm: the stick ends there.`);
+    throw invalid(
+      '/ullageMm',
+      `Give a space above the liquid from 0 to ${most} mm: the stick ends there.`,
+    );
   }
   const depthMm = 'depthMm' in input ? input.depthMm : heightMm - input.ullageMm;
   return lookUpAt(askable(revision, current, await listRows(scope, revision.id)), depthMm);

@@ -12,6 +12,10 @@ export async function readRevision(
   input: { revisionId: string },
 ): Promise<RevisionSummary> {
   requirePermission(actor.role, 'revision.read');
-  const { revision, current } = await revisionInSight(scopeOf(context, actor), actor, input.revisionId);
+  const { revision, current } = await revisionInSight(
+    scopeOf(context, actor),
+    actor,
+    input.revisionId,
+  );
   return summaryOf(revision, current, await namesOfUsers(context.database, [revision.issuedBy]));
 }

@@ -13,7 +13,10 @@ export async function readingsAsSeen(
   if (first === undefined) return [];
   const revisions = await listRevisionHeads(scope, first.tankId);
   const letters = new Map(revisions.map(({ id, letter }) => [id, letter]));
-  const names = await namesOfUsers(scope.database, records.map(({ recordedBy }) => recordedBy));
+  const names = await namesOfUsers(
+    scope.database,
+    records.map(({ recordedBy }) => recordedBy),
+  );
   return records.map((record) => {
     const { id, depthMm, volumeL, usableL, roomL, massKg, plusMinusL, note } = record;
     return {

@@ -63,7 +63,11 @@ export async function recordReading(
   return answerAgain(scope, first, bodyHash);
 }
 
-async function answerAgain(scope: Scope, record: ReadingRecord, bodyHash: string): Promise<Reading> {
+async function answerAgain(
+  scope: Scope,
+  record: ReadingRecord,
+  bodyHash: string,
+): Promise<Reading> {
   if (record.bodyHash !== bodyHash) {
     throw new DipwrightError(
       'invalid',

@@ -16,7 +16,11 @@ export interface RevisionInSight {
 }
 
 /** A revision of a tank that the actor may see; anything else is "not found". */
-export async function revisionInSight(scope: Scope, actor: Actor, id: string): Promise<RevisionInSight> {
+export async function revisionInSight(
+  scope: Scope,
+  actor: Actor,
+  id: string,
+): Promise<RevisionInSight> {
   const revision = isId(id) ? await findRevision(scope, id) : null;
   if (revision === null) throw notFound('revision');
   if (actor.role === 'owner' && !(await isHandedOver(scope, revision.tankId, actor.userId))) {

@@ -39,13 +39,13 @@ async function countOrRefuse(context: Context, account: string): Promise<void> {
   const now = context.clock.now();
   const waits = (until: Date): boolean => until > now;
   const kept = await countAttempt(context.database, account, (attempt) => {
-    if (attempt !== null && waits(attempt.blockedUntil)) return null;
-    const old = attempt === null || attempt.lastAt.getTime() < now.getTime() - forgottenAfterSeconds * 1000;
+    if (waits(attempt.blockedUntil)) return null;
+    const old = attempt.lastAt.getTime() < now.getTime() - forgottenAfterSeconds * 1000;
     const failures = (old ? 0 : attempt.failures) + 1;
     const blockedUntil = new Date(now.getTime() + delaySeconds(failures) * 1000);
     return { failures, lastAt: now, blockedUntil };
   });
-  if (kept === null || !waits(kept.blockedUntil)) return;
+  if (!waits(kept.blockedUntil)) return;
   const retryAfterS = Math.ceil((kept.blockedUntil.getTime() - now.getTime()) / 1000);
   throw new DipwrightError(
     'rate-limited',

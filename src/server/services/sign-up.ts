@@ -20,13 +20,21 @@ export async function signUp(
   const passwordHash = await hashPassword(input.password);
   await inTransaction(context.database, async (transaction) => {
     const { database } = context;
-    await insertWorkshop(database, { id: workshopId, name: input.workshopName, createdAt }, transaction);
+    await insertWorkshop(
+      database,
+      { id: workshopId, name: input.workshopName, createdAt },
+      transaction,
+    );
     await insertUser(
       database,
       { id: userId, name: input.name, email: input.email, passwordHash, createdAt },
       transaction,
     );
-    await insertMembership(database, { workshopId, userId, role: 'manager', createdAt }, transaction);
+    await insertMembership(
+      database,
+      { workshopId, userId, role: 'manager', createdAt },
+      transaction,
+    );
   });
   return { workshopId, userId, setCookie: await context.sessions.begin({ userId, workshopId }) };
 }

@@ -17,9 +17,13 @@ export async function tanksAsSeen(
   tanks: readonly TankRecord[],
 ): Promise<Tank[]> {
   const ids = tanks.map(({ id }) => id);
-  const installations = await listInstallationRecords(scope, tanks.map((tank) => tank.installationId));
+  const installations = await listInstallationRecords(
+    scope,
+    tanks.map((tank) => tank.installationId),
+  );
   const revisions = await currentRevisions(scope, ids);
-  const drafts = actor.role === 'owner' ? new Map<string, string>() : await designHashes(scope, ids);
+  const drafts =
+    actor.role === 'owner' ? new Map<string, string>() : await designHashes(scope, ids);
   const names = await namesOfUsers(
     scope.database,
     [...revisions.values()].map(({ issuedBy }) => issuedBy),

@@ -53,7 +53,10 @@ describe('a session', () => {
     const cookie = await signInAs(house, team.designer.email, password);
     await move(cookie, 'expires_at', new Date(Date.now() + 0.2 * idleDays * dayMs));
     expect(await me(cookie)).toBe(200);
-    expect(((await rowOf(cookie))!.expires_at.getTime() - Date.now()) / dayMs).toBeCloseTo(idleDays, 2);
+    expect(((await rowOf(cookie))!.expires_at.getTime() - Date.now()) / dayMs).toBeCloseTo(
+      idleDays,
+      2,
+    );
 
     const { ends_at } = (await rowOf(cookie))!;
     expect((ends_at.getTime() - Date.now()) / dayMs).toBeCloseTo(longestDays, 2);
@@ -91,7 +94,14 @@ describe('a session', () => {
   });
 
   it('is not found in broken cookies, and none of them is a fault of ours', async () => {
-    const broken = ['dipwright=', 'dipwright=%E0%A4%A', '%E0%A4%A=1; dipwright=x', 'dipwright', ';;;=', 'dipwright="><script>'];
+    const broken = [
+      'dipwright=',
+      'dipwright=%E0%A4%A',
+      '%E0%A4%A=1; dipwright=x',
+      'dipwright',
+      ';;;=',
+      'dipwright="><script>',
+    ];
     for (const cookie of broken) expect(await me(cookie)).toBe(401);
     const cookie = await signInAs(house, team.designer.email, password);
     expect(await me(`%E0%A4%A=1; ${cookie}; other=2`)).toBe(200);

@@ -56,7 +56,8 @@ it('takes the address in any case and with spaces around it', async () => {
 it('keeps no password, only argon2id with the stated cost', async () => {
   const rows = await house.sql<{ password_hash: string }>('SELECT password_hash FROM users');
   expect(rows.length).toBeGreaterThan(0);
-  for (const { password_hash } of rows) expect(password_hash).toMatch(/^\$argon2id\$v=19\$m=19456,t=2,p=1\$/);
+  for (const { password_hash } of rows)
+    expect(password_hash).toMatch(/^\$argon2id\$v=19\$m=19456,t=2,p=1\$/);
 });
 
 describe('the delay of an account', () => {
@@ -68,19 +69,22 @@ describe('the delay of an account', () => {
     expect(delays).toEqual([...delays].sort((a, b) => a - b));
   });
 
-  it.each(['known', 'unknown'])('begins after five wrong passwords for a %s address', async (kind) => {
-    const email = kind === 'known' ? team.designer.email : 'nobody@elsewhere.example';
-    for (let failure = 1; failure <= freeFailures; failure += 1) {
-      expect((await signIn(email, 'wrong')).status).toBe(401);
-    }
-    const waiting = await signIn(email, password);
-    expect(waiting.status).toBe(429);
-    const problem = await waiting.json();
-    expect(problem.code).toBe('rate-limited');
-    expect(waiting.headers.get('retry-after')).toBe(String(problem.retryAfterS));
-    expect(problem.retryAfterS).toBeGreaterThan(0);
-    expect(problem.retryAfterS).toBeLessThanOrEqual(2);
-  });
+  it.each(['known', 'unknown'])(
+    'begins after five wrong passwords for a %s address',
+    async (kind) => {
+      const email = kind === 'known' ? team.designer.email : 'nobody@elsewhere.example';
+      for (let failure = 1; failure <= freeFailures; failure += 1) {
+        expect((await signIn(email, 'wrong')).status).toBe(401);
+      }
+      const waiting = await signIn(email, password);
+      expect(waiting.status).toBe(429);
+      const problem = await waiting.json();
+      expect(problem.code).toBe('rate-limited');
+      expect(waiting.headers.get('retry-after')).toBe(String(problem.retryAfterS));
+      expect(problem.retryAfterS).toBeGreaterThan(0);
+      expect(problem.retryAfterS).toBeLessThanOrEqual(2);
+    },
+  );
 
   it('is over after its time: the right password then works, and the count begins anew', async () => {
     const { email } = team.owner;

@@ -27,9 +27,13 @@ describe('the database itself refuses to change what was issued', () => {
     ['DELETE FROM revisions WHERE id = ?'],
     ['UPDATE strapping_rows SET volume_l = 1 WHERE revision_id = ?'],
     ['DELETE FROM strapping_rows WHERE revision_id = ?'],
-    ['REPLACE INTO strapping_rows SELECT revision_id, row_no, 1, 1, 1, 1 FROM strapping_rows WHERE revision_id = ?'],
+    [
+      'REPLACE INTO strapping_rows SELECT revision_id, row_no, 1, 1, 1, 1 FROM strapping_rows WHERE revision_id = ?',
+    ],
   ])('%s', async (statement) => {
-    await expect(run(statement, [made.revision.id])).rejects.toThrow('What was issued is never changed or removed.');
+    await expect(run(statement, [made.revision.id])).rejects.toThrow(
+      'What was issued is never changed or removed.',
+    );
   });
 
   it('and a second revision under the same number', async () => {
@@ -51,12 +55,16 @@ describe('the database itself refuses a link into another workshop', () => {
 
   it('a tank in their installation', async () => {
     const statement = 'UPDATE tanks SET installation_id = ? WHERE id = ?';
-    await expect(run(statement, [other.installationId, made.tank.id])).rejects.toMatchObject(foreign);
+    await expect(run(statement, [other.installationId, made.tank.id])).rejects.toMatchObject(
+      foreign,
+    );
   });
 
   it('a tank moved into their workshop', async () => {
     const statement = 'UPDATE tanks SET workshop_id = ? WHERE id = ?';
-    await expect(run(statement, [theirs.owner.workshopId, made.tank.id])).rejects.toMatchObject(foreign);
+    await expect(run(statement, [theirs.owner.workshopId, made.tank.id])).rejects.toMatchObject(
+      foreign,
+    );
   });
 
   it('a draft of their tank, or saved by one of them', async () => {
@@ -67,7 +75,8 @@ describe('the database itself refuses a link into another workshop', () => {
   });
 
   it('our tank handed over to one of them', async () => {
-    const statement = 'INSERT INTO handovers (tank_id, user_id, workshop_id, handed_over_by, handed_over_at) VALUES (?, ?, ?, ?, ?)';
+    const statement =
+      'INSERT INTO handovers (tank_id, user_id, workshop_id, handed_over_by, handed_over_at) VALUES (?, ?, ?, ?, ?)';
     const { workshopId } = ours.owner;
     const values = [made.tank.id, theirs.owner.userId, workshopId, ours.fitter.userId, now];
     await expect(run(statement, values)).rejects.toMatchObject(foreign);
@@ -78,7 +87,15 @@ describe('the database itself refuses a link into another workshop', () => {
       depth_mm, volume_l, usable_l, room_l, mass_kg, plus_minus_l, recorded_by, recorded_at)
       VALUES (?, ?, ?, ?, 'k', 'h', ?, 1, 1, 1, 1, 1, 1, ?, ?)`;
     const { workshopId, userId } = ours.fitter;
-    const values = (revisionId: string) => [id, workshopId, made.tank.id, revisionId, now, userId, now];
+    const values = (revisionId: string) => [
+      id,
+      workshopId,
+      made.tank.id,
+      revisionId,
+      now,
+      userId,
+      now,
+    ];
     await expect(run(statement, values(other.revision.id))).rejects.toMatchObject(foreign);
     const second = await addIssuedTank(house, ours, { name: 'Second' });
     await expect(run(statement, values(second.revision.id))).rejects.toMatchObject(foreign);
@@ -86,7 +103,8 @@ describe('the database itself refuses a link into another workshop', () => {
   });
 
   it('a session in a workshop that the person is no member of', async () => {
-    const statement = 'INSERT INTO sessions (token_hash, workshop_id, user_id, created_at, expires_at, ends_at) VALUES (?, ?, ?, ?, ?, ?)';
+    const statement =
+      'INSERT INTO sessions (token_hash, workshop_id, user_id, created_at, expires_at, ends_at) VALUES (?, ?, ?, ?, ?, ?)';
     const values = ['h'.repeat(64), theirs.owner.workshopId, ours.owner.userId, now, now, now];
     await expect(run(statement, values)).rejects.toMatchObject(foreign);
   });

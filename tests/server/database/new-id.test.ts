@@ -11,7 +11,14 @@ it('makes ids of version 7 that carry their millisecond and do not repeat', () =
 });
 
 it('knows its own form only', () => {
-  for (const text of ['', '1', newId().toUpperCase(), newId().replace('-7', '-4'), `${newId()} `, crypto.randomUUID()]) {
+  for (const text of [
+    '',
+    '1',
+    newId().toUpperCase(),
+    newId().replace('-7', '-4'),
+    `${newId()} `,
+    crypto.randomUUID(),
+  ]) {
     expect(isId(text)).toBe(false);
   }
 });

@@ -6,7 +6,9 @@ let fresh: FreshDatabase;
 beforeAll(async () => {
   fresh = await freshDatabase();
   const { sequelize } = fresh.database;
-  await sequelize.query('CREATE TABLE pots (id INT PRIMARY KEY, amount INT NOT NULL) ENGINE=InnoDB');
+  await sequelize.query(
+    'CREATE TABLE pots (id INT PRIMARY KEY, amount INT NOT NULL) ENGINE=InnoDB',
+  );
   await sequelize.query('INSERT INTO pots VALUES (1, 0), (2, 0)');
 });
 afterAll(() => fresh.drop());
@@ -37,7 +39,10 @@ describe('inTransaction', () => {
         await raise(second);
       });
     await Promise.all([move(1, 2), move(2, 1)]);
-    expect(await fresh.sql('SELECT amount FROM pots ORDER BY id')).toEqual([{ amount: 2 }, { amount: 2 }]);
+    expect(await fresh.sql('SELECT amount FROM pots ORDER BY id')).toEqual([
+      { amount: 2 },
+      { amount: 2 },
+    ]);
     // one of them was the victim and began again
     expect(runs).toBe(3);
   });

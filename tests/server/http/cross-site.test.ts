@@ -18,7 +18,11 @@ const sources: [string, Record<string, string>, boolean][] = [
   ['a page of ours, new browser', { origin: ownOrigin, 'sec-fetch-site': 'same-origin' }, true],
   ['a page of ours, old browser', { origin: ownOrigin }, true],
   ['typed by the person', { origin: '', 'sec-fetch-site': 'none' }, true],
-  ['another site, new browser', { origin: 'https://evil.example', 'sec-fetch-site': 'cross-site' }, false],
+  [
+    'another site, new browser',
+    { origin: 'https://evil.example', 'sec-fetch-site': 'cross-site' },
+    false,
+  ],
   ['another site, old browser', { origin: 'https://evil.example' }, false],
   ['a sibling host', { origin: 'http://x.127.0.0.1:4321', 'sec-fetch-site': 'same-site' }, false],
   ['another port', { origin: 'http://127.0.0.1:4322', 'sec-fetch-site': 'same-site' }, false],
@@ -43,24 +47,30 @@ const pathOf: Record<string, string> = {
 };
 
 describe.each(sources)('with the cookie, from %s', (_name, headers, ours) => {
-  it.each(methods.flatMap((method) => types.map((type) => [method, type] as const)))('%s %s', async (method, type) => {
-    const mine = await cookieOf(house, team.manager);
-    const sent = { 'content-type': type, ...headers };
-    if (type === '') delete (sent as Record<string, string>)['content-type'];
-    const response = await callApi(house, method, pathOf[method]!, {
-      cookie: mine,
-      headers: sent,
-      ...(method === 'DELETE' ? {} : { raw: new TextEncoder().encode('{"name":"Van","kind":"vehicle"}') }),
-    });
-    if (!ours) {
-      expect(response.status).toBe(403);
-      expect((await callApi(house, 'GET', '/api/v1/me', { cookie: mine })).status).toBe(200);
-    } else {
-      expect(response.status).not.toBe(403);
-      // only JSON is read, whoever sends it
-      if (method !== 'DELETE' && type !== 'application/json') expect([404, 415]).toContain(response.status);
-    }
-  });
+  it.each(methods.flatMap((method) => types.map((type) => [method, type] as const)))(
+    '%s %s',
+    async (method, type) => {
+      const mine = await cookieOf(house, team.manager);
+      const sent = { 'content-type': type, ...headers };
+      if (type === '') delete (sent as Record<string, string>)['content-type'];
+      const response = await callApi(house, method, pathOf[method]!, {
+        cookie: mine,
+        headers: sent,
+        ...(method === 'DELETE'
+          ? {}
+          : { raw: new TextEncoder().encode('{"name":"Van","kind":"vehicle"}') }),
+      });
+      if (!ours) {
+        expect(response.status).toBe(403);
+        expect((await callApi(house, 'GET', '/api/v1/me', { cookie: mine })).status).toBe(200);
+      } else {
+        expect(response.status).not.toBe(403);
+        // only JSON is read, whoever sends it
+        if (method !== 'DELETE' && type !== 'application/json')
+          expect([404, 415]).toContain(response.status);
+      }
+    },
+  );
 });
 
 it('wrote nothing but what our own pages sent', async () => {
@@ -78,7 +88,10 @@ it('reading is not refused: nobody else may see the answer anyway', async () => 
 
 it('a program without a cookie need not say where it comes from', async () => {
   const json = { email: team.manager.email, password };
-  const response = await callApi(house, 'POST', '/api/v1/session', { json, headers: { origin: '' } });
+  const response = await callApi(house, 'POST', '/api/v1/session', {
+    json,
+    headers: { origin: '' },
+  });
   expect(response.status).toBe(204);
 });
 

@@ -16,7 +16,8 @@ beforeAll(async () => {
 });
 afterAll(() => house.drop());
 
-const read = (tankId: string) => callApi(house, 'GET', `/api/v1/tanks/${tankId}/design`, { cookie });
+const read = (tankId: string) =>
+  callApi(house, 'GET', `/api/v1/tanks/${tankId}/design`, { cookie });
 const save = (tankId: string, design: unknown, etag: string | null, who = cookie) =>
   callApi(house, 'PUT', `/api/v1/tanks/${tankId}/design`, {
     cookie: who,
@@ -88,7 +89,7 @@ it('loses no save of six editors who save as fast as they can', async () => {
   const saves = 5;
   let refused = 0;
   const edit = async (editor: number) => {
-    for (let done = 0; done < saves; ) {
+    for (let done = 0; done < saves;) {
       const current = await read(tank.id);
       const design = (await current.json()) as TankDocument;
       const mine = { ...design.solids[0]!, id: `e${editor}-${done}` };
@@ -109,10 +110,15 @@ it('loses no save of six editors who save as fast as they can', async () => {
 
 it('refuses a document that does not fit, with pointers, and keeps the draft', async () => {
   const { tank } = await addDraft(house, team);
-  const broken = { ...boxDesign(), solids: [{ ...boxDesign().solids[0], length: -5, colour: 'red' }] };
+  const broken = {
+    ...boxDesign(),
+    solids: [{ ...boxDesign().solids[0], length: -5, colour: 'red' }],
+  };
   const response = await save(tank.id, broken, '"1"');
   expect(response.status).toBe(422);
-  const pointers = (await response.json()).errors.map(({ pointer }: { pointer: string }) => pointer);
+  const pointers = (await response.json()).errors.map(
+    ({ pointer }: { pointer: string }) => pointer,
+  );
   expect(pointers).toContain('/solids/0/length');
   expect(pointers).toContain('/solids/0/colour');
   expect(await (await read(tank.id)).json()).toEqual(boxDesign());

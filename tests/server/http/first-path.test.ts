@@ -24,7 +24,9 @@ it('goes from sign-in to litres at a dip', async () => {
 
   const post = async (path: string, json: unknown, headers: Record<string, string> = {}) =>
     callApi(house, 'POST', path, { cookie, json, headers });
-  const installation = await (await post('/api/v1/installations', { name: 'Hut', kind: 'place' })).json();
+  const installation = await (
+    await post('/api/v1/installations', { name: 'Hut', kind: 'place' })
+  ).json();
   const made = await post('/api/v1/tanks', {
     installationId: installation.id,
     name: 'Cistern',
@@ -41,7 +43,12 @@ it('goes from sign-in to litres at a dip', async () => {
   const revision = await issued.json();
   expect(revision).toMatchObject({ letter: 'A', capacityL: 150, current: true });
 
-  const volume = await callApi(house, 'GET', `/api/v1/revisions/${revision.id}/volume?depthMm=123.5`, { cookie });
+  const volume = await callApi(
+    house,
+    'GET',
+    `/api/v1/revisions/${revision.id}/volume?depthMm=123.5`,
+    { cookie },
+  );
   // closed form: 1000 × 500 × 123.5 mm³ = 61.75 L
   expect((await volume.json()).volumeL).toBeCloseTo(61.75, 9);
   const again = await callApi(house, 'GET', `/api/v1/tanks/${tank.id}`, { cookie });

@@ -44,51 +44,102 @@ const members = operations.filter(({ access }) => access === 'member');
 describe('every call with a body', () => {
   it('is known', () => expect(withBody.length).toBeGreaterThanOrEqual(10));
 
-  describe.each(withBody.map((operation) => [`${operation.method} ${operation.path}`, operation] as const))(
-    '%s',
-    (_name, operation) => {
-      const send = (raw: BodyInit, type = 'application/json') =>
-        callApi(house, operation.method, pathOf(operation), {
-          cookie,
-          raw,
-          headers: { 'content-type': type },
-          clientAddress: anotherAddress(),
-        });
-
-      it('takes JSON only', async () => {
-        for (const type of ['text/plain', 'application/xml', 'application/jsonx', 'json', '']) {
-          await expectProblem(await send('{}', type), 415);
-        }
+  describe.each(
+    withBody.map((operation) => [`${operation.method} ${operation.path}`, operation] as const),
+  )('%s', (_name, operation) => {
+    const send = (raw: BodyInit, type = 'application/json') =>
+      callApi(house, operation.method, pathOf(operation), {
+        cookie,
+        raw,
+        headers: { 'content-type': type },
+        clientAddress: anotherAddress(),
       });
 
-      it('cannot read what is not JSON', async () => {
-        for (const raw of ['', ' ', '{', '{"a":}', "{'a':1}", 'undefined', '\u0000', '[1,]']) {
-          await expectProblem(await send(raw), 400);
-        }
-        await expectProblem(await send(new Uint8Array([0x22, 0xff, 0xfe, 0x22])), 400);
-      });
+    it('takes JSON only', async () => {
+      for (const type of ['text/plain', 'application/xml', 'application/jsonx', 'json', '']) {
+        await expectProblem(await send('{}', type), 415);
+      }
+    });
 
-      it('says of JSON of another shape which field is wrong', async () => {
-        for (const raw of ['null', 'true', '5', '"x"', '[]', '[[[]]]', '{"__proto__":{"a":1}}', '{"constructor":1}']) {
-          const problem = await expectProblem(await send(raw), 422);
-          expect((problem['errors'] as unknown[]).length).toBeGreaterThan(0);
-        }
-      });
+    it('cannot read what is not JSON', async () => {
+      for (const raw of ['', ' ', '{', '{"a":}', "{'a':1}", 'undefined', '\u0000', '[1,]']) {
+        await expectProblem(await send(raw), 400);
+      }
+      await expectProblem(await send(new Uint8Array([0x22, 0xff, 0xfe, 0x22])), 400);
+    });
 
-      it('refuses a body over 1 MB', async () => {
-        await expectProblem(await send(`{"name":"${'x'.repeat(1024 * 1024)}"}`), 413);
-      });
-    },
-  );
+    it('says of JSON of another shape which field is wrong', async () => {
+      for (const raw of [
+        'null',
+        'true',
+        '5',
+        '"x"',
+        '[]',
+        '[[[]]]',
+        '{"__proto__":{"a":1}}',
+        '{"constructor":1}',
+      ]) {
+        const problem = await expectProblem(await send(raw), 422);
+        expect((problem['errors'] as unknown[]).length).toBeGreaterThan(0);
+      }
+    });
+
+    it('refuses a body over 1 MB', async () => {
+      await expectProblem(await send(`{"name":"${'x'.repeat(1024 * 1024)}"}`), 413);
+    });
+  });
 });
 
 describe('bodies nobody foresaw', () => {
   const leaf = fc.oneof(
-    fc.constantFrom(null, true, '', '=1+1', '\u0000', '\ud800', '🛢', 'x'.repeat(5000), 1e308, -1e308, 5e-324, -0, 1e21),
+    fc.constantFrom(
+      null,
+      true,
+      '',
+      '=1+1',
+      '\u0000',
+      '\ud800',
+      '🛢',
+      'x'.repeat(5000),
+      1e308,
+      -1e308,
+      5e-324,
+      -0,
+      1e21,
+    ),
     fc.double({ noNaN: true, noDefaultInfinity: true }),
     fc.string({ unit: 'binary' }),
   );
-  const names = ['name', 'kind', 'liquid', 'installationId', 'settings', 'stepMm', 'atMm', 'at', 'depthMm', 'note', 'userId', 'solids', 'id', 'role', 'length', 'width', 'height', 'turn', 'format', 'version', 'wall', 'stick', 'email', 'password', 'outletMm', 'safeFillPercent', 'densityKgPerM3', 'measuredBy'];
+  const names = [
+    'name',
+    'kind',
+    'liquid',
+    'installationId',
+    'settings',
+    'stepMm',
+    'atMm',
+    'at',
+    'depthMm',
+    'note',
+    'userId',
+    'solids',
+    'id',
+    'role',
+    'length',
+    'width',
+    'height',
+    'turn',
+    'format',
+    'version',
+    'wall',
+    'stick',
+    'email',
+    'password',
+    'outletMm',
+    'safeFillPercent',
+    'densityKgPerM3',
+    'measuredBy',
+  ];
   const json = fc.letrec((tie) => ({
     value: fc.oneof(
       { depthSize: 'small', withCrossShrink: true },
@@ -102,8 +153,20 @@ describe('bodies nobody foresaw', () => {
     signIn: { email: 'a@b.example', password: 'x' },
     signUp: { workshopName: 'W', name: 'N', email: 'n@w.example', password: 'long-enough-one' },
     createInstallation: { name: 'Van', kind: 'vehicle' },
-    createTank: { installationId: 'i', name: 'T', liquid: 'diesel', design: boxDesign(), settings: { outletMm: 1 } },
-    changeTank: { name: 'T', liquid: 'other', densityKgPerM3: 900, safeFillPercent: 90, measuredBy: 'stated' },
+    createTank: {
+      installationId: 'i',
+      name: 'T',
+      liquid: 'diesel',
+      design: boxDesign(),
+      settings: { outletMm: 1 },
+    },
+    changeTank: {
+      name: 'T',
+      liquid: 'other',
+      densityKgPerM3: 900,
+      safeFillPercent: 90,
+      measuredBy: 'stated',
+    },
     saveDesign: boxDesign(),
     handOverTank: { userId: 'u' },
     recordReading: { at: '2026-11-30T08:15:00Z', depthMm: 10, note: 'n' },
@@ -134,7 +197,10 @@ describe('bodies nobody foresaw', () => {
     const operation = operations.find((one) => one.id === id)!;
     let caller = 0;
     let asked = 0;
-    const bodies = fc.oneof({ arbitrary: json, weight: 1 }, { arbitrary: damaged(right[id]), weight: 3 });
+    const bodies = fc.oneof(
+      { arbitrary: json, weight: 1 },
+      { arbitrary: damaged(right[id]), weight: 3 },
+    );
     await fc.assert(
       fc.asyncProperty(bodies, async (body) => {
         caller += 1;
@@ -155,33 +221,51 @@ describe('bodies nobody foresaw', () => {
 });
 
 describe('the same for every call', () => {
-  it.each(members.map(({ method, path }) => [method, path]))('%s %s asks for a session', async (method, path) => {
-    const response = await callApi(house, method, pathOf({ path }), { json: method === 'GET' ? undefined : {} });
-    const problem = await expectProblem(response, 401);
-    expect(problem['code']).toBe('unauthenticated');
-  });
-
-  it.each(operations.filter(({ path }) => path.includes('{id}')).map(({ method, path }) => [method, path]))(
-    '%s %s finds nothing by an id of another form',
+  it.each(members.map(({ method, path }) => [method, path]))(
+    '%s %s asks for a session',
     async (method, path) => {
-      for (const id of ['1', 'null', "'%20OR%201=1", '..%2f..', made.tank.id.toUpperCase(), '%00', '٣'.repeat(36)]) {
-        const response = await callApi(house, method, path.replace('{id}', id), {
-          cookie,
-          json: method === 'GET' ? undefined : {},
-          headers: { 'idempotency-key': 'k', 'if-match': '"1"' },
-        });
-        await expectProblem(response, 404);
-      }
+      const response = await callApi(house, method, pathOf({ path }), {
+        json: method === 'GET' ? undefined : {},
+      });
+      const problem = await expectProblem(response, 401);
+      expect(problem['code']).toBe('unauthenticated');
     },
   );
+
+  it.each(
+    operations
+      .filter(({ path }) => path.includes('{id}'))
+      .map(({ method, path }) => [method, path]),
+  )('%s %s finds nothing by an id of another form', async (method, path) => {
+    for (const id of [
+      '1',
+      'null',
+      "'%20OR%201=1",
+      '..%2f..',
+      made.tank.id.toUpperCase(),
+      '%00',
+      '٣'.repeat(36),
+    ]) {
+      const response = await callApi(house, method, path.replace('{id}', id), {
+        cookie,
+        json: method === 'GET' ? undefined : {},
+        headers: { 'idempotency-key': 'k', 'if-match': '"1"' },
+      });
+      await expectProblem(response, 404);
+    }
+  });
 
   it('another method is 405 with those that there are', async () => {
     const addresses = Object.keys(routes).filter((address) => address !== '/api/{path}');
     expect(addresses.length).toBeGreaterThanOrEqual(20);
     for (const address of addresses) {
-      const own = operations.filter(({ path }) => path === address).map(({ method }) => method as string);
+      const own = operations
+        .filter(({ path }) => path === address)
+        .map(({ method }) => method as string);
       const path = pathOf({ path: address });
-      for (const method of ['PUT', 'PATCH', 'DELETE', 'POST', 'OPTIONS'].filter((name) => !own.includes(name))) {
+      for (const method of ['PUT', 'PATCH', 'DELETE', 'POST', 'OPTIONS'].filter(
+        (name) => !own.includes(name),
+      )) {
         const response = await callApi(house, method, path, { cookie });
         await expectProblem(response, 405);
         const allow = response.headers.get('allow')!.split(', ');
@@ -198,7 +282,12 @@ describe('the same for every call', () => {
   });
 
   it('an address that is not there is 404', async () => {
-    for (const path of ['/api/v1/nothing', '/api/v2/tanks', '/api/v1', `/api/v1/tanks/${made.tank.id}/x`]) {
+    for (const path of [
+      '/api/v1/nothing',
+      '/api/v2/tanks',
+      '/api/v1',
+      `/api/v1/tanks/${made.tank.id}/x`,
+    ]) {
       await expectProblem(await callApi(house, 'GET', path, { cookie }), 404);
     }
   });
@@ -224,7 +313,12 @@ describe('the same for every call', () => {
       ['chart.pdf', '?volume=gal'],
     ];
     for (const [call, query] of asks) {
-      const response = await callApi(house, 'GET', `/api/v1/revisions/${made.revision.id}/${call}${query}`, { cookie });
+      const response = await callApi(
+        house,
+        'GET',
+        `/api/v1/revisions/${made.revision.id}/${call}${query}`,
+        { cookie },
+      );
       const problem = await expectProblem(response, 422);
       expect((problem['errors'] as unknown[]).length).toBeGreaterThan(0);
     }
@@ -235,11 +329,20 @@ describe('a fault of ours', () => {
   it('is told without its cause, which stands in the log under the request’s id', async () => {
     await house.database.sequelize.query('DROP TRIGGER strapping_rows_refuse_update');
     const ids = { replacements: [made.revision.id] };
-    await house.database.sequelize.query('UPDATE strapping_rows SET volume_l = 1 WHERE revision_id = ? AND row_no = 1', ids);
-    const response = await callApi(house, 'GET', `/api/v1/revisions/${made.revision.id}/table`, { cookie });
+    await house.database.sequelize.query(
+      'UPDATE strapping_rows SET volume_l = 1 WHERE revision_id = ? AND row_no = 1',
+      ids,
+    );
+    const response = await callApi(house, 'GET', `/api/v1/revisions/${made.revision.id}/table`, {
+      cookie,
+    });
     const problem = await expectProblem(response, 500);
     expect(JSON.stringify(problem)).not.toContain('hash');
-    expect(house.logged.some((line) => line.includes(String(problem['requestId'])) && line.includes('hash'))).toBe(true);
+    expect(
+      house.logged.some(
+        (line) => line.includes(String(problem['requestId'])) && line.includes('hash'),
+      ),
+    ).toBe(true);
   });
 
   it('is 503 when the database does not answer', async () => {

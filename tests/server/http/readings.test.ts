@@ -57,7 +57,9 @@ it('keeps a reading once: 201, again the same answer, another body 422', async (
 it('keeps one of twenty that come at once under the same key', async () => {
   const answers = await Promise.all(Array.from({ length: 20 }, () => send('key-2', dip)));
   expect(answers.map(({ status }) => status)).toEqual(Array.from({ length: 20 }, () => 201));
-  const ids = new Set((await Promise.all(answers.map((answer) => answer.json()))).map(({ id }) => id));
+  const ids = new Set(
+    (await Promise.all(answers.map((answer) => answer.json()))).map(({ id }) => id),
+  );
   expect(ids.size).toBe(1);
   expect(await stored('key-2')).toHaveLength(1);
 });
@@ -91,12 +93,19 @@ it('asks a reading outside the stick back and keeps nothing', async () => {
 it('refuses senders that are not settled yet, by name', async () => {
   const response = await send('ohms', { at: dip.at, ohms: 134.5 });
   expect(response.status).toBe(422);
-  const pointers = (await response.json()).errors.map(({ pointer }: { pointer: string }) => pointer);
+  const pointers = (await response.json()).errors.map(
+    ({ pointer }: { pointer: string }) => pointer,
+  );
   expect(pointers).toContain('/ohms');
 });
 
 it('refuses a time that cannot be', async () => {
-  for (const at of ['0000-01-01T00:00:00Z', '1969-12-31T23:59:59Z', '9999-12-31T23:59:59Z', 'yesterday']) {
+  for (const at of [
+    '0000-01-01T00:00:00Z',
+    '1969-12-31T23:59:59Z',
+    '9999-12-31T23:59:59Z',
+    'yesterday',
+  ]) {
     const response = await send('when', { ...dip, at });
     expect(response.status).toBe(422);
     expect((await response.json()).errors[0].pointer).toBe('/at');

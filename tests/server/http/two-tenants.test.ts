@@ -81,7 +81,9 @@ describe('a thing of another workshop is not found', () => {
 });
 
 it('lists of another workshop hold nothing of ours', async () => {
-  const lists = operations.filter(({ id, path }) => id.startsWith('list') && !path.includes('{id}'));
+  const lists = operations.filter(
+    ({ id, path }) => id.startsWith('list') && !path.includes('{id}'),
+  );
   expect(lists.length).toBeGreaterThanOrEqual(4);
   for (const { method, path } of lists) {
     const response = await callApi(house, method, path, { cookie });
@@ -100,16 +102,23 @@ it('a tank cannot be put into an installation of another workshop', async () => 
 it('a tank cannot be handed over to somebody of another workshop', async () => {
   const fitters = await cookieOf(house, ours.fitter);
   const path = `/api/v1/tanks/${made.tank.id}/handovers`;
-  const response = await callApi(house, 'POST', path, { cookie: fitters, json: { userId: theirs.owner.userId } });
+  const response = await callApi(house, 'POST', path, {
+    cookie: fitters,
+    json: { userId: theirs.owner.userId },
+  });
   expect(response.status).toBe(422);
   expect((await response.json()).errors[0].pointer).toBe('/userId');
 });
 
 describe('an owner sees only what was handed over', () => {
   it('in the list', async () => {
-    const tanks = await (await callApi(house, 'GET', '/api/v1/tanks', { cookie: ownersCookie })).json();
+    const tanks = await (
+      await callApi(house, 'GET', '/api/v1/tanks', { cookie: ownersCookie })
+    ).json();
     expect(tanks.map((tank: { id: string }) => tank.id)).toEqual([made.tank.id]);
-    const places = await (await callApi(house, 'GET', '/api/v1/installations', { cookie: ownersCookie })).json();
+    const places = await (
+      await callApi(house, 'GET', '/api/v1/installations', { cookie: ownersCookie })
+    ).json();
     expect(places.map((place: { id: string }) => place.id)).toEqual([made.installationId]);
   });
 
@@ -124,6 +133,8 @@ describe('an owner sees only what was handed over', () => {
     const path = `/api/v1/tanks/${made.tank.id}`;
     const tank = await (await callApi(house, 'GET', path, { cookie: ownersCookie })).json();
     expect(tank.draftDiffers).toBe(false);
-    expect((await callApi(house, 'GET', `${path}/design`, { cookie: ownersCookie })).status).toBe(403);
+    expect((await callApi(house, 'GET', `${path}/design`, { cookie: ownersCookie })).status).toBe(
+      403,
+    );
   });
 });

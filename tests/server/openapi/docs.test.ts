@@ -7,13 +7,18 @@ import { statusOf } from '~/server/http/problem';
 const page = readFileSync('docs/api.md', 'utf8');
 
 it('docs/api.md lists every call, and no other', () => {
-  const listed = [...page.matchAll(/^\| `((?:GET|POST|PUT|PATCH|DELETE) \/[^`]+)` \|/gm)].map((match) => match[1]!);
+  const listed = [...page.matchAll(/^\| `((?:GET|POST|PUT|PATCH|DELETE) \/[^`]+)` \|/gm)].map(
+    (match) => match[1]!,
+  );
   const there = operations.map(({ method, path }) => `${method} ${path}`);
   expect([...listed].sort()).toEqual([...there].sort());
 });
 
 it('docs/api.md lists every code with its status', () => {
-  const listed = [...page.matchAll(/^\| (\d{3}) \| `([a-z-]+)` \|/gm)].map((match) => [match[2]!, Number(match[1])]);
+  const listed = [...page.matchAll(/^\| (\d{3}) \| `([a-z-]+)` \|/gm)].map((match) => [
+    match[2]!,
+    Number(match[1]),
+  ]);
   expect(Object.fromEntries(listed)).toEqual(statusOf);
 });
 

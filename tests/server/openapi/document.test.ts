@@ -28,7 +28,9 @@ describe('the OpenAPI document', () => {
   it('has every method of every route, and no other', () => {
     const fromRoutes = Object.entries(routes)
       .filter(([address]) => address !== '/api/{path}')
-      .flatMap(([address, route]) => verbs.filter((verb) => verb in route).map((verb) => `${verb} ${address}`));
+      .flatMap(([address, route]) =>
+        verbs.filter((verb) => verb in route).map((verb) => `${verb} ${address}`),
+      );
     const fromTable = operations.map(({ method, path }) => `${method} ${path}`);
     expect([...fromRoutes].sort()).toEqual([...fromTable].sort());
     const fromDocument = Object.entries(document.paths).flatMap(([path, methods]) =>
@@ -38,7 +40,8 @@ describe('the OpenAPI document', () => {
   });
 
   it('lets every route answer the methods it lacks', () => {
-    for (const [address, route] of Object.entries(routes)) expect(route, address).toHaveProperty('ALL');
+    for (const [address, route] of Object.entries(routes))
+      expect(route, address).toHaveProperty('ALL');
   });
 
   it('names every operation once', () => {
@@ -47,7 +50,9 @@ describe('the OpenAPI document', () => {
   });
 
   it('refers only to shapes that it holds', () => {
-    const references = [...JSON.stringify(document).matchAll(/"\$ref":"([^"]+)"/g)].map((match) => match[1]!);
+    const references = [...JSON.stringify(document).matchAll(/"\$ref":"([^"]+)"/g)].map(
+      (match) => match[1]!,
+    );
     expect(references.length).toBeGreaterThan(20);
     for (const reference of references) {
       expect(reference).toMatch(/^#\/components\/schemas\//);

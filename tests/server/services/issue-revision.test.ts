@@ -3,7 +3,9 @@ import { DipwrightError } from '~/domain/errors';
 import { createComputePool, type ComputePool } from '~/server/jobs/compute-pool';
 import { changeTank } from '~/server/services/change-tank';
 import { issueRevision } from '~/server/services/issue-revision';
+import { levelPerReading } from '~/server/services/level-per-reading';
 import { listRevisions } from '~/server/services/list-revisions';
+import { lookUpVolume } from '~/server/services/look-up-volume';
 import { readTable } from '~/server/services/read-table';
 import { readTank } from '~/server/services/read-tank';
 import { saveDraft } from '~/server/services/save-draft';
@@ -30,9 +32,10 @@ const withPool = (pool: Partial<ComputePool>) => ({
 const kept = async (tankId: string) => ({
   revisions: (await house.sql('SELECT id FROM revisions WHERE tank_id = ?', [tankId])).length,
   rows: (
-    await house.sql('SELECT row_no FROM strapping_rows s JOIN revisions r ON r.id = s.revision_id WHERE r.tank_id = ?', [
-      tankId,
-    ])
+    await house.sql(
+      'SELECT row_no FROM strapping_rows s JOIN revisions r ON r.id = s.revision_id WHERE r.tank_id = ?',
+      [tankId],
+    )
   ).length,
 });
 
@@ -52,7 +55,9 @@ describe('what is issued', () => {
     const letters = [];
     for (const stepMm of [10, 20, 30]) letters.push((await issue(tank.id, stepMm)).letter);
     expect(letters).toEqual(['A', 'B', 'C']);
-    const all = await listRevisions(house.context, team.owner, { tankId: tank.id }).catch(() => null);
+    const all = await listRevisions(house.context, team.owner, { tankId: tank.id }).catch(
+      () => null,
+    );
     expect(all).toBeNull();
     const seen = await listRevisions(house.context, team.fitter, { tankId: tank.id });
     expect(seen.map(({ letter, current }) => [letter, current])).toEqual([
@@ -89,7 +94,11 @@ describe('is refused', () => {
     // the same design with its keys in another order is the same design
     const { stick: _none, ...design } = { stick: null, ...boxDesign() };
     const turned = Object.fromEntries(Object.entries(design).reverse()) as typeof design;
-    await saveDraft(house.context, team.designer, { tankId: tank.id, etags: ['"1"'], design: turned });
+    await saveDraft(house.context, team.designer, {
+      tankId: tank.id,
+      etags: ['"1"'],
+      design: turned,
+    });
     await expect(issue(tank.id)).rejects.toMatchObject({ code: 'conflict' });
     expect((await kept(tank.id)).revisions).toBe(1);
   });
@@ -98,7 +107,11 @@ describe('is refused', () => {
     const { tank } = await addDraft(house, team);
     const context = withPool({
       async issue(design, settings, stepMm) {
-        await saveDraft(house.context, team.manager, { tankId: tank.id, etags: ['"1"'], design: boxDesign(700) });
+        await saveDraft(house.context, team.manager, {
+          tankId: tank.id,
+          etags: ['"1"'],
+          design: boxDesign(700),
+        });
         return boxPool().issue(design, settings, stepMm);
       },
     });
@@ -133,7 +146,9 @@ describe('all or nothing', () => {
       async issue(design, settings, stepMm) {
         const table = await boxPool().issue(design, settings, stepMm);
         // the second thousand of rows fails: the first has been sent by then
-        const rows = table.rows.map((row, index) => (index === 1200 ? { ...row, volumeL: Number.NaN } : row));
+        const rows = table.rows.map((row, index) =>
+          index === 1200 ? { ...row, volumeL: Number.NaN } : row,
+        );
         return { ...table, rows };
       },
     });
@@ -155,7 +170,9 @@ describe('all or nothing', () => {
 
   it('five who issue different steps at once get five letters', async () => {
     const { tank } = await addDraft(house, team);
-    const revisions = await Promise.all([5, 10, 15, 20, 30].map((stepMm) => issue(tank.id, stepMm)));
+    const revisions = await Promise.all(
+      [5, 10, 15, 20, 30].map((stepMm) => issue(tank.id, stepMm)),
+    );
     expect(revisions.map(({ letter }) => letter).sort()).toEqual(['A', 'B', 'C', 'D', 'E']);
   });
 });
@@ -169,9 +186,9 @@ describe('what the database holds is checked before it is given out', () => {
       'UPDATE strapping_rows SET volume_l = volume_l + 0.001 WHERE revision_id = ? AND row_no = 7',
       { replacements: [revision.id] },
     );
-    await expect(readTable(house.context, team.fitter, { revisionId: revision.id })).rejects.toThrow(
-      /does not match its hash/,
-    );
+    await expect(
+      readTable(house.context, team.fitter, { revisionId: revision.id }),
+    ).rejects.toThrow(/does not match its hash/);
   });
 });
 
@@ -181,10 +198,34 @@ describe('with the real engine', () => {
 
   it('refuses a shape in two pieces, and keeps nothing', async () => {
     const design = boxDesign();
-    const apart = { ...design.solids[0]!, id: 'apart', at: [5000, 0, 0] as [number, number, number] };
-    const { tank } = await addDraft(house, team, { design: { ...design, solids: [...design.solids, apart] } });
+    const apart = {
+      ...design.solids[0]!,
+      id: 'apart',
+      at: [5000, 0, 0] as [number, number, number],
+    };
+    const { tank } = await addDraft(house, team, {
+      design: { ...design, solids: [...design.solids, apart] },
+    });
     const context = { ...house.context, computePool: pool };
     await expect(issue(tank.id, 10, context)).rejects.toMatchObject({ code: 'invalid' });
     expect(await kept(tank.id)).toEqual({ revisions: 0, rows: 0 });
+  });
+
+  it('freezes the same share of a tilted stick as the engine computes with', async () => {
+    const design = {
+      ...boxDesign(),
+      attitude: { pitch: 5, roll: -3 },
+      stick: { at: [500, 250] as [number, number] },
+    };
+    const { frame } = await pool.sketch(design);
+    expect(levelPerReading(design)).toBeCloseTo(frame.levelPerReading, 14);
+    const { tank } = await addDraft(house, team, { design });
+    const context = { ...house.context, computePool: pool };
+    const revision = await issue(tank.id, 10, context);
+    // between rows too, where the surface meets neither floor nor roof: 0.5 L a millimetre of stick
+    const look = (depthMm: number) =>
+      lookUpVolume(context, team.fitter, { revisionId: revision.id, depthMm });
+    const [low, high] = [await look(120), await look(133.7)];
+    expect(high.volumeL - low.volumeL).toBeCloseTo(13.7 * 0.5, 6);
   });
 });

@@ -68,22 +68,34 @@ const matrix: Record<string, Row> = {
   listTankOverviews: { roles: builders, run: (actor) => listTankOverviews(context(), actor) },
   listBrims: { roles: everyone, run: (actor) => listBrims(context(), actor, { tankId: tankId() }) },
   readTank: { roles: everyone, run: (actor) => readTank(context(), actor, { tankId: tankId() }) },
-  readTankCard: { roles: everyone, run: (actor) => readTankCard(context(), actor, { tankId: tankId() }) },
+  readTankCard: {
+    roles: everyone,
+    run: (actor) => readTankCard(context(), actor, { tankId: tankId() }),
+  },
   createTank: {
     roles: designers,
     run: (actor) =>
-      createTank(context(), actor, { installationId: made.installationId, name: 'New', liquid: 'diesel' }),
+      createTank(context(), actor, {
+        installationId: made.installationId,
+        name: 'New',
+        liquid: 'diesel',
+      }),
   },
   changeTank: {
     roles: designers,
-    run: (actor) => changeTank(context(), actor, { tankId: tankId(), change: { safeFillPercent: 90 } }),
+    run: (actor) =>
+      changeTank(context(), actor, { tankId: tankId(), change: { safeFillPercent: 90 } }),
   },
   readDraft: { roles: builders, run: (actor) => readDraft(context(), actor, { tankId: tankId() }) },
   saveDraft: {
     roles: designers,
     run: async (actor) => {
       const { tank } = await addDraft(house, team);
-      return saveDraft(context(), actor, { tankId: tank.id, etags: ['"1"'], design: boxDesign(700) });
+      return saveDraft(context(), actor, {
+        tankId: tank.id,
+        etags: ['"1"'],
+        design: boxDesign(700),
+      });
     },
   },
   issueRevision: {
@@ -93,12 +105,18 @@ const matrix: Record<string, Row> = {
       return issueRevision(context(), actor, { tankId: tank.id, stepMm: 10 });
     },
   },
-  listRevisions: { roles: everyone, run: (actor) => listRevisions(context(), actor, { tankId: tankId() }) },
+  listRevisions: {
+    roles: everyone,
+    run: (actor) => listRevisions(context(), actor, { tankId: tankId() }),
+  },
   readRevision: {
     roles: everyone,
     run: (actor) => readRevision(context(), actor, { revisionId: revisionId() }),
   },
-  readTable: { roles: everyone, run: (actor) => readTable(context(), actor, { revisionId: revisionId() }) },
+  readTable: {
+    roles: everyone,
+    run: (actor) => readTable(context(), actor, { revisionId: revisionId() }),
+  },
   lookUpVolume: {
     roles: everyone,
     run: (actor) => lookUpVolume(context(), actor, { revisionId: revisionId(), depthMm: 100 }),
@@ -116,7 +134,10 @@ const matrix: Record<string, Row> = {
     roles: fitters,
     run: (actor) => handOverTank(context(), actor, { tankId: tankId(), userId: team.owner.userId }),
   },
-  listHandovers: { roles: fitters, run: (actor) => listHandovers(context(), actor, { tankId: tankId() }) },
+  listHandovers: {
+    roles: fitters,
+    run: (actor) => listHandovers(context(), actor, { tankId: tankId() }),
+  },
   recordReading: {
     roles: ['manager', 'fitter', 'owner'],
     run: (actor) =>
@@ -126,7 +147,10 @@ const matrix: Record<string, Row> = {
         reading: { at: '2026-11-30T08:15:00Z', depthMm: 120 },
       }),
   },
-  listReadings: { roles: everyone, run: (actor) => listReadings(context(), actor, { tankId: tankId() }) },
+  listReadings: {
+    roles: everyone,
+    run: (actor) => listReadings(context(), actor, { tankId: tankId() }),
+  },
 };
 
 /** Done before anybody is known, for nobody in particular, or by the server itself. */
@@ -144,7 +168,9 @@ it('has a row for every use case', () => {
   const folder = 'src/server/services';
   const found = readdirSync(folder).flatMap((file) => {
     const source = readFileSync(`${folder}/${file}`, 'utf8');
-    return [...source.matchAll(/export async function (\w+)\(\s*_?context\b/g)].map((match) => match[1]!);
+    return [...source.matchAll(/export async function (\w+)\(\s*_?context\b/g)].map(
+      (match) => match[1]!,
+    );
   });
   expect(found.length).toBeGreaterThan(20);
   expect([...found].sort()).toEqual([...Object.keys(matrix), ...withoutRole].sort());

@@ -18,11 +18,19 @@ export interface Made {
 export async function addDraft(
   house: House,
   team: Team,
-  options: { name?: string; design?: TankDocument; settings?: NewTank['settings']; liquid?: NewTank['liquid'] } = {},
+  options: {
+    name?: string;
+    design?: TankDocument;
+    settings?: NewTank['settings'];
+    liquid?: NewTank['liquid'];
+  } = {},
 ): Promise<{ installationId: string; tank: Tank }> {
   const { context } = house;
   const { name = 'Cistern', design = boxDesign(), settings, liquid = 'drinking-water' } = options;
-  const installation = await createInstallation(context, team.designer, { name: `Hut of ${name}`, kind: 'place' });
+  const installation = await createInstallation(context, team.designer, {
+    name: `Hut of ${name}`,
+    kind: 'place',
+  });
   const input = { installationId: installation.id, name, liquid, design, settings };
   return { installationId: installation.id, tank: await createTank(context, team.designer, input) };
 }
@@ -36,7 +44,10 @@ export async function addIssuedTank(
   const { context } = house;
   const draft = await addDraft(house, team, options);
   const tankId = draft.tank.id;
-  const revision = await issueRevision(context, team.designer, { tankId, stepMm: options.stepMm ?? 10 });
+  const revision = await issueRevision(context, team.designer, {
+    tankId,
+    stepMm: options.stepMm ?? 10,
+  });
   await handOverTank(context, team.fitter, { tankId, userId: team.owner.userId });
   return { ...draft, revision };
 }

@@ -12,7 +12,10 @@ export function boxPool(): ComputePool {
     async table(design, readings) {
       const { areaMm2, heightMm } = boxOf(design);
       const depths = 'atMm' in readings ? readings.atMm : stepped(heightMm, readings.stepMm);
-      return { ...totals(areaMm2, heightMm), rows: depths.map((depthMm) => rowAt(areaMm2, depthMm)) };
+      return {
+        ...totals(areaMm2, heightMm),
+        rows: depths.map((depthMm) => rowAt(areaMm2, depthMm)),
+      };
     },
     async issue(design, _settings, stepMm) {
       const { areaMm2, heightMm } = boxOf(design);
@@ -46,7 +49,8 @@ export function boxPool(): ComputePool {
 
 /** Outward, over the corners in the order of their bits x, y, z. */
 const boxTriangles = [
-  0, 2, 1, 1, 2, 3, 4, 5, 6, 5, 7, 6, 0, 1, 4, 1, 5, 4, 2, 6, 3, 3, 6, 7, 0, 4, 2, 2, 4, 6, 1, 3, 5, 3, 7, 5,
+  0, 2, 1, 1, 2, 3, 4, 5, 6, 5, 7, 6, 0, 1, 4, 1, 5, 4, 2, 6, 3, 3, 6, 7, 0, 4, 2, 2, 4, 6, 1, 3, 5,
+  3, 7, 5,
 ];
 
 function boxOf(design: TankDocument) {

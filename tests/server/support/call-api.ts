@@ -8,7 +8,9 @@ type Route = Partial<Record<string, APIRoute>>;
 /** Every route file of the API, by its address, as the framework finds them. */
 export const routes: Record<string, Route> = Object.fromEntries(
   Object.entries(
-    import.meta.glob<Route>(['../../../src/pages/api/**/*.ts', '../../../src/pages/*.ts'], { eager: true }),
+    import.meta.glob<Route>(['../../../src/pages/api/**/*.ts', '../../../src/pages/*.ts'], {
+      eager: true,
+    }),
   )
     .filter(([file]) => !file.includes('/_'))
     .map(([file, route]) => [addressOf(file), route]),
@@ -34,14 +36,23 @@ export interface Sent {
 }
 
 /** What a browser of our own pages, or a program, would get: route, session and problem handling included. */
-export async function callApi(house: House, method: string, path: string, sent: Sent = {}): Promise<Response> {
+export async function callApi(
+  house: House,
+  method: string,
+  path: string,
+  sent: Sent = {},
+): Promise<Response> {
   const url = new URL(path, ownOrigin);
   const headers = new Headers({ origin: house.context.config.http.origin, ...sent.headers });
   if (headers.get('origin') === '') headers.delete('origin');
   if (sent.cookie !== undefined) headers.set('cookie', sent.cookie);
   if (sent.json !== undefined) headers.set('content-type', 'application/json');
   const body = sent.json === undefined ? sent.raw : JSON.stringify(sent.json);
-  const request = new Request(url, { method, headers, ...(body === undefined ? {} : { body, duplex: 'half' }) });
+  const request = new Request(url, {
+    method,
+    headers,
+    ...(body === undefined ? {} : { body, duplex: 'half' }),
+  });
   const { route, params } = find(url.pathname);
   const handler = route[method] ?? route['ALL'];
   if (handler === undefined) throw new Error(`${path} has no ALL.`);
@@ -56,9 +67,12 @@ export async function callApi(house: House, method: string, path: string, sent: 
 
 function find(pathname: string): { route: Route; params: Record<string, string> } {
   for (const [address, route] of Object.entries(routes)) {
-    const pattern = new RegExp(`^${address.replaceAll('.', '\\.').replaceAll(/\{(\w+)\}/g, '(?<$1>[^/]+)')}$`);
+    const pattern = new RegExp(
+      `^${address.replaceAll('.', '\\.').replaceAll(/\{(\w+)\}/g, '(?<$1>[^/]+)')}$`,
+    );
     const match = pattern.exec(pathname);
-    if (match !== null && !address.includes('{path}')) return { route, params: { ...match.groups } };
+    if (match !== null && !address.includes('{path}'))
+      return { route, params: { ...match.groups } };
   }
   return { route: routes['/api/{path}']!, params: {} };
 }

@@ -20,7 +20,9 @@ export interface House extends FreshDatabase {
   later(seconds: number): void;
 }
 
-export async function openHouse(options: { computePool?: ComputePool; tls?: boolean } = {}): Promise<House> {
+export async function openHouse(
+  options: { computePool?: ComputePool; tls?: boolean } = {},
+): Promise<House> {
   const fresh = await freshDatabase();
   const logged: string[] = [];
   let aheadMs = 0;
@@ -50,7 +52,10 @@ let workshops = 0;
 /** A workshop with a member of every role. */
 export async function addTestWorkshop(house: House, name = 'Tarnside Outfitters'): Promise<Team> {
   workshops += 1;
-  const person = (role: Role) => ({ name: `${role} of ${name}`, email: `${role}@w${workshops}.example` });
+  const person = (role: Role) => ({
+    name: `${role} of ${name}`,
+    email: `${role}@w${workshops}.example`,
+  });
   const people = {
     manager: person('manager'),
     designer: person('designer'),

@@ -9,8 +9,9 @@ export const GET = endpoint(workshopOperations.listInstallations, async ({ conte
   json(await listInstallations(context, actor)),
 );
 
-export const POST = endpoint(workshopOperations.createInstallation, async ({ context, actor, body }) =>
-  created(await createInstallation(context, actor, body)),
+export const POST = endpoint(
+  workshopOperations.createInstallation,
+  async ({ context, actor, body }) => created(await createInstallation(context, actor, body)),
 );
 
 export const ALL = otherMethods({ GET, POST });

@@ -12,7 +12,9 @@ export const POST = endpoint(sessionOperations.signIn, async ({ context, body, r
 });
 
 export const DELETE = endpoint(sessionOperations.signOut, async ({ context, actor, request }) => {
-  const { setCookie } = await signOut(context, actor, { cookieHeader: request.headers.get('cookie') });
+  const { setCookie } = await signOut(context, actor, {
+    cookieHeader: request.headers.get('cookie'),
+  });
   return noContent({ 'set-cookie': setCookie });
 });
 

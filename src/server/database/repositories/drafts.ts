@@ -22,7 +22,10 @@ export async function designHashes(
   return new Map(found.map((draft) => [draft.get().tankId, draft.get().designHash]));
 }
 
-export async function insertDraft(scope: Scope, draft: Omit<DraftRecord, 'workshopId'>): Promise<void> {
+export async function insertDraft(
+  scope: Scope,
+  draft: Omit<DraftRecord, 'workshopId'>,
+): Promise<void> {
   await scope.database.models.drafts.create(
     { ...draft, workshopId: scope.workshopId },
     { transaction: scope.transaction },

@@ -21,7 +21,10 @@ export async function listInstallationRecords(
   });
 }
 
-export async function findInstallation(scope: Scope, id: string): Promise<InstallationRecord | null> {
+export async function findInstallation(
+  scope: Scope,
+  id: string,
+): Promise<InstallationRecord | null> {
   const found = await scope.database.models.installations.findOne({
     where: { workshopId: scope.workshopId, id },
     transaction: scope.transaction,

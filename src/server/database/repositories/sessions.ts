@@ -2,7 +2,10 @@ import { Op } from 'sequelize';
 import type { Database } from '../connect';
 import type { SessionRecord } from '../models/session';
 
-export async function findSession(database: Database, tokenHash: string): Promise<SessionRecord | null> {
+export async function findSession(
+  database: Database,
+  tokenHash: string,
+): Promise<SessionRecord | null> {
   const found = await database.models.sessions.findByPk(tokenHash);
   return found?.get() ?? null;
 }

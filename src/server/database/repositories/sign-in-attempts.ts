@@ -5,23 +5,31 @@ import { inTransaction } from '../transaction';
 
 /**
  * Counts an attempt before its password is looked at, so that many at once cannot slip through
- * together. `next` is given what is kept of the account (null: nothing) and returns what to keep,
- * or null to count nothing. Returns what `next` was given.
+ * together. `next` is given what is kept of the account and returns what to keep, or null to count
+ * nothing. Returns what `next` was given.
  */
 export async function countAttempt(
   database: Database,
   accountHash: string,
-  next: (kept: SignInAttemptRecord | null) => Omit<SignInAttemptRecord, 'accountHash'> | null,
-): Promise<SignInAttemptRecord | null> {
+  next: (kept: SignInAttemptRecord) => Omit<SignInAttemptRecord, 'accountHash'> | null,
+): Promise<SignInAttemptRecord> {
+  const { sequelize, models } = database;
   return inTransaction(database, async (transaction) => {
-    const found = await database.models.signInAttempts.findByPk(accountHash, {
+    // makes sure of the row and locks it at once: looking first would let newcomers deadlock on the gap
+    await sequelize.query(
+      `INSERT INTO sign_in_attempts (account_hash, failures, last_at, blocked_until) VALUES (?, 0, ?, ?)
+       ON DUPLICATE KEY UPDATE failures = failures`,
+      { replacements: [accountHash, new Date(0), new Date(0)], transaction },
+    );
+    const found = await models.signInAttempts.findByPk(accountHash, {
       transaction,
-      lock: transaction.LOCK.UPDATE,
+      lock: true,
+      rejectOnEmpty: true,
     });
-    const kept = found?.get({ plain: true }) ?? null;
-    const attempt = next(kept === null ? null : { ...kept });
+    const kept = { ...found.get() };
+    const attempt = next(kept);
     if (attempt !== null) {
-      await database.models.signInAttempts.upsert({ accountHash, ...attempt }, { transaction });
+      await models.signInAttempts.update(attempt, { where: { accountHash }, transaction });
     }
     return kept;
   });

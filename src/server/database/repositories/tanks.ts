@@ -2,7 +2,10 @@ import type { TankRecord } from '../models/tank';
 import type { Scope } from '../scope';
 
 /** Tanks of the workshop by name; with `only`, those of these ids. */
-export async function listTankRecords(scope: Scope, only?: readonly string[]): Promise<TankRecord[]> {
+export async function listTankRecords(
+  scope: Scope,
+  only?: readonly string[],
+): Promise<TankRecord[]> {
   const found = await scope.database.models.tanks.findAll({
     where: { workshopId: scope.workshopId, ...(only === undefined ? {} : { id: [...only] }) },
     order: [
@@ -28,7 +31,10 @@ export async function findTank(
   return found?.get() ?? null;
 }
 
-export async function insertTank(scope: Scope, tank: Omit<TankRecord, 'workshopId'>): Promise<void> {
+export async function insertTank(
+  scope: Scope,
+  tank: Omit<TankRecord, 'workshopId'>,
+): Promise<void> {
   await scope.database.models.tanks.create(
     { ...tank, workshopId: scope.workshopId },
     { transaction: scope.transaction },

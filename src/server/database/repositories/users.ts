@@ -8,7 +8,10 @@ export async function findUser(database: Database, id: string): Promise<UserReco
   return found?.get() ?? null;
 }
 
-export async function findUserByEmail(database: Database, email: string): Promise<UserRecord | null> {
+export async function findUserByEmail(
+  database: Database,
+  email: string,
+): Promise<UserRecord | null> {
   const found = await database.models.users.findOne({ where: { email } });
   return found?.get() ?? null;
 }

@@ -4,7 +4,10 @@ import { operation } from '../../http/operation';
 import { queryNumber } from '../../http/query-number';
 
 const most = queryNumber('Give a whole number from 1 to 500.').pipe(
-  z.int('Give a whole number from 1 to 500.').min(1, 'Give 1 or more.').max(500, 'Give 500 or less.'),
+  z
+    .int('Give a whole number from 1 to 500.')
+    .min(1, 'Give 1 or more.')
+    .max(500, 'Give 500 or less.'),
 );
 
 export const readingOperations = {

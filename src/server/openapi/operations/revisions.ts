@@ -17,7 +17,8 @@ const readingQuery = z
   })
   .superRefine(({ depthMm, ullageMm }, context) => {
     if ((depthMm === undefined) === (ullageMm === undefined)) {
-      const message = 'Give either depthMm (up from the zero) or ullageMm (down from the top of the stick).';
+      const message =
+        'Give either depthMm (up from the zero) or ullageMm (down from the top of the stick).';
       context.addIssue({ code: 'custom', path: ['depthMm'], message });
     }
   });

@@ -18,7 +18,11 @@ export const GET = endpoint(revisionOperations.readTableCsv, async ({ context, a
       revision.letter,
     ]),
   ]);
-  return file(text, 'text/csv; charset=utf-8; header=present', `${tankName} ${revision.letter}.csv`);
+  return file(
+    text,
+    'text/csv; charset=utf-8; header=present',
+    `${tankName} ${revision.letter}.csv`,
+  );
 });
 
 export const ALL = otherMethods({ GET });

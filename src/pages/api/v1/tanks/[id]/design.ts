@@ -14,9 +14,12 @@ export const GET = endpoint(tankOperations.readDesign, async ({ context, actor, 
   answer(await readDraft(context, actor, { tankId: id })),
 );
 
-export const PUT = endpoint(tankOperations.saveDesign, async ({ context, actor, id, body, request }) => {
-  const etags = readIfMatch(request);
-  return answer(await saveDraft(context, actor, { tankId: id, etags, design: body }));
-});
+export const PUT = endpoint(
+  tankOperations.saveDesign,
+  async ({ context, actor, id, body, request }) => {
+    const etags = readIfMatch(request);
+    return answer(await saveDraft(context, actor, { tankId: id, etags, design: body }));
+  },
+);
 
 export const ALL = otherMethods({ GET, PUT });

@@ -14,7 +14,9 @@ export const POST = endpoint(
   readingOperations.recordReading,
   async ({ context, actor, id, body, request }) => {
     const idempotencyKey = readIdempotencyKey(request);
-    return created(await recordReading(context, actor, { tankId: id, idempotencyKey, reading: body }));
+    return created(
+      await recordReading(context, actor, { tankId: id, idempotencyKey, reading: body }),
+    );
   },
 );
 

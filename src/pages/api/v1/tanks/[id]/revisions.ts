@@ -9,9 +9,12 @@ export const GET = endpoint(revisionOperations.listRevisions, async ({ context, 
   json(await listRevisions(context, actor, { tankId: id })),
 );
 
-export const POST = endpoint(revisionOperations.issueRevision, async ({ context, actor, id, body }) => {
-  const revision = await issueRevision(context, actor, { tankId: id, ...body });
-  return created(revision, { location: `/api/v1/revisions/${revision.id}` });
-});
+export const POST = endpoint(
+  revisionOperations.issueRevision,
+  async ({ context, actor, id, body }) => {
+    const revision = await issueRevision(context, actor, { tankId: id, ...body });
+    return created(revision, { location: `/api/v1/revisions/${revision.id}` });
+  },
+);
 
 export const ALL = otherMethods({ GET, POST });
