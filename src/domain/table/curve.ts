@@ -5,6 +5,10 @@ import { DipwrightError } from '../errors';
  * surface (dV/dh is the surface). Error about 3e-8 of capacity between ordinary rows; larger where
  * a floor or roof is tangent to the surface. Depths are readings along the stick, mm.
  *
+ * A row's surface is that just above it, so a flat step in the floor (the top of a wheel arch) gives the
+ * segment below it a wrong slope at its upper end. Such a slope betrays itself: it misses the chord by half
+ * the difference of both slopes, where a smooth wall misses by a small part of it. The chord then tells.
+ *
  * `slopeFactor` is dLevel/dReading: 1 unless the tank stands tilted, where a millimetre of stick is
  * less than a millimetre of plumb height (cos of the tilt).
  */
@@ -93,11 +97,13 @@ function hermite(
   const v1 = vs[i + 1]!;
   const t2 = t * t;
   const t3 = t2 * t;
+  const low = ms[i]!;
+  const high = upperSlope((v1 - v0) / h, low, ms[i + 1]!);
   const value =
     (2 * t3 - 3 * t2 + 1) * v0 +
-    (t3 - 2 * t2 + t) * h * ms[i]! +
+    (t3 - 2 * t2 + t) * h * low +
     (3 * t2 - 2 * t3) * v1 +
-    (t3 - t2) * h * ms[i + 1]!;
+    (t3 - t2) * h * high;
   // a kink inside a segment may make the cubic overshoot its ends by a hair
   return Math.min(Math.max(value, v0), v1);
 }
@@ -109,4 +115,12 @@ function outside(low: number, high: number): DipwrightError {
 
 function round(value: number): string {
   return String(Math.round(value * 10) / 10);
+}
+
+/** The slope just below the upper row; the chord of a parabola is the mean of its end slopes. */
+function upperSlope(chord: number, low: number, high: number): number {
+  const miss = Math.abs(chord - (low + high) / 2);
+  const fromChord = 2 * chord - low;
+  const jumps = miss > 0.35 * Math.abs(high - low) && miss > 1e-3 * Math.max(low, high);
+  return jumps && fromChord >= 0 ? fromChord : high;
 }
