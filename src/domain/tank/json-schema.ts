@@ -7,7 +7,15 @@ import { tankDocument } from './document';
  */
 export function tankJsonSchema(): object {
   return {
-    ...z.toJSONSchema(tankDocument, { io: 'input' }),
+    ...z.toJSONSchema(tankDocument, {
+      io: 'input',
+      override({ jsonSchema }) {
+        // a place has three numbers, not at least three
+        if (!jsonSchema.prefixItems) return;
+        jsonSchema.minItems = jsonSchema.prefixItems.length;
+        jsonSchema.items = false;
+      },
+    }),
     title: 'Dipwright tank design, version 1',
     description: 'Lengths in millimetres, angles in degrees, z up when the tank stands level.',
   };
