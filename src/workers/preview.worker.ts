@@ -1,4 +1,4 @@
-import wasmUrl from 'manifold-3d/manifold.wasm?url';
+
 import { DipwrightError } from '~/domain/errors';
 import { computePreview } from '~/domain/table/compute-preview';
 import type { Preview } from '~/domain/table/preview';
@@ -13,7 +13,7 @@ const scope = self as unknown as {
   postMessage(message: PreviewReply, transfer?: Transferable[]): void;
 };
 
-const ready = loadManifold({ wasmUrl });
+const ready = loadManifold();
 
 const take = latestWins<PreviewRequest>(async (request) => {
   const { number, design } = request;
