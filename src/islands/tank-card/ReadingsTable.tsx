@@ -14,7 +14,7 @@ export function ReadingsTable({
   units: UnitsPreference;
 }) {
   return (
-    <div className="overflow-x-auto" tabIndex={0} role="region" aria-label="Readings">
+    <div className="overflow-x-auto" tabIndex={0} role="region" aria-label="Table of readings">
       <table className="drawn-table">
         <thead>
           <tr>
