@@ -87,7 +87,9 @@ module.exports = {
       name: 'plain-commands',
       comment: 'What runs before npm ci needs Node alone.',
       severity: 'error',
-      from: { path: '^(src/commands/(start|test|dev)\\.mjs|src/commands/(steps|suites)/|db/local)' },
+      from: {
+        path: '^(src/commands/(start|test|dev)\\.mjs|src/commands/(steps|suites)/|db/local)',
+      },
       to: { dependencyTypesNot: ['core', 'local'] },
     },
     {

@@ -3,7 +3,9 @@ import reactHooks from 'eslint-plugin-react-hooks';
 import tseslint from 'typescript-eslint';
 
 export default tseslint.config(
-  { ignores: ['dist/', '.astro/', '.data/', 'node_modules/', 'test-results/', 'playwright-report/'] },
+  {
+    ignores: ['dist/', '.astro/', '.data/', 'node_modules/', 'test-results/', 'playwright-report/'],
+  },
   {
     files: ['**/*.{ts,tsx}'],
     extends: [tseslint.configs.recommended],
@@ -14,10 +16,19 @@ export default tseslint.config(
       '@typescript-eslint/no-explicit-any': 'error',
       '@typescript-eslint/no-floating-promises': 'error',
       '@typescript-eslint/no-misused-promises': ['error', { checksVoidReturn: false }],
-      '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', varsIgnorePattern: '^_' }],
-      '@typescript-eslint/consistent-type-imports': ['error', { fixStyle: 'inline-type-imports', disallowTypeAnnotations: false }],
+      '@typescript-eslint/no-unused-vars': [
+        'error',
+        { argsIgnorePattern: '^_', varsIgnorePattern: '^_' },
+      ],
+      '@typescript-eslint/consistent-type-imports': [
+        'error',
+        { fixStyle: 'inline-type-imports', disallowTypeAnnotations: false },
+      ],
       eqeqeq: ['error', 'always', { null: 'ignore' }],
-      'no-restricted-imports': ['error', { paths: [{ name: 'zod', message: 'Import from zod/v4.' }] }],
+      'no-restricted-imports': [
+        'error',
+        { paths: [{ name: 'zod', message: 'Import from zod/v4.' }] },
+      ],
     },
   },
   {
@@ -32,7 +43,10 @@ export default tseslint.config(
   ...astro.configs.recommended,
   {
     files: ['**/*.mjs'],
-    rules: { eqeqeq: 'error', 'no-unused-vars': ['error', { argsIgnorePattern: '^_', caughtErrors: 'none' }] },
+    rules: {
+      eqeqeq: 'error',
+      'no-unused-vars': ['error', { argsIgnorePattern: '^_', caughtErrors: 'none' }],
+    },
   },
   {
     // A check that is passed over proves nothing.
@@ -41,7 +55,8 @@ export default tseslint.config(
       'no-restricted-syntax': [
         'error',
         {
-          selector: "MemberExpression[object.name=/^(it|test|describe)$/][property.name=/^(skip|only|todo|fixme|fails)$/]",
+          selector:
+            'MemberExpression[object.name=/^(it|test|describe)$/][property.name=/^(skip|only|todo|fixme|fails)$/]',
           message: 'Every test runs, and none is expected to fail.',
         },
         {

@@ -3,7 +3,14 @@ import { setTimeout as delay } from 'node:timers/promises';
 import { ensureAccount, portOf } from './local/administer.mjs';
 import { newCredentials, readCredentials, writeCredentials } from './local/credentials.mjs';
 import { daemonAccount } from './local/daemon-account.mjs';
-import { answers, daemonPaths, makeSystemTables, runningDaemon, startDaemon, stopDaemon } from './local/daemon.mjs';
+import {
+  answers,
+  daemonPaths,
+  makeSystemTables,
+  runningDaemon,
+  startDaemon,
+  stopDaemon,
+} from './local/daemon.mjs';
 import { dataFolder } from './local/data-folder.mjs';
 import { ensurePrograms } from './local/debian-packages.mjs';
 import { withFolderLock } from './local/folder-lock.mjs';

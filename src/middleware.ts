@@ -12,7 +12,10 @@ export const onRequest = defineMiddleware(async ({ request, url, locals, redirec
   try {
     locals.actor = await locals.context.sessions.readActor(request.headers.get('cookie'));
   } catch (error) {
-    locals.context.log.error('the session could not be read', { error, requestId: locals.requestId });
+    locals.context.log.error('the session could not be read', {
+      error,
+      requestId: locals.requestId,
+    });
     return new Response(null, { status: 503, headers: { 'Retry-After': '10' } });
   }
   if (locals.actor === null && needsSession(url.pathname)) {

@@ -12,7 +12,13 @@ import { StartFault } from './start-fault.mjs';
 export function administer(folder, statements) {
   const done = spawnSync(
     findProgram('mariadb'),
-    ['--no-defaults', `--socket=${daemonPaths(folder).socket}`, '--user=root', '--batch', '--skip-column-names'],
+    [
+      '--no-defaults',
+      `--socket=${daemonPaths(folder).socket}`,
+      '--user=root',
+      '--batch',
+      '--skip-column-names',
+    ],
     { encoding: 'utf8', input: statements },
   );
   if (done.status === 0) return done.stdout;
@@ -44,7 +50,9 @@ export function ensureAccount(folder, credentials, wanted) {
     `GRANT ALL PRIVILEGES ON \`${wanted.database.replaceAll('_', '\\_')}\`.* TO ${user};`,
   ];
   if (wanted.scratchPrefix) {
-    lines.push(`GRANT ALL PRIVILEGES ON \`${wanted.scratchPrefix.replaceAll('_', '\\_')}%\`.* TO ${user};`);
+    lines.push(
+      `GRANT ALL PRIVILEGES ON \`${wanted.scratchPrefix.replaceAll('_', '\\_')}%\`.* TO ${user};`,
+    );
   }
   administer(folder, lines.join('\n'));
 }

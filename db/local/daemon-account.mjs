@@ -11,7 +11,8 @@ export function daemonAccount() {
   const self = userInfo().username;
   if (process.getuid?.() !== 0) return { asRoot: false, self };
   try {
-    const id = (flag) => Number(execFileSync('id', [flag, 'mysql'], { encoding: 'utf8', stdio: 'pipe' }));
+    const id = (flag) =>
+      Number(execFileSync('id', [flag, 'mysql'], { encoding: 'utf8', stdio: 'pipe' }));
     return { asRoot: true, self, uid: id('-u'), gid: id('-g') };
   } catch {
     throw new StartFault(

@@ -1,5 +1,13 @@
 import { spawn, spawnSync } from 'node:child_process';
-import { chownSync, existsSync, mkdirSync, readFileSync, renameSync, rmSync, statSync } from 'node:fs';
+import {
+  chownSync,
+  existsSync,
+  mkdirSync,
+  readFileSync,
+  renameSync,
+  rmSync,
+  statSync,
+} from 'node:fs';
 import { join } from 'node:path';
 import { setTimeout as delay } from 'node:timers/promises';
 import { findProgram } from './debian-packages.mjs';
@@ -129,7 +137,14 @@ export function answers(folder) {
   if (!existsSync(paths.socket)) return false;
   const asked = spawnSync(
     findProgram('mariadb'),
-    ['--no-defaults', `--socket=${paths.socket}`, '--user=root', '--connect-timeout=3', '-e', 'DO 0'],
+    [
+      '--no-defaults',
+      `--socket=${paths.socket}`,
+      '--user=root',
+      '--connect-timeout=3',
+      '-e',
+      'DO 0',
+    ],
     { encoding: 'utf8', timeout: 5_000 },
   );
   if (asked.status === 0) return true;
@@ -191,7 +206,10 @@ export function daemonFault(log, folder) {
       'Give that folder back to the account that runs MariaDB (mysql when started by root, otherwise your own), then run the command again.',
     );
   }
-  const why = log.split('\n').filter((line) => /\[ERROR\]|ERROR:/.test(line)).at(0);
+  const why = log
+    .split('\n')
+    .filter((line) => /\[ERROR\]|ERROR:/.test(line))
+    .at(0);
   return new StartFault(
     `MariaDB did not start${why ? ` (${why.replace(/^.*?\[ERROR\]\s*/, '').trim()})` : ''}.`,
     `Read the last lines of ${paths.log}, mend what they say, then run the command again.`,

@@ -18,7 +18,13 @@ export const packageOfProgram = {
  * @param {string} program
  */
 export function findProgram(program) {
-  const folders = [...(process.env.PATH ?? '').split(delimiter), '/usr/sbin', '/usr/bin', '/sbin', '/bin'];
+  const folders = [
+    ...(process.env.PATH ?? '').split(delimiter),
+    '/usr/sbin',
+    '/usr/bin',
+    '/sbin',
+    '/bin',
+  ];
   for (const folder of folders) {
     if (!folder) continue;
     try {
@@ -71,7 +77,9 @@ export function ensurePrograms(programs, say) {
 function elevation() {
   if (process.getuid?.() === 0) return [];
   if (!findProgram('sudo')) return null;
-  return spawnSync('sudo', ['-n', 'true'], { stdio: 'ignore' }).status === 0 ? ['sudo', '-n'] : null;
+  return spawnSync('sudo', ['-n', 'true'], { stdio: 'ignore' }).status === 0
+    ? ['sudo', '-n']
+    : null;
 }
 
 function runApt(prefix, args, list) {
@@ -102,13 +110,20 @@ export function aptFault(output, list) {
       'Free at least 1 GB, then run the command again.',
     );
   }
-  if (/Could not resolve|Temporary failure resolving|Unable to connect|Failed to fetch|Connection timed out/i.test(output)) {
+  if (
+    /Could not resolve|Temporary failure resolving|Unable to connect|Failed to fetch|Connection timed out/i.test(
+      output,
+    )
+  ) {
     return new StartFault(
       `The Debian package archive cannot be reached, and ${list} is not installed.`,
       'Connect this machine to the network, or set the proxy in /etc/apt, then run the command again.',
     );
   }
-  const why = output.split('\n').filter((line) => /^(E:|dpkg: error)/.test(line)).at(-1);
+  const why = output
+    .split('\n')
+    .filter((line) => /^(E:|dpkg: error)/.test(line))
+    .at(-1);
   return new StartFault(
     `Debian's ${list} could not be installed${why ? ` (${why.replace(/^E:/, '').trim()})` : ''}.`,
     `Run: apt-get install --no-install-recommends ${list}, and mend what it says. Then run the command again.`,

@@ -30,7 +30,9 @@ export function isFolderUsed(folder) {
   } catch {
     return false;
   }
-  return names.some((name) => processIdentity(Number(name)) === readUser(join(usersOf(folder), name)));
+  return names.some(
+    (name) => processIdentity(Number(name)) === readUser(join(usersOf(folder), name)),
+  );
 }
 
 function readUser(file) {

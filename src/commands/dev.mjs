@@ -27,8 +27,19 @@ await runCommand(async () => {
     say(`\nStarting on ${address.origin}\n\n${demoSignIns}\n`);
     const child = spawn(
       process.execPath,
-      [join('node_modules', 'astro', 'astro.js'), 'dev', '--host', address.host, '--port', String(address.port)],
-      { cwd: checkout, env: { ...process.env, ASTRO_TELEMETRY_DISABLED: '1', ...settings }, stdio: ['ignore', 'inherit', 'inherit'] },
+      [
+        join('node_modules', 'astro', 'astro.js'),
+        'dev',
+        '--host',
+        address.host,
+        '--port',
+        String(address.port),
+      ],
+      {
+        cwd: checkout,
+        env: { ...process.env, ASTRO_TELEMETRY_DISABLED: '1', ...settings },
+        stdio: ['ignore', 'inherit', 'inherit'],
+      },
     );
     const ended = new Promise((resolve) => child.once('exit', resolve));
     const guard = guardDatabase(database);

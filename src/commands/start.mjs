@@ -27,7 +27,9 @@ await runCommand(async () => {
     await stop.during(prepareData(checkout, settings));
     const build = await stop.during(buildProduct(checkout));
     const web = await startWebServer(checkout, build, settings);
-    say(`\nDipwright answers on ${address.origin}\n\n${demoSignIns}\n\nStop with Ctrl-C; all data is kept.`);
+    say(
+      `\nDipwright answers on ${address.origin}\n\n${demoSignIns}\n\nStop with Ctrl-C; all data is kept.`,
+    );
 
     const guard = guardDatabase(database);
     const why = await Promise.race([stop.asked, web.ended.then((end) => ({ end })), guard.lost]);

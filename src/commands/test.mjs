@@ -23,7 +23,10 @@ await runCommand(async () => {
   const server = await openTestDatabase(checkout);
   try {
     const suites = allSuites(checkout, server);
-    const wanted = flag === '--only' ? suites.filter(({ name }) => name === only) : suites.filter(({ usual }) => usual);
+    const wanted =
+      flag === '--only'
+        ? suites.filter(({ name }) => name === only)
+        : suites.filter(({ usual }) => usual);
     if (wanted.length === 0 || (flag !== undefined && flag !== '--only')) {
       throw new StartFault(
         'There is no such suite.',

@@ -8,14 +8,22 @@ const environment = z.object({
   DIPWRIGHT_MODE: z.enum(['production', 'development', 'test']).default('production'),
   DIPWRIGHT_HOST: z.string().min(1).default('127.0.0.1'),
   DIPWRIGHT_PORT: wholeNumber(1, 65_535).default(4321),
-  DIPWRIGHT_ORIGIN: z.string().refine(isOrigin, 'must be an origin such as https://dipwright.example').optional(),
-  DIPWRIGHT_ALLOWED_HOSTS: z.string().refine(areHosts, 'must be host names, with a port where one is used, parted by commas').optional(),
+  DIPWRIGHT_ORIGIN: z
+    .string()
+    .refine(isOrigin, 'must be an origin such as https://dipwright.example')
+    .optional(),
+  DIPWRIGHT_ALLOWED_HOSTS: z
+    .string()
+    .refine(areHosts, 'must be host names, with a port where one is used, parted by commas')
+    .optional(),
   DIPWRIGHT_TRUSTED_PROXIES: wholeNumber(0, 10).default(0),
   DIPWRIGHT_LEAVE_SECONDS: wholeNumber(0, 600).default(0),
   DIPWRIGHT_DRAIN_SECONDS: wholeNumber(0, 600).default(20),
   DIPWRIGHT_DATABASE_HOST: z.string('is missing').min(1, 'is empty'),
   DIPWRIGHT_DATABASE_PORT: wholeNumber(1, 65_535).default(3306),
-  DIPWRIGHT_DATABASE_NAME: z.string('is missing').regex(/^[A-Za-z0-9_]{1,64}$/, 'must be 1 to 64 letters, digits and underscores'),
+  DIPWRIGHT_DATABASE_NAME: z
+    .string('is missing')
+    .regex(/^[A-Za-z0-9_]{1,64}$/, 'must be 1 to 64 letters, digits and underscores'),
   DIPWRIGHT_DATABASE_USER: z.string('is missing').min(1, 'is empty'),
   DIPWRIGHT_DATABASE_PASSWORD: z.string('is missing').min(1, 'is empty'),
   DIPWRIGHT_DATABASE_POOL: wholeNumber(1, 200).default(10),
@@ -42,7 +50,14 @@ export interface Config {
     /** How long requests under way may take to finish after SIGTERM. */
     drainSeconds: number;
   };
-  database: { host: string; port: number; name: string; user: string; password: string; poolSize: number };
+  database: {
+    host: string;
+    port: number;
+    name: string;
+    user: string;
+    password: string;
+    poolSize: number;
+  };
   compute: {
     workers: number;
     /** The built worker; where it is not given, whoever makes the pool knows the source file. */
@@ -54,7 +69,9 @@ export interface Config {
 /** Names every fault of the configuration at once; never a value, since one may be a secret. */
 export class ConfigError extends Error {
   constructor(readonly faults: readonly string[]) {
-    super(`The configuration has ${faults.length === 1 ? 'a fault' : `${faults.length} faults`}: ${faults.join('; ')}.`);
+    super(
+      `The configuration has ${faults.length === 1 ? 'a fault' : `${faults.length} faults`}: ${faults.join('; ')}.`,
+    );
     this.name = 'ConfigError';
   }
 }
@@ -63,7 +80,9 @@ export class ConfigError extends Error {
 export function readConfig(env: Record<string, string | undefined> = process.env): Config {
   const read = environment.safeParse(withoutEmpty(env));
   if (!read.success) {
-    throw new ConfigError(read.error.issues.map((issue) => `${issue.path.join('.')} ${issue.message}`));
+    throw new ConfigError(
+      read.error.issues.map((issue) => `${issue.path.join('.')} ${issue.message}`),
+    );
   }
   const at = read.data;
   const origin = at.DIPWRIGHT_ORIGIN ?? `http://${at.DIPWRIGHT_HOST}:${at.DIPWRIGHT_PORT}`;
@@ -87,7 +106,10 @@ export function readConfig(env: Record<string, string | undefined> = process.env
       password: at.DIPWRIGHT_DATABASE_PASSWORD,
       poolSize: at.DIPWRIGHT_DATABASE_POOL,
     },
-    compute: { workers: at.DIPWRIGHT_COMPUTE_WORKERS, workerFile: at.DIPWRIGHT_COMPUTE_WORKER_FILE },
+    compute: {
+      workers: at.DIPWRIGHT_COMPUTE_WORKERS,
+      workerFile: at.DIPWRIGHT_COMPUTE_WORKER_FILE,
+    },
     log: { level: at.DIPWRIGHT_LOG_LEVEL },
   };
 }
@@ -98,16 +120,28 @@ function withoutEmpty(env: Record<string, string | undefined>): Record<string, s
 }
 
 function wholeNumber(least: number, most: number) {
-  const inRange = (text: string) => /^\d{1,9}$/.test(text) && Number(text) >= least && Number(text) <= most;
-  return z.string().refine(inRange, `must be a whole number from ${least} to ${most}`).transform(Number);
+  const inRange = (text: string) =>
+    /^\d{1,9}$/.test(text) && Number(text) >= least && Number(text) <= most;
+  return z
+    .string()
+    .refine(inRange, `must be a whole number from ${least} to ${most}`)
+    .transform(Number);
 }
 
 function isOrigin(value: string): boolean {
-  return URL.canParse(value) && /^https?:$/.test(new URL(value).protocol) && new URL(value).origin === value;
+  return (
+    URL.canParse(value) &&
+    /^https?:$/.test(new URL(value).protocol) &&
+    new URL(value).origin === value
+  );
 }
 
 function areHosts(value: string): boolean {
-  return value.split(',').every((host) => /^[A-Za-z0-9.-]+(:\d{1,5})?$|^\[[0-9A-Fa-f:]+\](:\d{1,5})?$/.test(host.trim()));
+  return value
+    .split(',')
+    .every((host) =>
+      /^[A-Za-z0-9.-]+(:\d{1,5})?$|^\[[0-9A-Fa-f:]+\](:\d{1,5})?$/.test(host.trim()),
+    );
 }
 
 /** The origin's own host, what is listed, and, where the origin is this machine, its other names. */

@@ -45,7 +45,10 @@ async function serve(): Promise<void> {
   const state: DrainState = { leaving: false };
   const files = staticFiles(join(here, '..', 'client'));
   const front = createFront({ config, log: context.log, state, files, handler });
-  const server = createHttpServer((request, response) => void front(request, response), config.http.tls);
+  const server = createHttpServer(
+    (request, response) => void front(request, response),
+    config.http.tls,
+  );
 
   const leave = async (why: string) => {
     if (state.leaving) return;
@@ -58,7 +61,8 @@ async function serve(): Promise<void> {
   process.on('SIGTERM', () => void leave('SIGTERM'));
   process.on('SIGINT', () => void leave('SIGINT'));
   // Started by a command that was killed: leave too, so that its port is free again.
-  if (process.send) process.on('disconnect', () => void leave('the command that started this ended'));
+  if (process.send)
+    process.on('disconnect', () => void leave('the command that started this ended'));
 
   await new Promise<void>((resolve, reject) => {
     server.once('error', reject);

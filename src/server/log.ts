@@ -22,11 +22,18 @@ const longestText = 2_000;
  */
 export function createLog(level: LogLevel, write: (line: string) => void = toStandardOut): Log {
   const least = order.indexOf(level);
-  const at = (own: LogLevel) => (message: string, facts: Facts = {}) => {
-    if (order.indexOf(own) < least) return;
-    const entry = { time: new Date().toISOString(), level: own, message, ...(safe(facts, 0) as Facts) };
-    write(`${JSON.stringify(entry)}\n`);
-  };
+  const at =
+    (own: LogLevel) =>
+    (message: string, facts: Facts = {}) => {
+      if (order.indexOf(own) < least) return;
+      const entry = {
+        time: new Date().toISOString(),
+        level: own,
+        message,
+        ...(safe(facts, 0) as Facts),
+      };
+      write(`${JSON.stringify(entry)}\n`);
+    };
   return { debug: at('debug'), info: at('info'), warn: at('warn'), error: at('error') };
 }
 
@@ -36,13 +43,17 @@ function toStandardOut(line: string): void {
 
 function safe(value: unknown, depth: number): unknown {
   if (value instanceof Error) return errorFacts(value, depth);
-  if (typeof value === 'string') return value.length > longestText ? `${value.slice(0, longestText)}…` : value;
+  if (typeof value === 'string')
+    return value.length > longestText ? `${value.slice(0, longestText)}…` : value;
   if (typeof value === 'bigint') return String(value);
   if (typeof value !== 'object' || value === null) return value;
   if (depth > 5) return '…';
   if (Array.isArray(value)) return value.slice(0, 100).map((item) => safe(item, depth + 1));
   return Object.fromEntries(
-    Object.entries(value).map(([name, item]) => [name, secretName.test(name) ? '[kept out]' : safe(item, depth + 1)]),
+    Object.entries(value).map(([name, item]) => [
+      name,
+      secretName.test(name) ? '[kept out]' : safe(item, depth + 1),
+    ]),
   );
 }
 

@@ -68,7 +68,14 @@ describe('worked answers through the command', { timeout: 60_000 }, () => {
 
   it('heating oil, lying cylinder 1200 × 2000: 703 L at 16 4/8 in, limit 2194.1 L at 1117 mm', async () => {
     const oil = design([cylinder('tank', 1200, 2000)], { stick: { at: [1000, 600] } });
-    const [dip, wrong, limit, reserve, full] = await litresAt(oil, 16.5 * 25.4, 16.4 * 25.4, 1117, 141.6, 1200);
+    const [dip, wrong, limit, reserve, full] = await litresAt(
+      oil,
+      16.5 * 25.4,
+      16.4 * 25.4,
+      1117,
+      141.6,
+      1200,
+    );
     expect(Math.abs(dip! - 703.5)).toBeLessThan(0.1);
     expect(Math.abs(wrong! - 697.7)).toBeLessThan(0.1);
     expect(Math.abs(limit! - 2194.1)).toBeLessThan(1);
@@ -79,11 +86,21 @@ describe('worked answers through the command', { timeout: 60_000 }, () => {
 
 describe('the contract of the command', { timeout: 60_000 }, () => {
   it('prints every field, rows from 0 to the top at the step', async () => {
-    const { exit, out } = await strap({ ...slopedCistern, outlet: [50, 250, 20], vent: [450, 250, 300] }, '--step', '100');
+    const { exit, out } = await strap(
+      { ...slopedCistern, outlet: [50, 250, 20], vent: [450, 250, 300] },
+      '--step',
+      '100',
+    );
     expect(exit).toBe(0);
     const table = JSON.parse(out) as ComputedTable;
     expect(Object.keys(table)).toEqual([
-      'capacityL', 'heightMm', 'errorL', 'triangles', 'undrainableL', 'trappedL', 'rows',
+      'capacityL',
+      'heightMm',
+      'errorL',
+      'triangles',
+      'undrainableL',
+      'trappedL',
+      'rows',
     ]);
     expect(table.rows.map((row) => row.depthMm)).toEqual([0, 100, 200, 300]);
     expect(Object.keys(table.rows[0]!)).toEqual(['depthMm', 'volumeL', 'surfaceCm2', 'centroidMm']);
@@ -94,23 +111,49 @@ describe('the contract of the command', { timeout: 60_000 }, () => {
   it('runs by its name and prints CSV', async () => {
     const file = join(folder, 'cistern.json');
     await writeFile(file, JSON.stringify(slopedCistern));
-    const { out } = await child('npm', 'run', '--silent', 'strap', '--', file, '--at', '60', '--csv');
-    expect(out.split('\n').slice(0, 2).map((line) => line.split(',').slice(0, 3).join(','))).toEqual([
-      'depthMm,volumeL,surfaceCm2',
-      '60,15,4500',
-    ]);
+    const { out } = await child(
+      'npm',
+      'run',
+      '--silent',
+      'strap',
+      '--',
+      file,
+      '--at',
+      '60',
+      '--csv',
+    );
+    expect(
+      out
+        .split('\n')
+        .slice(0, 2)
+        .map((line) => line.split(',').slice(0, 3).join(',')),
+    ).toEqual(['depthMm,volumeL,surfaceCm2', '60,15,4500']);
   });
 
   it.each([
-    ['a size below 0', { ...slopedCistern, solids: [{ ...slopedCistern.solids[0], height: -300 }] }, 'Solid "body", height: a length is more than 0 mm.'],
-    ['a kind to come', { ...slopedCistern, solids: [{ ...slopedCistern.solids[0], kind: 'stations' }] }, /^Solid "body", kind: a solid of the kind "stations" is not computed yet/],
-    ['an unknown field', { ...slopedCistern, solids: [{ ...slopedCistern.solids[0], hight: 1 }] }, 'Solid "body", hight: there is no such field here.'],
+    [
+      'a size below 0',
+      { ...slopedCistern, solids: [{ ...slopedCistern.solids[0], height: -300 }] },
+      'Solid "body", height: a length is more than 0 mm.',
+    ],
+    [
+      'a kind to come',
+      { ...slopedCistern, solids: [{ ...slopedCistern.solids[0], kind: 'stations' }] },
+      /^Solid "body", kind: a solid of the kind "stations" is not computed yet/,
+    ],
+    [
+      'an unknown field',
+      { ...slopedCistern, solids: [{ ...slopedCistern.solids[0], hight: 1 }] },
+      'Solid "body", hight: there is no such field here.',
+    ],
     ['text that is not JSON', '{', /is not JSON/],
   ])('exits 2 with one sentence for %s', async (_, content, sentence) => {
     const { exit, out, err } = await strap(content);
     expect({ exit, out }).toEqual({ exit: 2, out: '' });
     expect(err.trim().split('\n')).toHaveLength(1);
-    expect(err.trim()).toMatch(sentence instanceof RegExp ? sentence : new RegExp(`^${escaped(sentence)}$`));
+    expect(err.trim()).toMatch(
+      sentence instanceof RegExp ? sentence : new RegExp(`^${escaped(sentence)}$`),
+    );
   });
 
   it('exits 2 for a reading outside the stick, 1 for a missing file or a wrong option', async () => {

@@ -1,7 +1,12 @@
 import { expect, it } from 'vitest';
 import { sumUp } from '../../src/commands/suites/sum-up.mjs';
 
-const suite = (name: string, passed: number, failed = 0, skipped = 0) => ({ name, passed, failed, skipped });
+const suite = (name: string, passed: number, failed = 0, skipped = 0) => ({
+  name,
+  passed,
+  failed,
+  skipped,
+});
 
 it('ends with the sum alone on its line', () => {
   const { lines, failed } = sumUp([suite('unit', 40), suite('server', 12, 2)]);

@@ -20,15 +20,29 @@ afterAll(() => rmSync(folder, { recursive: true, force: true }));
 
 /** All tests but two use one data folder, one after the other. */
 async function open(checkout = folder) {
-  const server = await openLocalServer({ checkout, name: 'demo', database: 'dipwright', say: (line) => said.push(line) });
+  const server = await openLocalServer({
+    checkout,
+    name: 'demo',
+    database: 'dipwright',
+    say: (line) => said.push(line),
+  });
   opened.push(server);
   return server;
 }
 
 type Place = { host: string; port: number; user: string; password: string; database?: string };
 
-async function query<T = unknown>({ host, port, user, password, database }: Place, sql: string): Promise<T> {
-  const connection = await mariadb.createConnection({ host, port, user, password, ...(database ? { database } : {}) });
+async function query<T = unknown>(
+  { host, port, user, password, database }: Place,
+  sql: string,
+): Promise<T> {
+  const connection = await mariadb.createConnection({
+    host,
+    port,
+    user,
+    password,
+    ...(database ? { database } : {}),
+  });
   try {
     return (await connection.query(sql)) as T;
   } finally {
@@ -42,10 +56,15 @@ it('makes a server of its own, for loopback and its own database only', async ()
   await expect(query(server, 'CREATE DATABASE another')).rejects.toThrow(/denied/);
   await expect(query(server, 'SELECT * FROM mysql.global_priv')).rejects.toThrow(/denied/);
   await expect(query({ ...server, password: 'wrong' }, 'DO 0')).rejects.toThrow(/denied/);
-  expect(await query(server, 'SELECT @@bind_address AS bound, @@log_bin AS log, @@innodb_flush_log_at_trx_commit AS flush')).toMatchObject([
-    { bound: '127.0.0.1', log: 0n, flush: 1n },
-  ]);
-  const outward = Object.values(networkInterfaces()).flat().find((address) => address?.family === 'IPv4' && !address.internal);
+  expect(
+    await query(
+      server,
+      'SELECT @@bind_address AS bound, @@log_bin AS log, @@innodb_flush_log_at_trx_commit AS flush',
+    ),
+  ).toMatchObject([{ bound: '127.0.0.1', log: 0n, flush: 1n }]);
+  const outward = Object.values(networkInterfaces())
+    .flat()
+    .find((address) => address?.family === 'IPv4' && !address.internal);
   if (outward) expect(await answersOn(outward.address, server.port)).toBe(false);
 });
 
@@ -66,7 +85,11 @@ it('keeps everything through kill -9 and a new start, on the same port', async (
   expect(second.pid).not.toBe(first.pid);
   expect(second.port).toBe(first.port);
   expect(second.password).toBe(first.password);
-  expect(await query(second, 'SELECT id FROM kept ORDER BY id')).toMatchObject([{ id: 1 }, { id: 2 }, { id: 3 }]);
+  expect(await query(second, 'SELECT id FROM kept ORDER BY id')).toMatchObject([
+    { id: 1 },
+    { id: 2 },
+    { id: 3 },
+  ]);
 });
 
 it('notices that its server was killed and starts it again', async () => {
@@ -98,25 +121,31 @@ it('takes another port when its own is taken by somebody else', async () => {
 });
 
 // As a plain account MariaDB runs under that account itself and reaches whatever the checkout is in.
-it.runIf(process.getuid?.() === 0)('goes outside the checkout when the database account cannot reach into it', async () => {
-  const closed = join(folder, 'closed');
-  const clone = join(closed, 'clone');
-  mkdirSync(clone, { recursive: true });
-  chmodSync(closed, 0o700);
-  const server = await open(clone);
-  expect(server.folder.startsWith('/var/lib/dipwright-')).toBe(true);
-  await query(server, 'DO 0');
-  await server.stop();
-  opened.pop();
-  rmSync(join(server.folder, '..'), { recursive: true });
-});
+it.runIf(process.getuid?.() === 0)(
+  'goes outside the checkout when the database account cannot reach into it',
+  async () => {
+    const closed = join(folder, 'closed');
+    const clone = join(closed, 'clone');
+    mkdirSync(clone, { recursive: true });
+    chmodSync(closed, 0o700);
+    const server = await open(clone);
+    expect(server.folder.startsWith('/var/lib/dipwright-')).toBe(true);
+    await query(server, 'DO 0');
+    await server.stop();
+    opened.pop();
+    rmSync(join(server.folder, '..'), { recursive: true });
+  },
+);
 
 it('says in a sentence why a server does not start', async () => {
   const server = await open();
   await server.stop();
   execFileSync('truncate', ['--size=100', join(server.folder, 'server/data/ibdata1')]);
   const fault = await open().catch((error: Error & { nextStep?: string }) => error);
-  expect(fault).toMatchObject({ name: 'StartFault', message: expect.stringMatching(/^MariaDB did not start \(.+\)\.$/) });
+  expect(fault).toMatchObject({
+    name: 'StartFault',
+    message: expect.stringMatching(/^MariaDB did not start \(.+\)\.$/),
+  });
   expect(fault).toMatchObject({ nextStep: expect.stringContaining('err.log') });
 });
 
@@ -127,6 +156,9 @@ function answersOn(host: string, port: number): Promise<boolean> {
       socket.destroy();
       resolve(answer);
     };
-    socket.once('connect', () => end(true)).once('error', () => end(false)).once('timeout', () => end(false));
+    socket
+      .once('connect', () => end(true))
+      .once('error', () => end(false))
+      .once('timeout', () => end(false));
   });
 }

@@ -12,14 +12,20 @@ for (const path of ['/', '/sign-in', '/sign-up']) {
     await page.addInitScript(() => {
       const seen: string[] = [];
       Object.assign(globalThis, { policyViolations: seen });
-      document.addEventListener('securitypolicyviolation', (event) => seen.push(`${event.violatedDirective} ${event.blockedURI}`));
+      document.addEventListener('securitypolicyviolation', (event) =>
+        seen.push(`${event.violatedDirective} ${event.blockedURI}`),
+      );
     });
     await page.goto(path);
     // An island drops its `ssr` mark once it is alive.
     await expect(page.locator('astro-island')).not.toHaveCount(0);
     await expect(page.locator('astro-island[ssr]')).toHaveCount(0);
     await page.waitForLoadState('networkidle');
-    expect(await page.evaluate(() => (globalThis as unknown as { policyViolations: string[] }).policyViolations)).toEqual([]);
+    expect(
+      await page.evaluate(
+        () => (globalThis as unknown as { policyViolations: string[] }).policyViolations,
+      ),
+    ).toEqual([]);
     expect(complaints).toEqual([]);
   });
 }

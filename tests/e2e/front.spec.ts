@@ -3,11 +3,21 @@ import { expect, test } from '@playwright/test';
 /* What the entry promises of every answer, asked of the built product. */
 
 const pages = ['/', '/sign-in', '/sign-up', '/api'];
-const elsewhere = ['/no-such-page', '/api/v1/no-such-call', '/api/openapi.json', '/api/v1/liquids', '/healthz', '/readyz', '/home'];
+const elsewhere = [
+  '/no-such-page',
+  '/api/v1/no-such-call',
+  '/api/openapi.json',
+  '/api/v1/liquids',
+  '/healthz',
+  '/readyz',
+  '/home',
+];
 
 for (const path of [...pages, ...elsewhere]) {
   test(`security headers on ${path}`, async ({ request }) => {
-    const { headers } = await request.get(path, { maxRedirects: 0 }).then((answer) => ({ headers: answer.headers() }));
+    const { headers } = await request
+      .get(path, { maxRedirects: 0 })
+      .then((answer) => ({ headers: answer.headers() }));
     const policy = headers['content-security-policy'] ?? '';
     expect(policy).toContain("default-src 'none'");
     expect(policy).toContain("frame-ancestors 'none'");
@@ -21,7 +31,12 @@ for (const path of [...pages, ...elsewhere]) {
   });
 }
 
-for (const path of ['/_image?href=/favicon.svg&w=10', '/_image', '/_server-islands/Anything', '/_actions/anything']) {
+for (const path of [
+  '/_image?href=/favicon.svg&w=10',
+  '/_image',
+  '/_server-islands/Anything',
+  '/_actions/anything',
+]) {
   test(`${path} is closed`, async ({ request }) => {
     expect((await request.get(path)).status()).toBe(404);
     expect((await request.post(path, { data: {} })).status()).toBe(404);
@@ -32,7 +47,10 @@ test('another host name is refused before anything else', async ({ request }) =>
   expect((await request.get('/', { headers: { Host: 'evil.example' } })).status()).toBe(421);
 });
 
-test('a page for members leads to sign-in and back, on this host only', async ({ request, baseURL }) => {
+test('a page for members leads to sign-in and back, on this host only', async ({
+  request,
+  baseURL,
+}) => {
   const answer = await request.get('/tanks/some-id?view=end', { maxRedirects: 0 });
   expect(answer.status()).toBe(303);
   expect(answer.headers().location).toBe('/sign-in?next=%2Ftanks%2Fsome-id%3Fview%3Dend');
@@ -54,7 +72,12 @@ test.describe('another site may not act: method × origin × content type', () =
     { Origin: 'http://evil.example' },
     {},
   ];
-  const types = ['application/json', 'text/plain', 'application/x-www-form-urlencoded', 'multipart/form-data; boundary=x'];
+  const types = [
+    'application/json',
+    'text/plain',
+    'application/x-www-form-urlencoded',
+    'multipart/form-data; boundary=x',
+  ];
 
   test('with a cookie every one is refused and nothing is done', async ({ request, baseURL }) => {
     const signedIn = await request.post('/api/v1/session', {
@@ -65,10 +88,19 @@ test.describe('another site may not act: method × origin × content type', () =
     const before = await (await request.get('/api/v1/installations')).json();
     for (const headers of foreign) {
       for (const type of types) {
-        const init = { headers: { ...headers, 'Content-Type': type }, data: '{"name":"Planted","kind":"place"}' };
-        expect((await request.post('/api/v1/installations', init)).status(), JSON.stringify(init.headers)).toBe(403);
+        const init = {
+          headers: { ...headers, 'Content-Type': type },
+          data: '{"name":"Planted","kind":"place"}',
+        };
+        expect(
+          (await request.post('/api/v1/installations', init)).status(),
+          JSON.stringify(init.headers),
+        ).toBe(403);
       }
-      expect((await request.delete('/api/v1/session', { headers })).status(), JSON.stringify(headers)).toBe(403);
+      expect(
+        (await request.delete('/api/v1/session', { headers })).status(),
+        JSON.stringify(headers),
+      ).toBe(403);
     }
     expect(await (await request.get('/api/v1/installations')).json()).toEqual(before);
     expect((await request.get('/api/v1/me')).status()).toBe(200);

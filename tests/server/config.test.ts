@@ -22,14 +22,23 @@ describe('readConfig', () => {
   it('needs the database and nothing else', () => {
     const config = readConfig(whole);
     expect(config.mode).toBe('production');
-    expect(config.http).toMatchObject({ host: '127.0.0.1', port: 4321, origin: 'http://127.0.0.1:4321', trustedProxies: 0, tls: false });
+    expect(config.http).toMatchObject({
+      host: '127.0.0.1',
+      port: 4321,
+      origin: 'http://127.0.0.1:4321',
+      trustedProxies: 0,
+      tls: false,
+    });
     expect(config.http.allowedHosts).toEqual(['127.0.0.1:4321', 'localhost:4321']);
   });
 
-  it.each(['production', 'development', 'test'])('has no default for a secret, in %s either', (mode) => {
-    const faults = faultsOf({ ...whole, DIPWRIGHT_MODE: mode, DIPWRIGHT_DATABASE_PASSWORD: '' });
-    expect(faults).toEqual(['DIPWRIGHT_DATABASE_PASSWORD is missing']);
-  });
+  it.each(['production', 'development', 'test'])(
+    'has no default for a secret, in %s either',
+    (mode) => {
+      const faults = faultsOf({ ...whole, DIPWRIGHT_MODE: mode, DIPWRIGHT_DATABASE_PASSWORD: '' });
+      expect(faults).toEqual(['DIPWRIGHT_DATABASE_PASSWORD is missing']);
+    },
+  );
 
   it('names every fault at once, and no value', () => {
     const faults = faultsOf({
@@ -42,7 +51,15 @@ describe('readConfig', () => {
     });
     expect(faults).toHaveLength(7);
     const text = new ConfigError(faults).message;
-    for (const name of ['PORT', 'ORIGIN', 'ALLOWED_HOSTS', 'TRUSTED_PROXIES', 'DATABASE_HOST', 'DATABASE_NAME', 'DATABASE_USER']) {
+    for (const name of [
+      'PORT',
+      'ORIGIN',
+      'ALLOWED_HOSTS',
+      'TRUSTED_PROXIES',
+      'DATABASE_HOST',
+      'DATABASE_NAME',
+      'DATABASE_USER',
+    ]) {
       expect(text).toContain(`DIPWRIGHT_${name} `);
     }
     expect(text).not.toMatch(/hidden-value|DROP|70000/);
@@ -55,10 +72,16 @@ describe('readConfig', () => {
       DIPWRIGHT_ALLOWED_HOSTS: 'WWW.tarnside.example, tarnside.example:8443',
     });
     expect(http.tls).toBe(true);
-    expect(http.allowedHosts).toEqual(['tanks.tarnside.example', 'www.tarnside.example', 'tarnside.example:8443']);
+    expect(http.allowedHosts).toEqual([
+      'tanks.tarnside.example',
+      'www.tarnside.example',
+      'tarnside.example:8443',
+    ]);
   });
 
   it('refuses an origin with a path', () => {
-    expect(faultsOf({ ...whole, DIPWRIGHT_ORIGIN: 'https://tarnside.example/app' })).toHaveLength(1);
+    expect(faultsOf({ ...whole, DIPWRIGHT_ORIGIN: 'https://tarnside.example/app' })).toHaveLength(
+      1,
+    );
   });
 });

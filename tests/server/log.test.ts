@@ -1,16 +1,26 @@
 import { expect, it } from 'vitest';
 import { createLog } from '~/server/log';
 
-function written(level: Parameters<typeof createLog>[0], work: (log: ReturnType<typeof createLog>) => void): string[] {
+function written(
+  level: Parameters<typeof createLog>[0],
+  work: (log: ReturnType<typeof createLog>) => void,
+): string[] {
   const lines: string[] = [];
   work(createLog(level, (line) => lines.push(line)));
   return lines;
 }
 
 it('writes one JSON object a line, whatever the text holds', () => {
-  const [line = ''] = written('info', (log) => log.info('two\nlines', { tank: 'T1', litres: 55.5 }));
+  const [line = ''] = written('info', (log) =>
+    log.info('two\nlines', { tank: 'T1', litres: 55.5 }),
+  );
   expect(line.match(/\n/g)).toHaveLength(1);
-  expect(JSON.parse(line)).toMatchObject({ level: 'info', message: 'two\nlines', tank: 'T1', litres: 55.5 });
+  expect(JSON.parse(line)).toMatchObject({
+    level: 'info',
+    message: 'two\nlines',
+    tank: 'T1',
+    litres: 55.5,
+  });
 });
 
 it('leaves out what is below its level', () => {
@@ -20,7 +30,10 @@ it('leaves out what is below its level', () => {
     log.warn('c');
     log.error('d');
   });
-  expect(lines.map((line) => (JSON.parse(line) as { message: string }).message)).toEqual(['c', 'd']);
+  expect(lines.map((line) => (JSON.parse(line) as { message: string }).message)).toEqual([
+    'c',
+    'd',
+  ]);
 });
 
 it('keeps secrets out at any depth', () => {
@@ -41,7 +54,9 @@ it('writes of an error its message and place, not what a driver hung on it', () 
     cause: Object.assign(new Error('below'), { options: { secret: 'p-2' } }),
   });
   const [line = ''] = written('info', (log) => log.error('x', { error }));
-  expect(JSON.parse(line)).toMatchObject({ error: { message: 'refused', code: 'ECONNREFUSED', cause: { message: 'below' } } });
+  expect(JSON.parse(line)).toMatchObject({
+    error: { message: 'refused', code: 'ECONNREFUSED', cause: { message: 'below' } },
+  });
   expect(line).not.toMatch(/p-\d/);
   expect(line).toContain('log.test.ts');
 });

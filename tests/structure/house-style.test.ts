@@ -11,30 +11,51 @@ it('no file is longer than 400 lines', () => {
 });
 
 it('no file or folder is a drawer', () => {
-  expect(code.filter((file) => /(^|\/)(utils?|helpers?|misc|common|lib)(\/|\.)/.test(file))).toEqual([]);
+  expect(
+    code.filter((file) => /(^|\/)(utils?|helpers?|misc|common|lib)(\/|\.)/.test(file)),
+  ).toEqual([]);
 });
 
 it('no file only passes on what others export', () => {
   const barrels = code.filter((file) => {
-    const lines = textOf(file).split('\n').filter((line) => line.trim() && !/^\s*(\/\/|\/?\*)/.test(line));
-    return lines.length > 0 && lines.every((line) => /^export (\*|\{|type \{)[^;]* from /.test(line));
+    const lines = textOf(file)
+      .split('\n')
+      .filter((line) => line.trim() && !/^\s*(\/\/|\/?\*)/.test(line));
+    return (
+      lines.length > 0 && lines.every((line) => /^export (\*|\{|type \{)[^;]* from /.test(line))
+    );
   });
   expect(barrels).toEqual([]);
 });
 
 it('nothing is left for later inside the code', () => {
-  const marks = new RegExp(`\\b(${['TO', 'FIX', 'XX'].map((half, at) => half + ['DO', 'ME', 'X'][at]).join('|')})\\b`);
+  const marks = new RegExp(
+    `\\b(${['TO', 'FIX', 'XX'].map((half, at) => half + ['DO', 'ME', 'X'][at]).join('|')})\\b`,
+  );
   expect(code.filter((file) => marks.test(textOf(file)))).toEqual([]);
 });
 
 it('pages use nothing that the content policy or the closed routes refuse', () => {
-  const refused = /\bdefine:vars\b|\bis:inline\b|\bserver:defer\b|\bset:html\b|<ClientRouter|\sstyle=/;
+  const refused =
+    /\bdefine:vars\b|\bis:inline\b|\bserver:defer\b|\bset:html\b|<ClientRouter|\sstyle=/;
   const rendered = code.filter((file) => file.endsWith('.astro'));
   expect(rendered.filter((file) => refused.test(textOf(file)))).toEqual([]);
 });
 
 it('every test file lies where a project looks for it', () => {
-  const rooms = ['structure', 'geometry', 'domain', 'scene', 'viewport', 'workers', 'commands', 'islands', 'server', 'db', 'long'];
+  const rooms = [
+    'structure',
+    'geometry',
+    'domain',
+    'scene',
+    'viewport',
+    'workers',
+    'commands',
+    'islands',
+    'server',
+    'db',
+    'long',
+  ];
   const tests = sourceFiles(['tests'], ['.test.ts', '.test.tsx', '.spec.ts']);
   const lost = tests.filter((file) => {
     const room = file.split('/')[1] ?? '';

@@ -17,11 +17,28 @@ const rooms = {
   'server/jobs': ['domain', 'geometry', 'server/config', 'server/log'],
   'server/pdf': ['domain'],
   'server/auth': ['domain', 'server/config', 'server/database'],
-  'server/services': ['domain', 'geometry', 'server/database', 'server/auth', 'server/pdf', 'server/jobs', 'server/context'],
+  'server/services': [
+    'domain',
+    'geometry',
+    'server/database',
+    'server/auth',
+    'server/pdf',
+    'server/jobs',
+    'server/context',
+  ],
   'server/http': ['domain', 'server/log', 'server/context'],
   'server/openapi': ['domain', 'server/http'],
   'server/front': ['domain', 'server/config', 'server/log', 'server/context'],
-  pages: ['server/http', 'server/openapi', 'server/services', 'server/context', 'domain', 'layouts', 'components', 'islands'],
+  pages: [
+    'server/http',
+    'server/openapi',
+    'server/services',
+    'server/context',
+    'domain',
+    'layouts',
+    'components',
+    'islands',
+  ],
 };
 
 module.exports = { rooms };

@@ -1,5 +1,13 @@
 import { spawnSync } from 'node:child_process';
-import { cpSync, mkdirSync, mkdtempSync, readFileSync, rmSync, symlinkSync, writeFileSync } from 'node:fs';
+import {
+  cpSync,
+  mkdirSync,
+  mkdtempSync,
+  readFileSync,
+  rmSync,
+  symlinkSync,
+  writeFileSync,
+} from 'node:fs';
 import { tmpdir } from 'node:os';
 import { dirname, join, posix } from 'node:path';
 import { beforeAll, describe, expect, it } from 'vitest';
@@ -21,7 +29,10 @@ function violations(root: string, ...folders: string[]): string[] {
     { cwd: root, encoding: 'utf8', env: { ...process.env, NO_COLOR: '1', FORCE_COLOR: '0' } },
   );
   expect(done.stdout + done.stderr).toMatch(/dependency violations|no dependency violations/);
-  return done.stdout.split('\n').filter((line) => /^\s*(error|warn) /.test(line)).map((line) => line.trim());
+  return done.stdout
+    .split('\n')
+    .filter((line) => /^\s*(error|warn) /.test(line))
+    .map((line) => line.trim());
 }
 
 describe('the import table', () => {
@@ -31,7 +42,9 @@ describe('the import table', () => {
 
   it('is kept by every .astro file, which the tool does not read', () => {
     const files = sourceFiles(['src'], ['.astro']);
-    expect(files.flatMap((file) => foreignImports(file, readFileSync(join(checkout, file), 'utf8')))).toEqual([]);
+    expect(
+      files.flatMap((file) => foreignImports(file, readFileSync(join(checkout, file), 'utf8'))),
+    ).toEqual([]);
   });
 });
 
@@ -40,20 +53,27 @@ const planted: { fault: string; rule: string; files: Record<string, string> }[] 
   {
     fault: 'geometry knows the domain',
     rule: 'room-geometry',
-    files: { 'src/geometry/upward.ts': "import '~/domain/innocent';", 'src/domain/innocent.ts': 'export {};' },
+    files: {
+      'src/geometry/upward.ts': "import '~/domain/innocent';",
+      'src/domain/innocent.ts': 'export {};',
+    },
   },
   {
     fault: 'a type is imported against the arrows',
     rule: 'room-domain',
     files: {
-      'src/domain/typed.ts': "import type { B } from '../server/services/typed'; export type A = B;",
+      'src/domain/typed.ts':
+        "import type { B } from '../server/services/typed'; export type A = B;",
       'src/server/services/typed.ts': 'export type B = 1;',
     },
   },
   {
     fault: 'a page reaches into the database',
     rule: 'room-pages',
-    files: { 'src/pages/api/deep.ts': "import '~/server/database/rows';", 'src/server/database/rows.ts': 'export {};' },
+    files: {
+      'src/pages/api/deep.ts': "import '~/server/database/rows';",
+      'src/server/database/rows.ts': 'export {};',
+    },
   },
   {
     fault: 'two modules need each other',
@@ -66,12 +86,16 @@ const planted: { fault: string; rule: string; files: Record<string, string> }[] 
   {
     fault: 'three outside the viewport',
     rule: 'three-in-viewport',
-    files: { 'src/islands/solid.ts': "import { Vector3 } from 'three'; export const a = new Vector3();" },
+    files: {
+      'src/islands/solid.ts': "import { Vector3 } from 'three'; export const a = new Vector3();",
+    },
   },
   {
     fault: 'a query outside the database room',
     rule: 'sequelize-in-database',
-    files: { 'src/server/services/query.ts': "import { Op } from 'sequelize'; export const a = Op.and;" },
+    files: {
+      'src/server/services/query.ts': "import { Op } from 'sequelize'; export const a = Op.and;",
+    },
   },
   {
     fault: 'a migration that leans on the program',
@@ -95,8 +119,14 @@ describe('a planted fault is found', () => {
 
   beforeAll(() => {
     const root = mkdtempSync(join(tmpdir(), 'dipwright-planted-'));
-    for (const folder of ['src', 'db', 'tests/structure']) mkdirSync(join(root, folder), { recursive: true });
-    for (const file of ['.dependency-cruiser.cjs', 'tsconfig.json', 'package.json', 'tests/structure/import-table.cjs']) {
+    for (const folder of ['src', 'db', 'tests/structure'])
+      mkdirSync(join(root, folder), { recursive: true });
+    for (const file of [
+      '.dependency-cruiser.cjs',
+      'tsconfig.json',
+      'package.json',
+      'tests/structure/import-table.cjs',
+    ]) {
       cpSync(join(checkout, file), join(root, file));
     }
     symlinkSync(join(checkout, 'node_modules'), join(root, 'node_modules'));
@@ -114,7 +144,8 @@ describe('a planted fault is found', () => {
   });
 
   it('in an .astro file', () => {
-    const page = "---\nimport { find } from '~/server/database/repositories/tanks';\n---\n<p>page</p>\n";
+    const page =
+      "---\nimport { find } from '~/server/database/repositories/tanks';\n---\n<p>page</p>\n";
     expect(foreignImports('src/pages/tanks.astro', page)).toHaveLength(1);
   });
 });
@@ -124,9 +155,13 @@ function foreignImports(file: string, text: string): string[] {
   const room = roomOf(file);
   if (room === null) return [`${file} stands in no room`];
   const frontmatter = /^---\n([\s\S]*?)\n---/.exec(text)?.[1] ?? '';
-  const targets = [...frontmatter.matchAll(/(?:from|import)\s+'([~.][^']*)'/g)].map(([, target = '']) => target);
+  const targets = [...frontmatter.matchAll(/(?:from|import)\s+'([~.][^']*)'/g)].map(
+    ([, target = '']) => target,
+  );
   return targets
-    .map((target) => (target.startsWith('~/') ? `src/${target.slice(2)}` : posix.join(posix.dirname(file), target)))
+    .map((target) =>
+      target.startsWith('~/') ? `src/${target.slice(2)}` : posix.join(posix.dirname(file), target),
+    )
     .filter((target) => ![room, ...(rooms[room] ?? [])].includes(roomOf(target) ?? ''))
     .map((target) => `${file} imports ${target}`);
 }

@@ -19,9 +19,13 @@ const lock = read<Lock>('package-lock.json');
 /** Every copy of a package in the lock file that is older than the floor. */
 function below(floor: Floor, { packages }: Lock): string[] {
   return Object.entries(packages)
-    .filter(([path, entry]) => path.endsWith(`node_modules/${floor.name}`) || entry.name === floor.name)
+    .filter(
+      ([path, entry]) => path.endsWith(`node_modules/${floor.name}`) || entry.name === floor.name,
+    )
     .filter(([, { version = '0.0.0' }]) => compare(version, floor.minimum) < 0)
-    .map(([path, { version }]) => `${path} ${version} is older than ${floor.minimum}: ${floor.reason}`);
+    .map(
+      ([path, { version }]) => `${path} ${version} is older than ${floor.minimum}: ${floor.reason}`,
+    );
 }
 
 /** A release candidate counts as older than its release. */
@@ -37,14 +41,19 @@ function compare(a: string, b: string): number {
 
 function isUsed(name: string): boolean {
   const imported = new RegExp(`(from|import|require)\\s*\\(?\\s*['"]${name}(/[^'"]*)?['"]`);
-  const files = [...sourceFiles(['src', 'db'], ['.ts', '.tsx', '.mjs', '.astro']), 'astro.config.mjs'];
+  const files = [
+    ...sourceFiles(['src', 'db'], ['.ts', '.tsx', '.mjs', '.astro']),
+    'astro.config.mjs',
+  ];
   return files.some((file) => imported.test(readFileSync(join(checkout, file), 'utf8')));
 }
 
 describe('version floors', () => {
   it.each(floors)('$name $minimum', (floor) => {
     if (floor.onlyWhenUsed && !isUsed(floor.name)) {
-      expect(readFileSync(join(checkout, 'astro.config.mjs'), 'utf8')).toContain('passthroughImageService()');
+      expect(readFileSync(join(checkout, 'astro.config.mjs'), 'utf8')).toContain(
+        'passthroughImageService()',
+      );
       return;
     }
     expect(below(floor, lock)).toEqual([]);
@@ -64,7 +73,8 @@ describe('version floors', () => {
 });
 
 it('every version in package.json is exact', () => {
-  const { dependencies, devDependencies, overrides } = read<Record<string, Record<string, string>>>('package.json');
+  const { dependencies, devDependencies, overrides } =
+    read<Record<string, Record<string, string>>>('package.json');
   const loose = Object.entries({ ...dependencies, ...devDependencies, ...overrides }).filter(
     ([, version]) => !/^\d+\.\d+\.\d+(-[\w.]+)?$/.test(version),
   );

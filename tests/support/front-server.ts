@@ -1,5 +1,9 @@
 import { mkdtempSync, mkdirSync, rmSync, writeFileSync } from 'node:fs';
-import { request as httpRequest, type IncomingHttpHeaders, type OutgoingHttpHeaders } from 'node:http';
+import {
+  request as httpRequest,
+  type IncomingHttpHeaders,
+  type OutgoingHttpHeaders,
+} from 'node:http';
 import { connect, type AddressInfo } from 'node:net';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
@@ -77,15 +81,30 @@ interface AskInit {
 }
 
 /** One request on a connection of its own. A list of buffers is sent without a length. */
-function ask(port: number, path: string, { method = 'GET', headers = {}, body }: AskInit): Promise<Answer> {
+function ask(
+  port: number,
+  path: string,
+  { method = 'GET', headers = {}, body }: AskInit,
+): Promise<Answer> {
   return new Promise((resolve, reject) => {
     const request = httpRequest(
-      { host: '127.0.0.1', port, path, method, agent: false, headers: { Host: 'tarnside.example', ...headers } },
+      {
+        host: '127.0.0.1',
+        port,
+        path,
+        method,
+        agent: false,
+        headers: { Host: 'tarnside.example', ...headers },
+      },
       (response) => {
         const parts: Buffer[] = [];
         response.on('data', (part: Buffer) => parts.push(part));
         response.on('end', () =>
-          resolve({ status: response.statusCode ?? 0, headers: response.headers, body: Buffer.concat(parts) }),
+          resolve({
+            status: response.statusCode ?? 0,
+            headers: response.headers,
+            body: Buffer.concat(parts),
+          }),
         );
         response.on('error', reject);
       },

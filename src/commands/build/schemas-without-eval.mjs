@@ -8,7 +8,10 @@ export function schemasWithoutEval() {
     name: 'dipwright-schemas-without-eval',
     hooks: {
       'astro:config:setup': ({ injectScript }) => {
-        injectScript('before-hydration', "import { config } from 'zod/v4/core';\nconfig({ jitless: true });");
+        injectScript(
+          'before-hydration',
+          "import { config } from 'zod/v4/core';\nconfig({ jitless: true });",
+        );
       },
     },
   };

@@ -17,7 +17,12 @@ export function serverEntryPlugin() {
     },
     buildStart() {
       if (!isServerBuild) return;
-      this.emitFile({ type: 'chunk', id: source, fileName: 'dipwright.mjs', preserveSignature: 'strict' });
+      this.emitFile({
+        type: 'chunk',
+        id: source,
+        fileName: 'dipwright.mjs',
+        preserveSignature: 'strict',
+      });
     },
   };
 }

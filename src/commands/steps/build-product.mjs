@@ -1,5 +1,13 @@
 import { createHash } from 'node:crypto';
-import { existsSync, mkdirSync, readdirSync, readFileSync, rmSync, statSync, writeFileSync } from 'node:fs';
+import {
+  existsSync,
+  mkdirSync,
+  readdirSync,
+  readFileSync,
+  rmSync,
+  statSync,
+  writeFileSync,
+} from 'node:fs';
 import { join } from 'node:path';
 import { withFolderLock } from '../../../db/local/folder-lock.mjs';
 import { isFolderUsed, joinFolder } from '../../../db/local/folder-users.mjs';
@@ -7,7 +15,14 @@ import { StartFault } from '../../../db/local/start-fault.mjs';
 import { runProgram } from './run-program.mjs';
 import { say } from './say.mjs';
 
-const sources = ['src', 'public', 'astro.config.mjs', 'tsconfig.json', 'package.json', 'package-lock.json'];
+const sources = [
+  'src',
+  'public',
+  'astro.config.mjs',
+  'tsconfig.json',
+  'package.json',
+  'package-lock.json',
+];
 const keptBuilds = 2;
 
 /**
@@ -70,10 +85,23 @@ function stampOf(checkout) {
 
 function buildFault(output) {
   if (/ENOSPC|no space left/i.test(output)) {
-    return new StartFault('The disk is full: the product could not be built.', 'Free at least 1 GB, then run the command again. The data is kept.');
+    return new StartFault(
+      'The disk is full: the product could not be built.',
+      'Free at least 1 GB, then run the command again. The data is kept.',
+    );
   }
-  const lines = output.replace(/\u001b\[[0-9;]*m/g, '').split('\n').map((line) => line.trim());
+  const lines = output
+    .replace(/\u001b\[[0-9;]*m/g, '')
+    .split('\n')
+    .map((line) => line.trim());
   const at = lines.findLastIndex((line) => /error/i.test(line));
-  const why = lines.slice(Math.max(0, at)).filter((line) => line && !line.startsWith('at ')).slice(0, 3).join(' ');
-  return new StartFault(`The product could not be built (${why.slice(0, 400)}).`, 'Run: npx astro build, and mend what it says. Then run the command again.');
+  const why = lines
+    .slice(Math.max(0, at))
+    .filter((line) => line && !line.startsWith('at '))
+    .slice(0, 3)
+    .join(' ');
+  return new StartFault(
+    `The product could not be built (${why.slice(0, 400)}).`,
+    'Run: npx astro build, and mend what it says. Then run the command again.',
+  );
 }

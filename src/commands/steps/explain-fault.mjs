@@ -12,19 +12,27 @@ export function explainFault(error) {
   switch (error?.code) {
     case 'ENOSPC':
     case 'EDQUOT':
-      return { sentence: `The disk is full${place}.`, nextStep: 'Free at least 1 GB, then run the command again. The data is kept.' };
+      return {
+        sentence: `The disk is full${place}.`,
+        nextStep: 'Free at least 1 GB, then run the command again. The data is kept.',
+      };
     case 'EACCES':
     case 'EPERM':
       return {
         sentence: `This account lacks a right that is needed${place}.`,
-        nextStep: 'Run the command as the account that owns this checkout, or give that right, then run it again.',
+        nextStep:
+          'Run the command as the account that owns this checkout, or give that right, then run it again.',
       };
     case 'EROFS':
-      return { sentence: `The disk may only be read${place}.`, nextStep: 'Put the checkout on a disk that may be written, then run the command again.' };
+      return {
+        sentence: `The disk may only be read${place}.`,
+        nextStep: 'Put the checkout on a disk that may be written, then run the command again.',
+      };
     default:
       return {
         sentence: `Something unforeseen went wrong: ${error?.message ?? String(error)}`,
-        nextStep: 'Run the command again; if it repeats, set DIPWRIGHT_SHOW_STACK=1 to see where it comes from.',
+        nextStep:
+          'Run the command again; if it repeats, set DIPWRIGHT_SHOW_STACK=1 to see where it comes from.',
       };
   }
 }

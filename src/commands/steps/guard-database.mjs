@@ -16,7 +16,8 @@ export function guardDatabase(server, everyMs = 500) {
     busy = true;
     try {
       restarts = restarts.filter((at) => Date.now() - at < 60_000);
-      if (restarts.length === 3) throw new Error(`MariaDB stopped three times within a minute; its log is ${server.log}.`);
+      if (restarts.length === 3)
+        throw new Error(`MariaDB stopped three times within a minute; its log is ${server.log}.`);
       restarts.push(Date.now());
       say('MariaDB stopped unexpectedly; starting it again.');
       await server.restart();

@@ -18,7 +18,13 @@ export async function installPackages(checkout) {
   say('Installing the npm packages (one to two minutes, once).');
   const { code, output } = await runProgram(
     'npm',
-    ['ci', '--no-audit', '--no-fund', '--fetch-retry-mintimeout=2000', '--fetch-retry-maxtimeout=10000'],
+    [
+      'ci',
+      '--no-audit',
+      '--no-fund',
+      '--fetch-retry-mintimeout=2000',
+      '--fetch-retry-maxtimeout=10000',
+    ],
     { cwd: checkout, env: { NODE_ENV: undefined } },
   );
   if (code !== 0) throw npmFault(output);
@@ -36,7 +42,9 @@ function installedByHand(checkout) {
   try {
     const installed = packagesOf('node_modules/.package-lock.json');
     const wanted = packagesOf('package-lock.json');
-    const same = (path) => installed[path]?.version === wanted[path].version && installed[path]?.integrity === wanted[path].integrity;
+    const same = (path) =>
+      installed[path]?.version === wanted[path].version &&
+      installed[path]?.integrity === wanted[path].integrity;
     // Packages for other machines (optional, by system or processor) are in the lock file only.
     return Object.keys(wanted).every((path) => path === '' || wanted[path].optional || same(path));
   } catch {
@@ -58,9 +66,16 @@ function readStamp(file) {
  */
 export function npmFault(output) {
   if (/ENOSPC|no space left/i.test(output)) {
-    return new StartFault('The disk is full: the npm packages could not be installed.', 'Free at least 1 GB, then run the command again.');
+    return new StartFault(
+      'The disk is full: the npm packages could not be installed.',
+      'Free at least 1 GB, then run the command again.',
+    );
   }
-  if (/ENOTFOUND|EAI_AGAIN|ECONNREFUSED|ECONNRESET|ETIMEDOUT|ENETUNREACH|EHOSTUNREACH|network/i.test(output)) {
+  if (
+    /ENOTFOUND|EAI_AGAIN|ECONNREFUSED|ECONNRESET|ETIMEDOUT|ENETUNREACH|EHOSTUNREACH|network/i.test(
+      output,
+    )
+  ) {
     return new StartFault(
       'The npm registry cannot be reached, and the packages are not installed yet.',
       'Connect this machine to the network, or set your registry with: npm config set registry ADDRESS. Then run the command again.',
@@ -72,7 +87,10 @@ export function npmFault(output) {
       'Run the command as the account that owns this checkout, or delete node_modules, then run it again.',
     );
   }
-  const why = output.split('\n').filter((line) => /^npm (error|ERR!)/.test(line)).at(0);
+  const why = output
+    .split('\n')
+    .filter((line) => /^npm (error|ERR!)/.test(line))
+    .at(0);
   return new StartFault(
     `The npm packages could not be installed${why ? ` (${why.replace(/^npm (error|ERR!)\s*/, '').trim()})` : ''}.`,
     'Run: npm ci, and mend what it says. Then run the command again.',

@@ -16,7 +16,8 @@ export function webAddress(env = process.env) {
 export function localSettings(server, env = process.env) {
   return {
     DIPWRIGHT_LOG_LEVEL: env.DIPWRIGHT_LOG_LEVEL || 'warn',
-    DIPWRIGHT_COMPUTE_WORKERS: env.DIPWRIGHT_COMPUTE_WORKERS || String(Math.min(4, availableParallelism())),
+    DIPWRIGHT_COMPUTE_WORKERS:
+      env.DIPWRIGHT_COMPUTE_WORKERS || String(Math.min(4, availableParallelism())),
     DIPWRIGHT_DATABASE_HOST: server.host,
     DIPWRIGHT_DATABASE_PORT: String(server.port),
     DIPWRIGHT_DATABASE_NAME: server.database,

@@ -9,7 +9,10 @@ import { StartFault } from '../../../db/local/start-fault.mjs';
  */
 export async function requireWebPort({ host, port }, command, patienceMs = 3_000) {
   if (!Number.isInteger(port) || port < 1 || port > 65_535) {
-    throw new StartFault('DIPWRIGHT_PORT is not a port.', `Choose a whole number from 1 to 65535: DIPWRIGHT_PORT=4321 ${command}`);
+    throw new StartFault(
+      'DIPWRIGHT_PORT is not a port.',
+      `Choose a whole number from 1 to 65535: DIPWRIGHT_PORT=4321 ${command}`,
+    );
   }
   const until = Date.now() + patienceMs;
   let state = await portState(port, host);
@@ -20,10 +23,16 @@ export async function requireWebPort({ host, port }, command, patienceMs = 3_000
   if (state === 'free') return;
   const next = `DIPWRIGHT_PORT=${port < 1024 ? 4321 : port + 1} ${command}`;
   if (state === 'forbidden') {
-    throw new StartFault(`This account may not listen on port ${port}.`, `Choose a port from 1024 on: ${next}`);
+    throw new StartFault(
+      `This account may not listen on port ${port}.`,
+      `Choose a port from 1024 on: ${next}`,
+    );
   }
   if (state === 'no-address') {
-    throw new StartFault(`This machine has no address ${host} to listen on.`, `Choose another: DIPWRIGHT_HOST=127.0.0.1 ${command}`);
+    throw new StartFault(
+      `This machine has no address ${host} to listen on.`,
+      `Choose another: DIPWRIGHT_HOST=127.0.0.1 ${command}`,
+    );
   }
   throw new StartFault(
     `Port ${port} of ${host} is taken by another program (perhaps Dipwright runs already).`,

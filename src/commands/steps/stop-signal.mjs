@@ -20,7 +20,10 @@ export function untilAskedToStop() {
       const done = await Promise.race([step.then((value) => ({ value })), asked]);
       if ('signal' in done) {
         step.catch(() => undefined);
-        throw new StartFault('Stopped before it was ready.', 'Run the command again; what was done is kept.');
+        throw new StartFault(
+          'Stopped before it was ready.',
+          'Run the command again; what was done is kept.',
+        );
       }
       return done.value;
     },

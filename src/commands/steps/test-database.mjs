@@ -8,7 +8,13 @@ export const testDatabasePrefix = 'dipwright_test';
  * @param {string} checkout
  */
 export function openTestDatabase(checkout) {
-  return openLocalServer({ checkout, name: 'test', database: testDatabasePrefix, scratchPrefix: testDatabasePrefix, say });
+  return openLocalServer({
+    checkout,
+    name: 'test',
+    database: testDatabasePrefix,
+    scratchPrefix: testDatabasePrefix,
+    say,
+  });
 }
 
 /**

@@ -8,17 +8,20 @@ import { StartFault } from '../../../db/local/start-fault.mjs';
  * @param {string} checkout
  * @param {string} build folder of the build
  * @param {Record<string, string>} settings
+ * @param {{ quiet?: boolean }} [options] `quiet`: its log goes nowhere
  */
-export async function startWebServer(checkout, build, settings) {
+export async function startWebServer(checkout, build, settings, { quiet = false } = {}) {
   const child = fork(join(build, 'server', 'dipwright.mjs'), [], {
     cwd: checkout,
     env: { ...process.env, NODE_ENV: 'production', ...settings },
     execArgv: ['--enable-source-maps'],
     // A session of its own: Ctrl-C reaches the command, which asks the server to leave.
     detached: true,
-    stdio: ['ignore', 'inherit', 'inherit', 'ipc'],
+    stdio: quiet ? ['ignore', 'ignore', 'ignore', 'ipc'] : ['ignore', 'inherit', 'inherit', 'ipc'],
   });
-  const ended = new Promise((resolve) => child.once('exit', (code, signal) => resolve({ code, signal })));
+  const ended = new Promise((resolve) =>
+    child.once('exit', (code, signal) => resolve({ code, signal })),
+  );
   const outcome = await Promise.race([
     new Promise((resolve) => child.on('message', resolve)),
     ended.then(() => ({ fault: 'it ended at once' })),

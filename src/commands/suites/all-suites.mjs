@@ -13,13 +13,25 @@ import { vitestSuite } from './vitest-suite.mjs';
  */
 export function allSuites(checkout, server) {
   const tool = (...parts) => join('node_modules', ...parts);
-  const vitest = (project) => (args) => vitestSuite(checkout, project, testDatabaseEnvironment(server), args);
-  const program = (name, ...args) => () => programSuite(checkout, name, args);
+  const vitest = (project) => (args) =>
+    vitestSuite(checkout, project, testDatabaseEnvironment(server), args);
+  const program =
+    (name, ...args) =>
+    () =>
+      programSuite(checkout, name, args);
   return [
     { name: 'structure', usual: true, run: vitest('structure') },
-    { name: 'lint', usual: true, run: program('lint', tool('eslint', 'bin', 'eslint.js'), '--max-warnings=0', '.') },
+    {
+      name: 'lint',
+      usual: true,
+      run: program('lint', tool('eslint', 'bin', 'eslint.js'), '--max-warnings=0', '.'),
+    },
     { name: 'pages', usual: true, run: program('pages', tool('astro', 'astro.js'), 'check') },
-    { name: 'types', usual: true, run: program('types', tool('typescript', 'bin', 'tsc'), '--noEmit') },
+    {
+      name: 'types',
+      usual: true,
+      run: program('types', tool('typescript', 'bin', 'tsc'), '--noEmit'),
+    },
     { name: 'unit', usual: true, run: vitest('unit') },
     { name: 'dom', usual: true, run: vitest('dom') },
     { name: 'server', usual: true, run: vitest('server') },
@@ -29,7 +41,12 @@ export function allSuites(checkout, server) {
       usual: false,
       run: async (args) => {
         const build = await buildProduct(checkout);
-        return vitestSuite(checkout, 'long', { ...testDatabaseEnvironment(server), DIPWRIGHT_TEST_BUILD: build }, args);
+        return vitestSuite(
+          checkout,
+          'long',
+          { ...testDatabaseEnvironment(server), DIPWRIGHT_TEST_BUILD: build },
+          args,
+        );
       },
     },
   ];

@@ -62,7 +62,13 @@ function countTests(file, code) {
   try {
     ({ stats } = JSON.parse(readFileSync(file, 'utf8')));
   } catch {
-    return { name: 'browser', passed: 0, failed: 1, skipped: 0, note: 'Playwright ended without a report' };
+    return {
+      name: 'browser',
+      passed: 0,
+      failed: 1,
+      skipped: 0,
+      note: 'Playwright ended without a report',
+    };
   }
   // A test that passes only when it is run again is not trusted.
   const failed = stats.unexpected + stats.flaky;

@@ -14,5 +14,8 @@ export function sumUp(results) {
     if (skipped > 0) parts.push(`${skipped} skipped`);
     return `${failed > 0 ? '✗' : '✓'} ${name}: ${parts.join(', ')}${note ? ` (${note})` : ''}`;
   });
-  return { lines: [...lines, `${total('passed')} passed, ${total('failed')} failed`], failed: total('failed') };
+  return {
+    lines: [...lines, `${total('passed')} passed, ${total('failed')} failed`],
+    failed: total('failed'),
+  };
 }

@@ -39,10 +39,18 @@ function countTests(file, project, code) {
   try {
     report = JSON.parse(readFileSync(file, 'utf8'));
   } catch {
-    return { name: project, passed: 0, failed: 1, skipped: 0, note: 'vitest ended without a report' };
+    return {
+      name: project,
+      passed: 0,
+      failed: 1,
+      skipped: 0,
+      note: 'vitest ended without a report',
+    };
   }
   const brokenFiles = report.testResults.filter(
-    (result) => result.status === 'failed' && result.assertionResults.every((test) => test.status !== 'failed'),
+    (result) =>
+      result.status === 'failed' &&
+      result.assertionResults.every((test) => test.status !== 'failed'),
   ).length;
   const failed = report.numFailedTests + brokenFiles;
   return {

@@ -17,7 +17,8 @@ export function acceptedEncoding(
       }),
   );
   for (const encoding of ['br', 'gzip'] as const) {
-    if (offered.has(encoding) && (weights.get(encoding) ?? weights.get('*') ?? 0) > 0) return encoding;
+    if (offered.has(encoding) && (weights.get(encoding) ?? weights.get('*') ?? 0) > 0)
+      return encoding;
   }
   return null;
 }

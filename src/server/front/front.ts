@@ -62,7 +62,13 @@ export function createFront({ config, log, state, files, handler }: FrontParts) 
     if (isClosedRoute(path)) return say(refusals.notFound);
 
     response.once('close', () => {
-      log.debug('request', { method, path, status: response.statusCode, ms: Math.round(performance.now() - startedAt), requestId });
+      log.debug('request', {
+        method,
+        path,
+        status: response.statusCode,
+        ms: Math.round(performance.now() - startedAt),
+        requestId,
+      });
     });
     if (path === '/readyz' && state.leaving) return sayLeaving(response);
     const reads = method === 'GET' || method === 'HEAD';
@@ -110,7 +116,9 @@ function sayLeaving(response: ServerResponse): void {
   response.statusCode = 503;
   response.setHeader('Cache-Control', 'no-store');
   response.setHeader('Content-Type', 'application/json');
-  response.end('{"ready":false,"checks":[{"name":"process","fit":false,"detail":"The server is leaving."}]}');
+  response.end(
+    '{"ready":false,"checks":[{"name":"process","fit":false,"detail":"The server is leaving."}]}',
+  );
 }
 
 /** The framework takes a body that was read already from `request.body`, as an iterable of bytes. */

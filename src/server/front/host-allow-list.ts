@@ -3,9 +3,14 @@
  * one or it is malformed, 421 when it is not ours, null when it is. A page never builds an address
  * from a name that a stranger sent.
  */
-export function hostFault(rawHeaders: readonly string[], allowed: readonly string[]): 400 | 421 | null {
+export function hostFault(
+  rawHeaders: readonly string[],
+  allowed: readonly string[],
+): 400 | 421 | null {
   // Node keeps the first of two Host headers without a word; another server might keep the last.
-  const hosts = rawHeaders.filter((_, at) => at % 2 === 1 && rawHeaders[at - 1]?.toLowerCase() === 'host');
+  const hosts = rawHeaders.filter(
+    (_, at) => at % 2 === 1 && rawHeaders[at - 1]?.toLowerCase() === 'host',
+  );
   const [host] = hosts;
   if (hosts.length !== 1 || host === undefined || !isHost(host)) return 400;
   return allowed.includes(host.toLowerCase()) ? null : 421;

@@ -16,7 +16,12 @@ export const timeLimits = {
 export function createHttpServer(
   listener: RequestListener,
   tls: boolean,
-  limits: { headersMs: number; requestMs: number; keepAliveMs: number; silenceMs: number } = timeLimits,
+  limits: {
+    headersMs: number;
+    requestMs: number;
+    keepAliveMs: number;
+    silenceMs: number;
+  } = timeLimits,
 ): Server {
   const server = createServer(
     {
@@ -37,7 +42,14 @@ export function createHttpServer(
     const status = statusOf[error.code ?? ''] ?? 400;
     const lines = Object.entries(securityHeaders(tls)).map(([name, value]) => `${name}: ${value}`);
     socket.end(
-      [`HTTP/1.1 ${status} ${STATUS_CODES[status]}`, ...lines, 'Content-Length: 0', 'Connection: close', '', ''].join('\r\n'),
+      [
+        `HTTP/1.1 ${status} ${STATUS_CODES[status]}`,
+        ...lines,
+        'Content-Length: 0',
+        'Connection: close',
+        '',
+        '',
+      ].join('\r\n'),
     );
   });
   return server;

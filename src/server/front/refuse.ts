@@ -44,7 +44,8 @@ export const refusals = {
     status: 503,
     title: 'Not available',
     code: 'unavailable',
-    detail: 'The database cannot be reached at the moment. Nothing was changed; try again in a minute.',
+    detail:
+      'The database cannot be reached at the moment. Nothing was changed; try again in a minute.',
   },
   failed: {
     status: 500,
@@ -55,8 +56,16 @@ export const refusals = {
 } as const satisfies Record<string, Refusal>;
 
 export function tooLarge(cap: number): Refusal {
-  const most = cap === 0 ? 'no body' : `a body of at most ${cap.toLocaleString('en').replaceAll(',', ' ')} bytes`;
-  return { status: 413, title: 'Too large', code: 'too-large', detail: `This address takes ${most}.` };
+  const most =
+    cap === 0
+      ? 'no body'
+      : `a body of at most ${cap.toLocaleString('en').replaceAll(',', ' ')} bytes`;
+  return {
+    status: 413,
+    title: 'Too large',
+    code: 'too-large',
+    detail: `This address takes ${most}.`,
+  };
 }
 
 /** problem+json for programs and the API, otherwise a plain page that needs no file. */
@@ -66,7 +75,8 @@ export function refusalBody(
   requestId: string,
 ): { type: string; text: string } {
   const wantsPage =
-    !(request.url ?? '').startsWith('/api/') && (request.headers.accept ?? '').includes('text/html');
+    !(request.url ?? '').startsWith('/api/') &&
+    (request.headers.accept ?? '').includes('text/html');
   if (wantsPage) return { type: 'text/html; charset=utf-8', text: page(refusal) };
   const { status, title, detail, code } = refusal;
   const problem = { type: `/api#${code}`, title, status, detail, code, requestId, errors: [] };

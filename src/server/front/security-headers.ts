@@ -17,15 +17,23 @@ const directives: readonly (readonly [name: string, ...sources: string[]])[] = [
  * The Content-Security-Policy header. From the policy that the framework made for a page only the
  * hashes are taken over (minus those in `drop`: hashes of files, which 'self' covers already).
  */
-export function contentSecurityPolicy(pagePolicy?: string, drop: ReadonlySet<string> = new Set()): string {
+export function contentSecurityPolicy(
+  pagePolicy?: string,
+  drop: ReadonlySet<string> = new Set(),
+): string {
   const ofPage = new Map(
     (pagePolicy ?? '').split(';').map((directive) => {
       const [name = '', ...sources] = directive.trim().split(/\s+/);
-      return [name, sources.filter((source) => /^'sha(256|384|512)-[A-Za-z0-9+/]+=*'$/.test(source))] as const;
+      return [
+        name,
+        sources.filter((source) => /^'sha(256|384|512)-[A-Za-z0-9+/]+=*'$/.test(source)),
+      ] as const;
     }),
   );
   return directives
-    .map(([name, ...sources]) => [name, ...sources, ...(ofPage.get(name) ?? []).filter((hash) => !drop.has(hash))].join(' '))
+    .map(([name, ...sources]) =>
+      [name, ...sources, ...(ofPage.get(name) ?? []).filter((hash) => !drop.has(hash))].join(' '),
+    )
     .join('; ');
 }
 
@@ -37,7 +45,8 @@ export function securityHeaders(tls: boolean): Record<string, string> {
     'Referrer-Policy': 'no-referrer',
     'Cross-Origin-Opener-Policy': 'same-origin',
     'Cross-Origin-Resource-Policy': 'same-origin',
-    'Permissions-Policy': 'camera=(), geolocation=(), microphone=(), payment=(), usb=(), browsing-topics=()',
+    'Permissions-Policy':
+      'camera=(), geolocation=(), microphone=(), payment=(), usb=(), browsing-topics=()',
     ...(tls ? { 'Strict-Transport-Security': 'max-age=63072000; includeSubDomains' } : {}),
   };
 }

@@ -1,5 +1,11 @@
 import type { IncomingMessage, OutgoingHttpHeaders, ServerResponse } from 'node:http';
-import { constants, createBrotliCompress, createGzip, type BrotliCompress, type Gzip } from 'node:zlib';
+import {
+  constants,
+  createBrotliCompress,
+  createGzip,
+  type BrotliCompress,
+  type Gzip,
+} from 'node:zlib';
 import { acceptedEncoding } from './accepted-encoding';
 import { refusalBody, refusals, type Refusal } from './refuse';
 import { contentSecurityPolicy } from './security-headers';
@@ -18,7 +24,11 @@ const textual = /^(text\/|application\/(json|problem\+json|javascript|manifest\+
  * without one, compression of text. It does so at `writeHead`, the one moment when status and
  * headers are known and nothing is sent.
  */
-export function shapeResponse(request: IncomingMessage, response: ServerResponse, shaping: Shaping): void {
+export function shapeResponse(
+  request: IncomingMessage,
+  response: ServerResponse,
+  shaping: Shaping,
+): void {
   const original = {
     writeHead: response.writeHead.bind(response) as (status: number) => ServerResponse,
     write: response.write.bind(response) as (chunk: unknown) => boolean,
@@ -27,7 +37,11 @@ export function shapeResponse(request: IncomingMessage, response: ServerResponse
   let packer: BrotliCompress | Gzip | null = null;
   let replaced = false;
 
-  const writeHead = (status: number, second?: string | OutgoingHttpHeaders, third?: OutgoingHttpHeaders) => {
+  const writeHead = (
+    status: number,
+    second?: string | OutgoingHttpHeaders,
+    third?: OutgoingHttpHeaders,
+  ) => {
     const headers = typeof second === 'object' ? second : (third ?? {});
     for (const [name, value] of Object.entries(headers)) {
       if (value !== undefined) response.setHeader(name, value);
@@ -73,7 +87,11 @@ export function shapeResponse(request: IncomingMessage, response: ServerResponse
   }) as typeof response.end;
 }
 
-function mergePolicy(response: ServerResponse, headers: OutgoingHttpHeaders, drop: ReadonlySet<string>): void {
+function mergePolicy(
+  response: ServerResponse,
+  headers: OutgoingHttpHeaders,
+  drop: ReadonlySet<string>,
+): void {
   const name = Object.keys(headers).find((key) => key.toLowerCase() === 'content-security-policy');
   if (name === undefined) return;
   response.setHeader('Content-Security-Policy', contentSecurityPolicy(String(headers[name]), drop));
@@ -92,7 +110,8 @@ function packerFor(request: IncomingMessage, response: ServerResponse, status: n
   response.appendHeader('Vary', 'Accept-Encoding');
   if (!hasBody || response.hasHeader('content-encoding')) return null;
   const length = Number(response.getHeader('content-length') ?? Infinity);
-  const encoding = length < 1_000 ? null : acceptedEncoding(request.headers['accept-encoding'], both);
+  const encoding =
+    length < 1_000 ? null : acceptedEncoding(request.headers['accept-encoding'], both);
   if (encoding === null) return null;
   response.setHeader('Content-Encoding', encoding);
   return encoding === 'br'

@@ -57,7 +57,9 @@ export function staticFiles(folder: string): StaticFiles {
       type,
       etag: `"${digest.slice(0, 22)}"`,
       hashed: path.startsWith('/_astro/'),
-      encodings: new Set((['br', 'gzip'] as const).filter((encoding) => exists(file + suffixOf[encoding]))),
+      encodings: new Set(
+        (['br', 'gzip'] as const).filter((encoding) => exists(file + suffixOf[encoding])),
+      ),
     });
   }
   return {
@@ -73,12 +75,19 @@ export function staticFiles(folder: string): StaticFiles {
 
 const suffixOf = { br: '.br', gzip: '.gz' } as const;
 
-async function send(found: StaticFile, request: IncomingMessage, response: ServerResponse): Promise<void> {
+async function send(
+  found: StaticFile,
+  request: IncomingMessage,
+  response: ServerResponse,
+): Promise<void> {
   const encoding = acceptedEncoding(request.headers['accept-encoding'], found.encodings);
   // One strong tag a representation: the compressed bytes are other bytes.
   const etag = encoding ? found.etag.replace(/"$/, `-${encoding}"`) : found.etag;
   response.setHeader('ETag', etag);
-  response.setHeader('Cache-Control', found.hashed ? 'public, max-age=31536000, immutable' : 'no-cache');
+  response.setHeader(
+    'Cache-Control',
+    found.hashed ? 'public, max-age=31536000, immutable' : 'no-cache',
+  );
   if (found.encodings.size > 0) response.setHeader('Vary', 'Accept-Encoding');
   if (request.headers['if-none-match']?.split(',').some((tag) => tag.trim() === etag)) {
     response.writeHead(304).end();

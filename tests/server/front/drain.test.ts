@@ -9,7 +9,10 @@ afterEach(async () => {
 });
 
 it('says "leaving" on /readyz while it still takes requests, then closes', async () => {
-  opened = await openFrontServer(async (_request, response) => void response.writeHead(200, { 'content-type': 'text/plain' }).end('ready'));
+  opened = await openFrontServer(
+    async (_request, response) =>
+      void response.writeHead(200, { 'content-type': 'text/plain' }).end('ready'),
+  );
   expect((await opened.ask('/readyz')).status).toBe(200);
   const left = drain(opened.server, opened.state, { leaveSeconds: 0.5, drainSeconds: 5 });
   const asked = await opened.ask('/readyz');
@@ -36,10 +39,19 @@ it('lets a request under way finish, and does not wait for idle connections', as
   });
   const idle = new Agent({ keepAlive: true });
   await new Promise<void>((resolve) => {
-    httpRequest({ port: opened!.port, host: '127.0.0.1', path: '/', agent: idle, headers: { Host: 'tarnside.example' } }, (response) => {
-      response.resume();
-      response.on('end', resolve);
-    }).end();
+    httpRequest(
+      {
+        port: opened!.port,
+        host: '127.0.0.1',
+        path: '/',
+        agent: idle,
+        headers: { Host: 'tarnside.example' },
+      },
+      (response) => {
+        response.resume();
+        response.on('end', resolve);
+      },
+    ).end();
   });
   const slow = opened.ask('/slow');
   await inside;
