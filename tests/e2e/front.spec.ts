@@ -65,7 +65,7 @@ test('a body past its cap is a 413 problem', async ({ request }) => {
 });
 
 test.describe('another site may not act: method × origin × content type', () => {
-  const foreign = [
+  const foreign: Record<string, string>[] = [
     { Origin: 'http://evil.example', 'Sec-Fetch-Site': 'cross-site' },
     { Origin: 'null', 'Sec-Fetch-Site': 'cross-site' },
     { 'Sec-Fetch-Site': 'same-site' },
