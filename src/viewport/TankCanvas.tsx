@@ -164,7 +164,7 @@ function Drawing({ preview, plate, projection, levels, selected }: TankCanvasPro
       <Lines
         segments={chosen}
         colour={ink.ink}
-        widthPx={2}
+        widthPx={1.5}
         where="always"
         order={9}
         resolution={resolution}

@@ -1,6 +1,7 @@
 import type { Dispatch } from 'react';
 import type { FieldFault } from '~/domain/errors';
 import type { TankDocument } from '~/domain/tank/document';
+import { valueAt } from '~/domain/tank/value-at';
 import { kindOf, kinds, type Solid } from '~/domain/tank/kinds/registry';
 import { formatLength } from '~/domain/units/format-length';
 import type { LengthUnit } from '~/domain/units/length-unit';
@@ -86,7 +87,7 @@ function Rows(props: {
   const turn = solid.turn ?? [0, 0, 0];
   const sizes = kind
     .sizes(solid)
-    .map((size) => formatLength(readPath(solid, size.path), unit))
+    .map((size) => formatLength(Number(valueAt(solid, size.path)), unit))
     .join(' × ');
   const choose = () => dispatch({ type: 'select', id: open ? null : solid.id });
   return (
@@ -196,12 +197,4 @@ function faultsOf(faults: readonly FieldFault[], index: number): FieldFault[] {
       pointer: pointer.slice(start.length),
       detail,
     }));
-}
-
-export function readPath(value: unknown, path: readonly string[]): number {
-  const leaf = path.reduce<unknown>(
-    (at, key) => (at as Record<string, unknown> | undefined)?.[key],
-    value,
-  );
-  return typeof leaf === 'number' ? leaf : 0;
 }

@@ -1,13 +1,13 @@
 import { useId, useState, type Dispatch } from 'react';
 import type { FieldFault } from '~/domain/errors';
 import type { TankDocument } from '~/domain/tank/document';
+import { valueAt } from '~/domain/tank/value-at';
 import { kindOf, type Solid } from '~/domain/tank/kinds/registry';
 import { formatLength } from '~/domain/units/format-length';
 import type { LengthUnit } from '~/domain/units/length-unit';
 import { changeSolid, renameSolid, setPlace, setRole, setSize, setTurn } from '~/scene/commands';
 import type { SceneAction } from '~/scene/scene';
 import { parseBetween, parsePlace, parseSize } from './parse-typed';
-import { readPath } from './PartsList';
 import { TypedNumber } from './TypedNumber';
 
 interface SolidFieldsProps {
@@ -56,7 +56,7 @@ export function SolidFields({ solid, document, dispatch, unit, faults }: SolidFi
           <TypedNumber
             key={size.path.join('.')}
             label={size.label}
-            value={readPath(solid, size.path)}
+            value={Number(valueAt(solid, size.path))}
             parse={parseSize(unit)}
             format={format}
             step={step}
