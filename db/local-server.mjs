@@ -19,6 +19,9 @@ import { anyFreePort, portState } from './local/free-port.mjs';
 import { processIdentity } from './local/process-identity.mjs';
 import { StartFault } from './local/start-fault.mjs';
 
+/** What a local server needs of Debian; asked for first by commands, before anything that takes long. */
+export const databasePrograms = ['mariadbd', 'mariadb-install-db', 'mariadb'];
+
 /**
  * The project's own MariaDB: a data folder of its own, loopback only, an account without rights
  * elsewhere, a port that is chosen once and remembered. Needs no installed npm package.
@@ -31,7 +34,7 @@ import { StartFault } from './local/start-fault.mjs';
  * }} options
  */
 export async function openLocalServer({ checkout, name, database, scratchPrefix, say }) {
-  ensurePrograms(['mariadbd', 'mariadb-install-db', 'mariadb'], say);
+  ensurePrograms(databasePrograms, say);
   const account = daemonAccount();
   const folder = dataFolder(checkout, name, account);
   const place = { folder, account, say };

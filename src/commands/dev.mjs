@@ -1,6 +1,7 @@
 import { spawn } from 'node:child_process';
 import { join } from 'node:path';
-import { openLocalServer } from '../../db/local-server.mjs';
+import { ensurePrograms } from '../../db/local/debian-packages.mjs';
+import { databasePrograms, openLocalServer } from '../../db/local-server.mjs';
 import { checkout } from './steps/checkout.mjs';
 import { demoSignIns } from './steps/demo-sign-ins.mjs';
 import { runCommand } from './steps/explain-fault.mjs';
@@ -19,7 +20,8 @@ await runCommand(async () => {
   requireNode();
   const address = webAddress();
   await requireWebPort(address, 'npm run dev');
-  await installPackages(checkout);
+  ensurePrograms(databasePrograms, say);
+  await stop.during(installPackages(checkout));
   const database = await openLocalServer({ checkout, name: 'demo', database: 'dipwright', say });
   try {
     const settings = { ...localSettings(database), DIPWRIGHT_MODE: 'development' };

@@ -1,4 +1,5 @@
-import { openLocalServer } from '../../db/local-server.mjs';
+import { ensurePrograms } from '../../db/local/debian-packages.mjs';
+import { databasePrograms, openLocalServer } from '../../db/local-server.mjs';
 import { StartFault } from '../../db/local/start-fault.mjs';
 import { buildProduct } from './steps/build-product.mjs';
 import { checkout } from './steps/checkout.mjs';
@@ -20,7 +21,8 @@ await runCommand(async () => {
   requireNode();
   const address = webAddress();
   await requireWebPort(address, 'npm start');
-  await installPackages(checkout);
+  ensurePrograms(databasePrograms, say);
+  await stop.during(installPackages(checkout));
   const database = await openLocalServer({ checkout, name: 'demo', database: 'dipwright', say });
   try {
     const settings = localSettings(database);

@@ -1,4 +1,5 @@
 import { ensurePrograms } from '../../db/local/debian-packages.mjs';
+import { databasePrograms } from '../../db/local-server.mjs';
 import { StartFault } from '../../db/local/start-fault.mjs';
 import { checkout } from './steps/checkout.mjs';
 import { explainFault, runCommand } from './steps/explain-fault.mjs';
@@ -18,8 +19,8 @@ await runCommand(async () => {
   const stop = untilAskedToStop();
   requireNode();
   const [flag, only, ...args] = process.argv.slice(2);
+  ensurePrograms([...databasePrograms, 'chromium', 'pdftotext', 'pdftoppm'], say);
   if (flag === undefined) await stop.during(installPackages(checkout));
-  ensurePrograms(['mariadbd', 'chromium', 'pdftotext', 'pdftoppm'], say);
   const server = await openTestDatabase(checkout);
   try {
     const suites = allSuites(checkout, server);

@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto';
-import { readFileSync, writeFileSync } from 'node:fs';
+import { readFileSync, statfsSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { StartFault } from '../../../db/local/start-fault.mjs';
 import { runProgram } from './run-program.mjs';
@@ -15,6 +15,7 @@ export async function installPackages(checkout) {
   const last = readStamp(stampFile);
   if (last === wanted) return;
   if (last === null && installedByHand(checkout)) return writeFileSync(stampFile, wanted);
+  requireSpace(checkout);
   say('Installing the npm packages (one to two minutes, once).');
   const { code, output } = await runProgram(
     'npm',
@@ -29,6 +30,17 @@ export async function installPackages(checkout) {
   );
   if (code !== 0) throw npmFault(output);
   writeFileSync(stampFile, wanted);
+}
+
+/** The packages take about 600 MB, and a disk that fills up on the way takes minutes to say so. */
+function requireSpace(checkout) {
+  const disk = statfsSync(checkout);
+  const freeMb = Math.floor((disk.bavail * disk.bsize) / 1_000_000);
+  if (freeMb >= 1_000) return;
+  throw new StartFault(
+    `Only ${freeMb} MB are left on the disk that holds ${checkout}, and the npm packages need more.`,
+    'Free at least 1 GB, then run the command again.',
+  );
 }
 
 function stampOf(checkout) {
