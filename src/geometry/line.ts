@@ -1,4 +1,5 @@
 import type { Interval } from './intervals';
+import { axisOrder, type Axis } from './shape';
 import type { Vec3 } from './vec3';
 
 /** Points origin + t·direction; `direction` a unit vector, so that t is in mm. */
@@ -56,4 +57,26 @@ export function lineInQuadric(line: Line, half: Vec3, slack: number): Interval |
   const far = middle < 0 ? middle - Math.sqrt(root) : middle + Math.sqrt(root);
   const near = far === 0 ? -Math.sqrt(root) : c / a / far;
   return { from: Math.min(far, near), to: Math.max(far, near) };
+}
+
+/** The stretch of a line inside an elliptic cylinder of a length along an axis, both centred on the origin. */
+export function lineInBarrel(
+  line: Line,
+  barrel: { axis: Axis; half: readonly [number, number]; length: number },
+  slack: number,
+): Interval | null {
+  const [first, second, third] = axisOrder(barrel.axis);
+  const half: [number, number, number] = [Infinity, Infinity, Infinity];
+  half[first] = barrel.half[0];
+  half[second] = barrel.half[1];
+  const normal: [number, number, number] = [0, 0, 0];
+  normal[third] = 1;
+  const round = lineInQuadric(line, half, slack);
+  const offset = barrel.length / 2;
+  const back: Vec3 = [-normal[0], -normal[1], -normal[2]];
+  const between = lineInHalfSpaces(line, [{ normal, offset }, { normal: back, offset }], slack);
+  if (!round || !between) return null;
+  const from = Math.max(round.from, between.from);
+  const to = Math.min(round.to, between.to);
+  return to >= from ? { from, to } : null;
 }

@@ -4,8 +4,10 @@ import { thinPlace } from '../../geometry/thin-places';
 import { thinMm } from '../../geometry/tolerance';
 import type { TankDocument } from '../tank/document';
 import { placedShape, placedSolid, type PlacedSolid } from '../tank/placed-solid';
+import { facetStandOffMm } from './facet-stand-off';
 import { liquidSpace, type LiquidSpace } from './liquid-space';
 import { piecesOf } from './pieces';
+import { publishedFacets } from './published-facets';
 import { refuseUncomputable } from './refuse-uncomputable';
 
 /**
@@ -18,8 +20,8 @@ export async function checkIssuable(document: TankDocument): Promise<string[]> {
   refuseUncomputable(document);
   await loadManifold();
   const solids = document.solids.map(placedSolid);
-  const round = solids.filter(({ kind }) => kind.curved).length;
-  const space = liquidSpace(solids, round <= 8 ? 512 : round <= 40 ? 256 : 128);
+  const space = liquidSpace(solids, publishedFacets(solids));
+  const round = solids.some(({ kind }) => kind.curved);
   const reasons: string[] = [];
 
   const pieces = piecesOf(space.mesh);
@@ -38,7 +40,7 @@ export async function checkIssuable(document: TankDocument): Promise<string[]> {
         : `What parts the liquid space is thinner than ${thinMm} mm ${where}: let the solids overlap or part them.`,
     );
   }
-  if (round > 0 && [1, -1].some((sign) => piecesWhenSwollen(solids, space, sign) !== pieces)) {
+  if (round && [1, -1].some((sign) => piecesWhenSwollen(solids, space, sign) !== pieces)) {
     reasons.push(
       'A round solid only touches another along a line: let them overlap or stand clear of each other.',
     );
@@ -57,9 +59,8 @@ function piecesWhenSwollen(
       .map((one) => {
         const { shape, place } = placedShape(one, space.facets);
         if (!one.kind.curved) return { shape, place };
-        // facets stand off the true surface by at most D·π²/6N² on either side
-        const facet = (2 * Math.max(...one.kind.extent(one.solid))) / space.facets ** 2;
-        return { shape: swollen(shape, direction * (thinMm + facet)), place };
+        const byMm = direction * (thinMm + facetStandOffMm(one, space.facets));
+        return { shape: swollen(shape, byMm), place };
       });
   const mesh = spaceOf(shapes('holds', sign), shapes('displaces', -sign), space.origin);
   return piecesOf(mesh);

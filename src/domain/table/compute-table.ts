@@ -1,9 +1,10 @@
 import { loadManifold } from '../../geometry/manifold';
 import { roundingOfCapacity } from '../../geometry/tolerance';
 import type { TankDocument } from '../tank/document';
-import { placedSolid, type PlacedSolid } from '../tank/placed-solid';
+import { placedSolid } from '../tank/placed-solid';
 import { liquidSpace } from './liquid-space';
 import { openings } from './openings';
+import { publishedFacets } from './published-facets';
 import { readingFrame } from './reading-frame';
 import { readingsOf } from './readings';
 import { refuseUncomputable } from './refuse-uncomputable';
@@ -22,7 +23,7 @@ export async function computeTable(
   refuseUncomputable(document);
   await loadManifold();
   const solids = document.solids.map(placedSolid);
-  const facets = coarseFacets(solids);
+  const facets = publishedFacets(solids) / 2;
   const fine = liquidSpace(solids, 2 * facets);
   const frame = readingFrame(document, solids, fine);
   const depths = readingsOf(readings, frame.heightMm);
@@ -49,10 +50,4 @@ export async function computeTable(
     trappedL,
     rows,
   };
-}
-
-/** N: finer where few solids are curved, so that time stays within a second or so. */
-function coarseFacets(solids: readonly PlacedSolid[]): number {
-  const curved = solids.filter(({ kind }) => kind.curved).length;
-  return curved <= 8 ? 256 : curved <= 40 ? 128 : 64;
 }

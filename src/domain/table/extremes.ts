@@ -2,6 +2,7 @@ import { levels } from '../../geometry/mesh';
 import { samePlaceMm } from '../../geometry/tolerance';
 import { dot, opposite, type Vec3 } from '../../geometry/vec3';
 import { highestLevel, type PlacedSolid } from '../tank/placed-solid';
+import { facetStandOffMm } from './facet-stand-off';
 import type { LiquidSpace } from './liquid-space';
 
 /**
@@ -21,14 +22,7 @@ export function extremes(
     if (level > high) high = level;
   }
   const shift = dot(up, origin);
-  // corners of the facets stand off the true surface by no more than D·π²/6N²
-  const widest = Math.max(
-    0,
-    ...holds
-      .filter(({ kind }) => kind.curved)
-      .map(({ kind, solid }) => Math.max(...kind.extent(solid))),
-  );
-  const slack = (2 * widest) / facets ** 2 + samePlaceMm;
+  const slack = Math.max(...holds.map((one) => facetStandOffMm(one, facets))) + samePlaceMm;
   return [-exactIfNear(opposite(up), -(low + shift)), exactIfNear(up, high + shift)];
 
   function exactIfNear(direction: Vec3, ofMesh: number): number {

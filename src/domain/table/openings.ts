@@ -4,6 +4,7 @@ import { opposite, type Vec3 } from '../../geometry/vec3';
 import { invalid } from '../errors';
 import type { TankDocument } from '../tank/document';
 import { chordsOf, type PlacedSolid } from '../tank/placed-solid';
+import { facetStandOffMm } from './facet-stand-off';
 import type { LiquidSpace } from './liquid-space';
 
 /**
@@ -31,10 +32,7 @@ export function openings(
       );
     }
     const [x, y, z] = space.origin;
-    const widest = Math.max(
-      ...solids.map(({ kind, solid }) => (kind.curved ? Math.max(...kind.extent(solid)) : 0)),
-    );
-    const nearMm = 2 * thinMm + (4 * widest) / space.facets ** 2;
+    const nearMm = 2 * (thinMm + Math.max(...solids.map((one) => facetStandOffMm(one, space.facets))));
     return (
       restingVolume(space.mesh, direction, [point[0] - x, point[1] - y, point[2] - z], nearMm) / 1e6
     );

@@ -28,7 +28,11 @@ function faultsOf(solid: Solid): readonly { path: readonly string[]; detail: str
   const kind = kindOf(solid);
   const tooSmall = kind
     .sizes(solid)
-    .filter(({ path }) => Number(valueAt(solid, path)) < thinMm)
+    .filter(({ path }) => {
+      // 0 itself is the schema's to allow: the tip of a cone
+      const size = Number(valueAt(solid, path));
+      return size > 0 && size < thinMm;
+    })
     .map(({ path }) => ({ path, detail: `a size is at least ${thinMm} mm.` }));
   return [...tooSmall, ...kind.faults(solid)];
 }

@@ -48,7 +48,10 @@ function litresByPoints(tank: TankDocument, levels: readonly number[]): { litres
 }
 
 function sizeOf(solid: Solid): number[] {
-  if (solid.kind !== 'cylinder') return [solid.length, solid.width, solid.height];
+  if (solid.kind === 'box' || solid.kind === 'wedge') {
+    return [solid.length, solid.width, solid.height];
+  }
+  if (solid.kind !== 'cylinder') throw new Error(`no twin of a ${solid.kind}`);
   const size = [solid.diameter, solid.diameter, solid.diameter];
   size['xyz'.indexOf(solid.axis ?? 'x')] = solid.length;
   return size;

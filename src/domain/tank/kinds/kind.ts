@@ -28,8 +28,8 @@ export interface Kind<S extends SolidFields & { kind: string }> {
   /** Word in the parts list and in the "add" line. */
   label: string;
   schema: z.ZodType<S>;
-  /** Whether its mesh depends on the count of facets. */
-  curved: boolean;
+  /** Whether its mesh depends on the count of facets; `twice`: its triangles grow with the square of it. */
+  curved: false | 'once' | 'twice';
   /** Extent of the upright box along x, y, z, mm. */
   extent(solid: S): Vec3;
   /** The sizes that are typed, in drawing order. */

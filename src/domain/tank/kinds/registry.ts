@@ -1,27 +1,49 @@
 import { z } from 'zod/v4';
 import { box } from './box/box';
 import { boxSchema } from './box/schema';
+import { cone } from './cone/cone';
+import { coneSchema } from './cone/schema';
 import { cylinder } from './cylinder/cylinder';
 import { cylinderSchema } from './cylinder/schema';
+import { ellipsoid } from './ellipsoid/ellipsoid';
+import { ellipsoidSchema } from './ellipsoid/schema';
 import type { Kind } from './kind';
+import { oval } from './oval/oval';
+import { ovalSchema } from './oval/schema';
+import { sphereSchema } from './sphere/schema';
+import { sphere } from './sphere/sphere';
 import { wedgeSchema } from './wedge/schema';
 import { wedge } from './wedge/wedge';
 
 /** Kinds of the document format that are not computed yet: refused by name. */
-export const kindsToCome = ['oval', 'sphere', 'ellipsoid', 'cone', 'taper', 'prism', 'stations', 'mesh'];
+export const kindsToCome = ['taper', 'prism', 'stations', 'mesh'];
 
-export const solidSchema = z.discriminatedUnion('kind', [boxSchema, cylinderSchema, wedgeSchema], {
-  error: (issue) => {
-    const kind = (issue.input as { kind?: unknown } | null)?.kind;
-    return typeof kind === 'string' && kindsToCome.includes(kind)
-      ? `A solid of the kind "${kind}" is not computed yet: use box, cylinder or wedge.`
-      : 'The kind of a solid is box, cylinder or wedge.';
+const known = 'box, cylinder, wedge, oval, sphere, ellipsoid or cone';
+
+export const solidSchema = z.discriminatedUnion(
+  'kind',
+  [boxSchema, cylinderSchema, wedgeSchema, ovalSchema, sphereSchema, ellipsoidSchema, coneSchema],
+  {
+    error: (issue) => {
+      const kind = (issue.input as { kind?: unknown } | null)?.kind;
+      return typeof kind === 'string' && kindsToCome.includes(kind)
+        ? `A solid of the kind "${kind}" is not computed yet: use ${known}.`
+        : `The kind of a solid is ${known}.`;
+    },
   },
-});
+);
 export type Solid = z.infer<typeof solidSchema>;
 
 /** Every kind that can be computed, in the order the bench offers them. */
-export const kinds: readonly Kind<Solid>[] = [erased(box), erased(cylinder), erased(wedge)];
+export const kinds: readonly Kind<Solid>[] = [
+  erased(box),
+  erased(cylinder),
+  erased(wedge),
+  erased(oval),
+  erased(sphere),
+  erased(ellipsoid),
+  erased(cone),
+];
 
 /** What Dipwright knows about a solid's kind. */
 export function kindOf(solid: Solid): Kind<Solid> {

@@ -1,5 +1,5 @@
 import { circleOutline, facetPhase } from '../../../../geometry/circle';
-import { lineInHalfSpaces, lineInQuadric } from '../../../../geometry/line';
+import { lineInBarrel } from '../../../../geometry/line';
 import { axisOrder, type Axis } from '../../../../geometry/shape';
 import type { Vec3 } from '../../solid';
 import type { Kind } from '../kind';
@@ -11,7 +11,7 @@ export const cylinder: Kind<Cylinder> = {
   kind: 'cylinder',
   label: 'cylinder',
   schema: cylinderSchema,
-  curved: true,
+  curved: 'once',
   extent: (solid) => alongAxis(axisOf(solid), solid.diameter, solid.length),
   sizes: () => [
     { path: ['diameter'], label: 'diameter', unit: 'mm' },
@@ -29,16 +29,10 @@ export const cylinder: Kind<Cylinder> = {
     return (across * solid.diameter + Math.abs(up[third]!) * solid.length) / 2;
   },
   chords(solid, line, slack) {
-    const axis = axisOf(solid);
-    const round = lineInQuadric(line, alongAxis(axis, solid.diameter / 2, Infinity), slack);
-    const normal = alongAxis(axis, 0, 1);
-    const back: Vec3 = [-normal[0], -normal[1], -normal[2]];
-    const offset = solid.length / 2;
-    const between = lineInHalfSpaces(line, [{ normal, offset }, { normal: back, offset }], slack);
-    if (!round || !between) return [];
-    const from = Math.max(round.from, between.from);
-    const to = Math.min(round.to, between.to);
-    return to >= from ? [{ from, to }] : [];
+    const radius = solid.diameter / 2;
+    const barrel = { axis: axisOf(solid), half: [radius, radius], length: solid.length } as const;
+    const chord = lineInBarrel(line, barrel, slack);
+    return chord ? [chord] : [];
   },
   volume: ({ diameter, length }) => (Math.PI * diameter * diameter * length) / 4,
   faults: () => [],
