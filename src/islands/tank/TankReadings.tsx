@@ -1,6 +1,7 @@
 import type { Reading } from '~/domain/reading/reading';
 import { useUnitsPreference } from '../shared/units-preference';
 import { ReadingsTable } from '../tank-card/ReadingsTable';
+import { LevelPlot } from './LevelPlot';
 
 /** The last readings on the tank page, in the units of whoever looks. */
 export function TankReadings({
@@ -11,5 +12,10 @@ export function TankReadings({
   person: string;
 }) {
   const [units] = useUnitsPreference(person);
-  return <ReadingsTable readings={readings} units={units} />;
+  return (
+    <>
+      {readings.length > 1 && <LevelPlot readings={readings} volume={units.volume} />}
+      <ReadingsTable readings={readings} units={units} />
+    </>
+  );
 }
