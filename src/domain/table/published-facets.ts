@@ -7,6 +7,6 @@ import type { PlacedSolid } from '../tank/placed-solid';
 export function publishedFacets(solids: readonly PlacedSolid[]): 512 | 256 | 128 {
   const once = solids.filter(({ kind }) => kind.curved === 'once').length;
   const twice = solids.filter(({ kind }) => kind.curved === 'twice').length;
-  if (twice === 0 && once <= 8) return 512;
+  if (twice === 0 && once <= 4) return 512;
   return twice <= 2 && once <= 40 ? 256 : 128;
 }
