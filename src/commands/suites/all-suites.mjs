@@ -37,6 +37,16 @@ export function allSuites(checkout, server) {
     { name: 'server', usual: true, run: vitest('server') },
     { name: 'browser', usual: true, run: (args) => browserSuite(checkout, server, args) },
     {
+      name: 'pictures',
+      usual: false,
+      run: (args) =>
+        browserSuite(checkout, server, [
+          '--config',
+          join('tests', 'pictures', 'playwright.config.ts'),
+          ...args,
+        ]),
+    },
+    {
       name: 'long',
       usual: false,
       run: async (args) => {
