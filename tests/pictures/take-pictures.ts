@@ -27,8 +27,10 @@ test('the bench', async ({ page }) => {
 
 test('the tank card', async ({ page }) => {
   await page.setViewportSize({ width: 360, height: 760 });
-  await signInAs(page, 'owner');
+  await signInAs(page, 'fitter');
   const { cistern } = await demoIds(page.request);
+  await page.context().clearCookies();
+  await signInAs(page, 'owner');
   await page.goto(`/tanks/${cistern}/card`);
   await page.getByRole('textbox').first().fill('150');
   await expect(page.getByText('55.5').first()).toBeVisible();
