@@ -16,7 +16,7 @@ interface StickTableProps {
   heightPx: number;
 }
 
-const rowPx = 20;
+const rowPx = 19;
 const columns = ['depth', 'litres', 'usable', 'room', 'kg'] as const;
 const grid = 'grid grid-cols-[3.2rem_4rem_4rem_4rem_3rem] text-right';
 
