@@ -1,10 +1,11 @@
 import { spawnSync } from 'node:child_process';
+import { administrator } from './administrator.mjs';
 import { daemonPaths } from './daemon.mjs';
 import { findProgram } from './debian-packages.mjs';
 import { StartFault } from './start-fault.mjs';
 
 /**
- * Runs statements as the server's root over its socket. The text goes by standard input, so that
+ * Runs statements with all rights, over the server's socket. The text goes by standard input, so that
  * no password shows in the list of processes.
  * @param {string} folder
  * @param {string} statements
@@ -15,7 +16,7 @@ export function administer(folder, statements) {
     [
       '--no-defaults',
       `--socket=${daemonPaths(folder).socket}`,
-      '--user=root',
+      `--user=${administrator()}`,
       '--batch',
       '--skip-column-names',
     ],

@@ -10,6 +10,7 @@ import {
 } from 'node:fs';
 import { join } from 'node:path';
 import { setTimeout as delay } from 'node:timers/promises';
+import { administrator } from './administrator.mjs';
 import { findProgram } from './debian-packages.mjs';
 import { processIdentity } from './process-identity.mjs';
 import { StartFault } from './start-fault.mjs';
@@ -52,7 +53,7 @@ export function makeSystemTables(folder, account) {
       ...(account.asRoot ? ['--user=mysql'] : []),
       `--datadir=${join(making, 'data')}`,
       '--auth-root-authentication-method=socket',
-      `--auth-root-socket-user=${account.self}`,
+      `--auth-root-socket-user=${administrator()}`,
       '--skip-test-db',
     ],
     { encoding: 'utf8' },
@@ -121,7 +122,7 @@ export async function startDaemon(folder, account, port) {
   const until = Date.now() + 120_000;
   while (Date.now() < until) {
     if (ended) throw daemonFault(tail(paths.log, logFrom), folder);
-    if (answers(folder)) return child.pid;
+    if (answersOrEnds(folder, child.pid)) return child.pid;
     await delay(100);
   }
   process.kill(child.pid, 'SIGTERM');
@@ -129,6 +130,16 @@ export async function startDaemon(folder, account, port) {
     'MariaDB started, but did not answer within two minutes.',
     `Read the last lines of ${paths.log}, then run the command again.`,
   );
+}
+
+/** A server that we started and may not use is not left behind. */
+function answersOrEnds(folder, pid) {
+  try {
+    return answers(folder);
+  } catch (error) {
+    process.kill(pid, 'SIGTERM');
+    throw error;
+  }
 }
 
 /** Does a server answer on the socket of this folder? */
@@ -140,7 +151,7 @@ export function answers(folder) {
     [
       '--no-defaults',
       `--socket=${paths.socket}`,
-      '--user=root',
+      `--user=${administrator()}`,
       '--connect-timeout=3',
       '-e',
       'DO 0',

@@ -1,11 +1,22 @@
 import { execFileSync } from 'node:child_process';
-import { chmodSync, mkdirSync, mkdtempSync, readFileSync, rmSync, statSync } from 'node:fs';
+import {
+  chmodSync,
+  chownSync,
+  mkdirSync,
+  mkdtempSync,
+  readFileSync,
+  rmSync,
+  statSync,
+} from 'node:fs';
 import { createServer, connect } from 'node:net';
 import { networkInterfaces, tmpdir } from 'node:os';
-import { join } from 'node:path';
+import { join, resolve } from 'node:path';
 import mariadb from 'mariadb';
 import { afterAll, afterEach, expect, it } from 'vitest';
 import { openLocalServer } from '../../db/local-server.mjs';
+
+/** The account without rights of every Linux. */
+const nobody = 65_534;
 
 const folder = mkdtempSync(join(tmpdir(), 'dw-'));
 chmodSync(folder, 0o755);
@@ -136,6 +147,27 @@ it.runIf(process.getuid?.() === 0)(
     rmSync(join(server.folder, '..'), { recursive: true });
   },
 );
+
+// As root we can become somebody else; as somebody else every other test here is this test.
+it.runIf(process.getuid?.() === 0)('works for a plain account, which then runs it itself', () => {
+  const home = join(folder, 'plain');
+  mkdirSync(home);
+  chownSync(home, nobody, nobody);
+  const script = `
+    import { openLocalServer } from ${JSON.stringify(resolve('db/local-server.mjs'))};
+    const server = await openLocalServer({ checkout: ${JSON.stringify(home)}, name: 'demo', database: 'dipwright', say: () => {} });
+    const { readFileSync } = await import('node:fs');
+    console.log(/^Uid:.*/m.exec(readFileSync('/proc/' + server.pid + '/status', 'utf8'))[0]);
+    await server.stop();
+    console.log(server.lives());`;
+  const said = execFileSync(process.execPath, ['--input-type=module', '-e', script], {
+    uid: nobody,
+    gid: nobody,
+    cwd: home,
+    encoding: 'utf8',
+  });
+  expect(said).toBe(`Uid:\t${nobody}\t${nobody}\t${nobody}\t${nobody}\nfalse\n`);
+});
 
 it('says in a sentence why a server does not start', async () => {
   const server = await open();

@@ -1,6 +1,7 @@
 import { setTimeout as delay } from 'node:timers/promises';
 import mariadb, { type Connection } from 'mariadb';
 import { afterAll, beforeAll, expect, it } from 'vitest';
+import { administrator } from '../../db/local/administrator.mjs';
 import { openProduct } from '../support/product';
 
 /** Share of the rows that are written when the web server is killed; 0: while the table is computed. */
@@ -13,7 +14,7 @@ beforeAll(async () => {
   // The application's account may not see what other connections have under way.
   root = await mariadb.createConnection({
     socketPath: product.database.socket,
-    user: 'root',
+    user: administrator(),
     bigIntAsNumber: true,
   });
 });
