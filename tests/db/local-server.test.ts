@@ -2,6 +2,7 @@ import { execFileSync } from 'node:child_process';
 import {
   chmodSync,
   chownSync,
+  cpSync,
   mkdirSync,
   mkdtempSync,
   readFileSync,
@@ -10,7 +11,7 @@ import {
 } from 'node:fs';
 import { createServer, connect } from 'node:net';
 import { networkInterfaces, tmpdir } from 'node:os';
-import { join, resolve } from 'node:path';
+import { dirname, join, resolve } from 'node:path';
 import mariadb from 'mariadb';
 import { afterAll, afterEach, expect, it } from 'vitest';
 import { openLocalServer } from '../../db/local-server.mjs';
@@ -149,25 +150,29 @@ it.runIf(process.getuid?.() === 0)(
 );
 
 // As root we can become somebody else; as somebody else every other test here is this test.
-it.runIf(process.getuid?.() === 0)('works for a plain account, which then runs it itself', () => {
-  const home = join(folder, 'plain');
-  mkdirSync(home);
-  chownSync(home, nobody, nobody);
-  const script = `
-    import { openLocalServer } from ${JSON.stringify(resolve('db/local-server.mjs'))};
+it.runIf(process.getuid?.() === 0 && openToAll(process.execPath))(
+  'works for a plain account, which then runs it itself',
+  () => {
+    const home = join(folder, 'plain');
+    mkdirSync(home);
+    chownSync(home, nobody, nobody);
+    cpSync(resolve('db'), join(folder, 'db'), { recursive: true });
+    const script = `
+    import { openLocalServer } from ${JSON.stringify(join(folder, 'db/local-server.mjs'))};
     const server = await openLocalServer({ checkout: ${JSON.stringify(home)}, name: 'demo', database: 'dipwright', say: () => {} });
     const { readFileSync } = await import('node:fs');
     console.log(/^Uid:.*/m.exec(readFileSync('/proc/' + server.pid + '/status', 'utf8'))[0]);
     await server.stop();
     console.log(server.lives());`;
-  const said = execFileSync(process.execPath, ['--input-type=module', '-e', script], {
-    uid: nobody,
-    gid: nobody,
-    cwd: home,
-    encoding: 'utf8',
-  });
-  expect(said).toBe(`Uid:\t${nobody}\t${nobody}\t${nobody}\t${nobody}\nfalse\n`);
-});
+    const said = execFileSync(process.execPath, ['--input-type=module', '-e', script], {
+      uid: nobody,
+      gid: nobody,
+      cwd: home,
+      encoding: 'utf8',
+    });
+    expect(said).toBe(`Uid:\t${nobody}\t${nobody}\t${nobody}\t${nobody}\nfalse\n`);
+  },
+);
 
 it('says in a sentence why a server does not start', async () => {
   const server = await open();
@@ -193,4 +198,12 @@ function answersOn(host: string, port: number): Promise<boolean> {
       .once('error', () => end(false))
       .once('timeout', () => end(false));
   });
+}
+
+/** May every account walk down to this file? */
+function openToAll(file: string): boolean {
+  for (let at = file; at !== '/'; at = dirname(at)) {
+    if ((statSync(at).mode & 0o001) === 0) return false;
+  }
+  return true;
 }
