@@ -1,6 +1,6 @@
 import { liquids } from '../liquid/liquids';
 import { volumeUnitSigns } from '../units/volume-unit';
-import type { ChartDigits } from './chart-digits';
+import type { TableDigits } from '../units/table-digits';
 import type { ChartInput } from './chart-input';
 import type { ChartLevels } from './chart-levels';
 import type { ChartFigure } from './chart-report';
@@ -10,7 +10,7 @@ import { markReading } from './mark-reading';
 export function chartFigures(
   { settings, options, heightMm }: ChartInput,
   levels: ChartLevels,
-  digits: ChartDigits,
+  digits: TableDigits,
 ): ChartFigure[] {
   const figure = (
     label: string,
@@ -61,7 +61,7 @@ export function chartFigures(
     : [brim, safe, unusable, usable];
 }
 
-function weightWhenFull({ densityKgPerM3, capacityL }: ChartLevels, digits: ChartDigits): string {
+function weightWhenFull({ densityKgPerM3, capacityL }: ChartLevels, digits: TableDigits): string {
   const kg = (densityKgPerM3 * capacityL) / 1000;
   return Number.isFinite(kg) ? `${digits.mass(kg)} kg when full` : 'weight not known';
 }

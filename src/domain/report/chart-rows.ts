@@ -3,7 +3,7 @@ import { liquids } from '../liquid/liquids';
 import { formatLength } from '../units/format-length';
 import { mmPerInch, type LengthUnit } from '../units/length-unit';
 import { volumeUnitSigns } from '../units/volume-unit';
-import type { ChartDigits } from './chart-digits';
+import type { TableDigits } from '../units/table-digits';
 import type { ChartInput } from './chart-input';
 import type { ChartLevels } from './chart-levels';
 import type { ChartColumn, ChartRow } from './chart-report';
@@ -51,7 +51,7 @@ export function chartColumns({ settings, options }: ChartInput): ChartColumn[] {
 export function chartRows(
   input: ChartInput,
   levels: ChartLevels,
-  digits: ChartDigits,
+  digits: TableDigits,
   columns: readonly ChartColumn[],
 ): ChartRow[] {
   const { options, heightMm } = input;

@@ -2,7 +2,7 @@ import { formatLength } from '../units/format-length';
 import { mmPerLengthUnit } from '../units/length-unit';
 import { marksFor, multiples } from '../units/marks';
 import { volumeUnitSigns } from '../units/volume-unit';
-import type { ChartDigits } from './chart-digits';
+import type { TableDigits } from '../units/table-digits';
 import type { ChartInput } from './chart-input';
 import type { ChartLevels } from './chart-levels';
 import type { ChartStick, ChartTick } from './chart-report';
@@ -15,7 +15,7 @@ const mostFine = 130;
 export function chartStick(
   { options, heightMm }: ChartInput,
   levels: ChartLevels,
-  digits: ChartDigits,
+  digits: TableDigits,
 ): ChartStick {
   return {
     heightMm,
@@ -54,7 +54,7 @@ function regions(levels: ChartLevels): ChartStick['regions'] {
 
 function marks(
   levels: ChartLevels,
-  digits: ChartDigits,
+  digits: TableDigits,
   { volume, length }: ChartInput['options'],
 ): ChartStick['marks'] {
   const printed = (litres: number): string =>

@@ -4,7 +4,7 @@ import { liquids } from '../liquid/liquids';
 import { formatLength } from '../units/format-length';
 import { lengthUnitWords } from '../units/length-unit';
 import { volumeUnitWords } from '../units/volume-unit';
-import { chartDigits } from './chart-digits';
+import { tableDigits } from '../units/table-digits';
 import { chartFigures } from './chart-figures';
 import type { ChartInput } from './chart-input';
 import { chartLevels } from './chart-levels';
@@ -31,7 +31,7 @@ export function buildChart(input: ChartInput): ChartReport {
     );
   }
   const levels = chartLevels(input);
-  const digits = chartDigits(options.volume, levels.largestPlusMinusL, levels.densityKgPerM3);
+  const digits = tableDigits(options.volume, levels.largestPlusMinusL, levels.densityKgPerM3);
   const sketch = input.preview === null ? null : sketchOf(input.preview.space, input.preview.frame);
   const columns = chartColumns(input);
   const rows = chartRows(input, levels, digits, columns);

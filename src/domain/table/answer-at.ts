@@ -86,10 +86,15 @@ export function plusMinusAt(
   { curve, plusMinusL }: Pick<DipTable, 'curve' | 'plusMinusL'>,
   depthMm: number,
 ): number {
+  return onTheLineAt(curve, plusMinusL, depthMm);
+}
+
+/** What is given at each row (in its own unit), at a reading on the straight line between two of them, mm. */
+export function onTheLineAt(curve: Curve, atRows: ArrayLike<number>, depthMm: number): number {
   const i = segmentOf(curve.depthMm, depthMm);
   const x0 = curve.depthMm[i] ?? 0;
   const x1 = curve.depthMm[i + 1] ?? x0;
-  const low = plusMinusL[i] ?? 0;
-  const high = plusMinusL[i + 1] ?? low;
+  const low = atRows[i] ?? 0;
+  const high = atRows[i + 1] ?? low;
   return x1 === x0 ? low : low + ((high - low) * (depthMm - x0)) / (x1 - x0);
 }

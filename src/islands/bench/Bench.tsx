@@ -4,6 +4,7 @@ import type { Role } from '~/domain/access/roles';
 import { safeFillMm } from '~/domain/table/answer-at';
 import { levelOfReading } from '~/domain/table/level';
 import type { TankDocument } from '~/domain/tank/document';
+import { letterAfter } from '~/domain/tank/revision-letter';
 import type { Tank } from '~/domain/tank/tank';
 import { formatLengthWithUnit } from '~/domain/units/format-length';
 import { newScene, sceneReducer } from '~/scene/scene';
@@ -17,7 +18,7 @@ import { liveTable } from './live-table';
 import { PartsList } from './PartsList';
 import { TitleBlock } from './TitleBlock';
 import { TopLine } from './TopLine';
-import { useDraftSaving } from './use-draft-saving';
+import { useDraftSaving, type Saving } from './use-draft-saving';
 import { usePreview } from './use-preview';
 import { useSettings } from './use-settings';
 
@@ -43,7 +44,7 @@ function BenchSheet({ tank, design, etag, role, person }: BenchProps) {
   const [scene, dispatch] = useReducer(sceneReducer, design, newScene);
   const document = scene.history.present;
   const [units] = useUnitsPreference(person);
-  const { settings, change, faults, unsaved } = useSettings(tank);
+  const { settings, change, faults, unsaved, saved: settingsSaved } = useSettings(tank);
   const { preview, plusMinusL, problem } = usePreview(document, settings);
   const { saving, save, takeTheirs, keepMine } = useDraftSaving(tank.id, document, etag);
   const [depthMm, setDepthMm] = useState<number | null>(null);
@@ -59,7 +60,7 @@ function BenchSheet({ tank, design, etag, role, person }: BenchProps) {
   const depth = table
     ? Math.min(depthMm ?? Math.round(table.heightMm / 2), table.heightMm)
     : (depthMm ?? 0);
-  const next = issued ? nextLetter(issued) : 'A';
+  const next = letterAfter(issued);
   const revisionWords = issued ? `draft after ${issued}` : 'draft, nothing issued';
   const stands = standsWords(document);
   const levels = useMemo(() => {
@@ -75,6 +76,9 @@ function BenchSheet({ tank, design, etag, role, person }: BenchProps) {
     };
   }, [preview, table, settings.outletMm]);
 
+  const waitsFor = settingsSaved
+    ? waitsForDraft(saving)
+    : `The settings are not saved yet${unsaved ? `: ${unsaved}` : '.'}`;
   const startIssue = async () => {
     setFresh(null);
     if (saving.state !== 'saved') await save();
@@ -125,6 +129,7 @@ function BenchSheet({ tank, design, etag, role, person }: BenchProps) {
         <IssuePanel
           tankId={tank.id}
           letter={next}
+          waitsFor={waitsFor}
           onClose={() => setIssuing(false)}
           onIssued={(letter) => {
             setIssuing(false);
@@ -217,6 +222,21 @@ function useUndoKeys(dispatch: (action: { type: 'undo' } | { type: 'redo' }) => 
   }, [dispatch]);
 }
 
+/** Why a draft could not be issued as it is shown, or null. */
+function waitsForDraft(saving: Saving): string | null {
+  switch (saving.state) {
+    case 'saved':
+      return null;
+    case 'changed':
+    case 'saving':
+      return 'The draft is being saved.';
+    case 'unsaved':
+      return `The draft is not saved yet: ${saving.why}`;
+    case 'conflict':
+      return 'Choose first whose draft stands.';
+  }
+}
+
 function standsWords({ attitude }: TankDocument): string {
   if (!attitude || (attitude.pitch === 0 && attitude.roll === 0)) return 'level';
   return `pitch ${attitude.pitch}°, roll ${attitude.roll}°`;
@@ -224,16 +244,4 @@ function standsWords({ attitude }: TankDocument): string {
 
 function formatBrim(litres: number): string {
   return `${litres.toFixed(1)} litres`;
-}
-
-/** A, B, … Z, AA, AB … */
-export function nextLetter(letter: string): string {
-  const value = [...letter].reduce((sum, one) => sum * 26 + one.charCodeAt(0) - 64, 0) + 1;
-  let rest = value;
-  let text = '';
-  while (rest > 0) {
-    text = String.fromCharCode(65 + ((rest - 1) % 26)) + text;
-    rest = Math.floor((rest - 1) / 26);
-  }
-  return text;
 }

@@ -4,8 +4,8 @@ import type { Preview } from '~/domain/table/preview';
 import type { Vec3 } from '~/domain/tank/solid';
 import { edgesOf, type EdgeList } from '~/viewport/drawn-edges';
 import { onPlate, project, type Plate, type Projection } from '~/viewport/projection';
+import { facesBetween, surfaceLoops } from '~/viewport/slice-mesh';
 import { Patterns } from '../stick/Patterns';
-import { facesBetween, surfaceLoops } from './slice-mesh';
 
 /**
  * The tank drawn away at the stick's own scale, as plain SVG: its edges, the liquid up to the

@@ -1,4 +1,4 @@
-import { chartDigits, type ChartDigits } from '~/domain/report/chart-digits';
+import { tableDigits, type TableDigits } from '~/domain/units/table-digits';
 import { answerAt, densityOf, type DipTable } from '~/domain/table/answer-at';
 import { formatLength } from '~/domain/units/format-length';
 import type { LengthUnit } from '~/domain/units/length-unit';
@@ -14,16 +14,16 @@ export interface RowFigures {
 }
 
 /** The digits of a whole table: those that its largest ± deserves, so that columns stay straight. */
-export function digitsOf(table: DipTable, volume: VolumeUnit): ChartDigits {
+export function digitsOf(table: DipTable, volume: VolumeUnit): TableDigits {
   const largest = Array.from(table.plusMinusL).reduce((most, one) => Math.max(most, one), 0);
-  return chartDigits(volume, largest, densityOf(table.settings));
+  return tableDigits(volume, largest, densityOf(table.settings));
 }
 
 export function rowFigures(
   table: DipTable,
   depthMm: number,
   length: LengthUnit,
-  digits: ChartDigits,
+  digits: TableDigits,
 ): RowFigures {
   const answer = answerAt(table, depthMm);
   return {

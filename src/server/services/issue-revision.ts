@@ -1,9 +1,11 @@
 import { requirePermission } from '~/domain/access/permissions';
 import { DipwrightError, invalid, notFound } from '~/domain/errors';
-import { curveFromRows, volumeAt } from '~/domain/table/curve';
+import { unusableL } from '~/domain/table/answer-at';
+import { curveFromRows } from '~/domain/table/curve';
 import type { IssuedTable } from '~/domain/table/issued-table';
 import type { TankDocument } from '~/domain/tank/document';
 import type { TankSettings } from '~/domain/tank/settings';
+import { revisionLetter } from '~/domain/tank/revision-letter';
 import type { NewRevision, RevisionSummary } from '~/domain/tank/tank';
 import type { Actor, Context } from '../context';
 import type { RevisionRecord } from '../database/models/revision';
@@ -15,7 +17,6 @@ import type { Scope } from '../database/scope';
 import { inTransaction } from '../database/transaction';
 import { levelPerReading } from './level-per-reading';
 import { contentHash, designHash, revisionHash } from './revision-hash';
-import { revisionLetter } from './revision-letter';
 import { summaryOf } from './revision-summary';
 import { scopeOf } from './scope-of';
 import { settingsOf } from './settings-of';
@@ -96,32 +97,26 @@ async function contentOf(
 }
 
 function freeze({ design, settings }: Content, { table, rows }: IssuedTable) {
+  const { heightMm } = table;
+  refuseOutletAbove(settings, heightMm);
   const factor = levelPerReading(design);
   return {
     design: JSON.stringify(design),
     settings: JSON.stringify(settings),
-    heightMm: table.heightMm,
+    heightMm,
     levelPerReading: factor,
     capacityL: table.capacityL,
     errorL: table.errorL,
-    unusableL: unusableL(settings, table.heightMm, () => curveFromRows(rows, factor)),
+    unusableL: unusableL({ curve: curveFromRows(rows, factor), settings, heightMm }),
     rowCount: rows.length,
     hash: revisionHash(design, settings, rows),
   };
 }
 
-/** Litres below the outlet: none are called unusable while nobody said where it is. */
-function unusableL(
-  { outletMm }: TankSettings,
-  heightMm: number,
-  curve: () => ReturnType<typeof curveFromRows>,
-): number {
-  if (outletMm === null) return 0;
-  if (outletMm > heightMm) {
-    throw invalid(
-      '/settings/outletMm',
-      `The outlet stands at ${outletMm} mm, above the highest reading of ${Math.round(heightMm * 10) / 10} mm: correct one of them.`,
-    );
-  }
-  return volumeAt(curve(), outletMm);
+function refuseOutletAbove({ outletMm }: TankSettings, heightMm: number): void {
+  if (outletMm === null || outletMm <= heightMm) return;
+  throw invalid(
+    '/settings/outletMm',
+    `The outlet stands at ${outletMm} mm, above the highest reading of ${Math.round(heightMm * 10) / 10} mm: correct one of them.`,
+  );
 }

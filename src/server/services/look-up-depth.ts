@@ -16,13 +16,14 @@ export async function lookUpDepth(
   requirePermission(actor.role, 'revision.read');
   const scope = scopeOf(context, actor);
   const { revision, current } = await revisionInSight(scope, actor, input.revisionId);
-  const table = askable(revision, current, await listRows(scope, revision.id));
-  const depthMm = depthAt(table.curve, input.volumeL);
-  const { plusMinusL } = lookUpAt(table, depthMm);
+  const asked = askable(revision, current, await listRows(scope, revision.id));
+  const { curve } = asked.table;
+  const depthMm = depthAt(curve, input.volumeL);
+  const { plusMinusL } = lookUpAt(asked, depthMm);
   return {
     depthMm,
     volumeL: input.volumeL,
-    plusMinusMm: depthSpread(table.curve, depthMm, input.volumeL, plusMinusL),
+    plusMinusMm: depthSpread(curve, depthMm, input.volumeL, plusMinusL),
     revision: revision.letter,
     current,
   };

@@ -1,5 +1,5 @@
-import { liquids } from '~/domain/liquid/liquids';
-import { curveFromRows, segmentOf, volumeAt, type Curve } from '~/domain/table/curve';
+import { answerAt, onTheLineAt, type DipTable } from '~/domain/table/answer-at';
+import { curveFromRows } from '~/domain/table/curve';
 import type { IssuedRow } from '~/domain/table/request';
 import type { LookUp } from '~/domain/tank/tank';
 import type { RevisionHead } from '../database/repositories/revisions';
@@ -9,8 +9,8 @@ import { issuedSettings } from './settings-of';
 export interface AskableTable {
   revision: RevisionHead;
   current: boolean;
-  rows: readonly IssuedRow[];
-  curve: Curve;
+  table: DipTable;
+  surfaceCm2: readonly number[];
 }
 
 export function askable(
@@ -18,44 +18,33 @@ export function askable(
   current: boolean,
   rows: readonly IssuedRow[],
 ): AskableTable {
-  return { revision, current, rows, curve: curveFromRows(rows, revision.levelPerReading) };
+  const { heightMm, capacityL, levelPerReading } = revision;
+  const table = {
+    curve: curveFromRows(rows, levelPerReading),
+    plusMinusL: rows.map(({ plusMinusL }) => plusMinusL),
+    heightMm,
+    capacityL,
+    settings: issuedSettings(revision),
+  };
+  return { revision, current, table, surfaceCm2: rows.map(({ surfaceCm2 }) => surfaceCm2) };
 }
 
 /**
- * What a reading means by the settings frozen with the revision. `depthMm` lies along the stick from its
- * zero; outside 0…heightMm it throws `invalid`. Litres by the curve through the rows, ± and free
- * surface on the straight line between them.
+ * What a reading means by the settings frozen with the revision. `depthMm` lies along the stick from
+ * its zero; outside 0…heightMm it throws `invalid`.
  */
-export function lookUpAt(table: AskableTable, depthMm: number): LookUp {
-  const { revision, current, rows, curve } = table;
-  const settings = issuedSettings(revision);
-  const volumeL = volumeAt(curve, depthMm);
-  const densityKgPerM3 = settings.densityKgPerM3 ?? liquids[settings.liquid].densityKgPerM3;
-  if (densityKgPerM3 === null) throw new Error(`Revision ${revision.id} froze no density.`);
+export function lookUpAt(
+  { revision, current, table, surfaceCm2 }: AskableTable,
+  depthMm: number,
+): LookUp {
+  const { aboveSafeFillL: _above, ...figures } = answerAt(table, depthMm);
+  if (!Number.isFinite(figures.massKg)) {
+    throw new Error(`Revision ${revision.id} froze no density.`);
+  }
   return {
-    depthMm,
-    ullageMm: revision.heightMm - depthMm,
-    volumeL,
-    usableL: Math.max(0, volumeL - revision.unusableL),
-    roomL: Math.max(0, (revision.capacityL * settings.safeFillPercent) / 100 - volumeL),
-    massKg: (volumeL * densityKgPerM3) / 1000,
-    plusMinusL: between(rows, curve, depthMm, (row) => row.plusMinusL),
-    surfaceCm2: between(rows, curve, depthMm, (row) => row.surfaceCm2),
+    ...figures,
+    surfaceCm2: onTheLineAt(table.curve, surfaceCm2, depthMm),
     revision: revision.letter,
     current,
   };
-}
-
-function between(
-  rows: readonly IssuedRow[],
-  curve: Curve,
-  depthMm: number,
-  valueOf: (row: IssuedRow) => number,
-): number {
-  const i = segmentOf(curve.depthMm, depthMm);
-  const low = rows[i]!;
-  const high = rows[i + 1] ?? low;
-  const span = high.depthMm - low.depthMm;
-  const share = span === 0 ? 0 : (depthMm - low.depthMm) / span;
-  return valueOf(low) + (valueOf(high) - valueOf(low)) * share;
 }

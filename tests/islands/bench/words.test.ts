@@ -1,7 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import type { Curve } from '~/domain/table/curve';
 import { startingPoints } from '~/domain/tank/starting-points';
-import { nextLetter } from '~/islands/bench/Bench';
 import { differencesOf } from '~/islands/bench/Conflict';
 import { sentenceToRemember } from '~/islands/bench/remember';
 import { setSize } from '~/scene/commands';
@@ -34,12 +33,6 @@ describe('the sentence to remember', () => {
     expect(sentenceToRemember(power(1.15, 300, 100), 300, 100)).toBe(
       'Half the stick is 45 % of the tank.',
     );
-  });
-});
-
-describe('letters of revisions', () => {
-  it('go from A to Z and on to AA', () => {
-    expect(['A', 'Y', 'Z', 'AZ'].map(nextLetter)).toEqual(['B', 'Z', 'AA', 'BA']);
   });
 });
 

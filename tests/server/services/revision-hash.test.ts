@@ -4,7 +4,6 @@ import type { TankSettings } from '~/domain/tank/settings';
 import { canonicalJson } from '~/server/services/canonical-json';
 import { levelPerReading } from '~/server/services/level-per-reading';
 import { contentHash, designHash, revisionHash } from '~/server/services/revision-hash';
-import { revisionLetter } from '~/server/services/revision-letter';
 import { boxDesign } from '../support/box-design';
 
 const settings: TankSettings = {
@@ -69,19 +68,6 @@ it('contentHash tells designs and settings apart', () => {
   expect(contentHash(designHash(boxDesign()), { ...settings })).toBe(one);
   expect(contentHash(designHash(boxDesign(1001)), settings)).not.toBe(one);
   expect(contentHash(designHash(boxDesign()), { ...settings, safeFillPercent: 94 })).not.toBe(one);
-});
-
-it('revisionLetter runs A to Z, then AA', () => {
-  expect([1, 2, 26, 27, 52, 53, 702, 703].map(revisionLetter)).toEqual([
-    'A',
-    'B',
-    'Z',
-    'AA',
-    'AZ',
-    'BA',
-    'ZZ',
-    'AAA',
-  ]);
 });
 
 describe('levelPerReading', () => {

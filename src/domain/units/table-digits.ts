@@ -1,12 +1,12 @@
-import { formatNumber } from '../units/format-number';
-import { decimalsFor, roundTo } from '../units/rounding';
-import { litresPerVolumeUnit, type VolumeUnit } from '../units/volume-unit';
+import { formatNumber } from './format-number';
+import { decimalsFor, roundTo } from './rounding';
+import { litresPerVolumeUnit, type VolumeUnit } from './volume-unit';
 
 /**
- * How a chart writes its volumes and masses. One number of decimals for the whole print, the one
+ * How one table writes its volumes and masses. One number of decimals for the whole of it, the one
  * that the largest ± of its rows deserves: columns stay straight and no figure claims too much.
  */
-export interface ChartDigits {
+export interface TableDigits {
   volume(litres: number): string;
   /** Rounded up, so that the printed ± never promises more than the computed one. */
   plusMinus(litres: number): string;
@@ -14,11 +14,11 @@ export interface ChartDigits {
 }
 
 /** @param largestPlusMinusL the largest ± of the rows, litres */
-export function chartDigits(
+export function tableDigits(
   unit: VolumeUnit,
   largestPlusMinusL: number,
   densityKgPerM3: number,
-): ChartDigits {
+): TableDigits {
   const size = litresPerVolumeUnit[unit];
   const decimals = decimalsFor(largestPlusMinusL / size);
   const massDecimals = decimalsFor((largestPlusMinusL * densityKgPerM3) / 1000, 0);

@@ -1,8 +1,10 @@
 import type { TankMesh } from '~/domain/table/preview';
 import type { Vec3 } from '~/domain/tank/solid';
+import { sectionLoops } from '~/geometry/section';
+import { dot } from '~/geometry/vec3';
 
 /** A vertex of a mesh, mm, tank's frame. */
-export function vertex(mesh: TankMesh, index: number): Vec3 {
+function vertex(mesh: TankMesh, index: number): Vec3 {
   const p = mesh.positions;
   return [p[index * 3]!, p[index * 3 + 1]!, p[index * 3 + 2]!];
 }
@@ -18,40 +20,15 @@ export function facesBetween(mesh: TankMesh, up: Vec3, low: number, high: number
   return parts;
 }
 
-/**
- * The liquid surface: closed loops where the mesh crosses a level. A vertex that lies on the level
- * counts as above it, so that every loop closes.
- */
+/** The liquid surface: closed loops where the mesh crosses a level (u·p, mm). */
 export function surfaceLoops(mesh: TankMesh, up: Vec3, level: number): Vec3[][] {
-  const next = new Map<string, { point: Vec3; to: string }>();
-  for (let t = 0; t < mesh.triangles.length; t += 3) {
-    const ids = [0, 1, 2].map((k) => mesh.triangles[t + k]!);
-    let from: { key: string; point: Vec3 } | null = null;
-    let to: string | null = null;
-    for (let k = 0; k < 3; k += 1) {
-      const a = ids[k]!;
-      const b = ids[(k + 1) % 3]!;
-      const da = dot(up, vertex(mesh, a)) - level;
-      const db = dot(up, vertex(mesh, b)) - level;
-      if (da < 0 === db < 0) continue;
-      const key = a < b ? `${a}:${b}` : `${b}:${a}`;
-      if (da < 0) from = { key, point: mix(vertex(mesh, a), vertex(mesh, b), da / (da - db)) };
-      else to = key;
-    }
-    if (from !== null && to !== null) next.set(from.key, { point: from.point, to });
-  }
-  const loops: Vec3[][] = [];
-  while (next.size > 0) {
-    const loop: Vec3[] = [];
-    let key = next.keys().next().value!;
-    for (let step = next.get(key); step !== undefined; step = next.get(key)) {
-      next.delete(key);
-      loop.push(step.point);
-      key = step.to;
-    }
-    loops.push(loop);
-  }
-  return loops;
+  return sectionLoops(mesh, up, level).map((loop) =>
+    Array.from({ length: loop.length / 3 }, (_, i): Vec3 => [
+      loop[3 * i]!,
+      loop[3 * i + 1]!,
+      loop[3 * i + 2]!,
+    ]),
+  );
 }
 
 /** Keeps the side where side × (u·p − level) ≥ 0. */
@@ -69,8 +46,4 @@ function cut(polygon: Vec3[], up: Vec3, level: number, side: 1 | -1): Vec3[] {
 
 function mix(a: Vec3, b: Vec3, t: number): Vec3 {
   return [a[0] + t * (b[0] - a[0]), a[1] + t * (b[1] - a[1]), a[2] + t * (b[2] - a[2])];
-}
-
-function dot(a: Vec3, b: Vec3): number {
-  return a[0] * b[0] + a[1] * b[1] + a[2] * b[2];
 }

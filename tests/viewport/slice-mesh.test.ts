@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import type { TankMesh } from '~/domain/table/preview';
 import type { Vec3 } from '~/domain/tank/solid';
-import { facesBetween, surfaceLoops } from '~/islands/front/slice-mesh';
+import { facesBetween, surfaceLoops } from '~/viewport/slice-mesh';
 
 /** The unit cube × 100, outward. */
 const cube: TankMesh = {
