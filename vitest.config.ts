@@ -26,7 +26,7 @@ export default defineConfig({
         test: {
           name: 'unit',
           include: [`tests/{geometry,domain,scene,viewport,workers,commands}/**/${typeScript}`],
-          testTimeout: 20_000,
+          testTimeout: 60_000,
         },
       },
       {
@@ -35,7 +35,7 @@ export default defineConfig({
           name: 'dom',
           include: [`tests/islands/**/${typeScript}`],
           environment: 'happy-dom',
-          testTimeout: 20_000,
+          testTimeout: 60_000,
         },
       },
       {
@@ -43,7 +43,7 @@ export default defineConfig({
         test: {
           name: 'server',
           include: [`tests/{server,db}/**/${typeScript}`],
-          testTimeout: 30_000,
+          testTimeout: 60_000,
           hookTimeout: 60_000,
           pool: 'forks',
         },

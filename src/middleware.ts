@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { defineMiddleware } from 'astro:middleware';
-import { developmentContext } from './server/front/development-context';
+import { developmentContext } from './server/development-context';
 import { needsSession, signInAddress } from './server/front/page-access';
 
 /** Who asks, before any page or call of the API: from the session cookie, never from the client. */

@@ -1,4 +1,4 @@
-import type { Context } from '../context';
+import type { Context } from './context';
 
 const key = Symbol.for('dipwright.development-context');
 
@@ -14,8 +14,8 @@ export function developmentContext(): Promise<Context> {
 
 async function compose(): Promise<Context> {
   const [{ composeContext }, { readConfig }] = await Promise.all([
-    import('../compose'),
-    import('../config'),
+    import('./compose'),
+    import('./config'),
   ]);
   return composeContext(readConfig());
 }
