@@ -14,6 +14,8 @@ export interface LivePreview {
   problem: DipwrightError | null;
 }
 
+const restMs = 120;
+
 /** Computes the design in a worker as it changes, then the ± of its rows; the newest wins. */
 export function usePreview(
   design: TankDocument,
@@ -37,6 +39,9 @@ export function usePreview(
       const preview = await worker.compute(design);
       if (!current || !preview) return;
       setLive(({ plusMinusL }) => ({ preview, plusMinusL, problem: null }));
+      // one run a size: left until the hand rests, so that the next edit never waits for it
+      await new Promise((resolve) => setTimeout(resolve, restMs));
+      if (!current) return;
       const plusMinusL = await worker.plusMinus(design, preview, {
         sizePlusMinusMm,
         dipPlusMinusMm,
