@@ -10,7 +10,8 @@ import { parseDesign } from '~/domain/tank/parse-design';
  * The table of a design file on stdout, exit 0. Otherwise one sentence on stderr: exit 2 when the design (or
  * a reading asked of it) is at fault, 1 for anything else.
  */
-const usage = 'Give a design file: npm run --silent strap -- FILE [--step MM | --at MM,MM,…] [--csv]';
+const usage =
+  'Give a design file: npm run --silent strap -- FILE [--step MM | --at MM,MM,…] [--csv]';
 
 try {
   const { file, readings, csv } = readArguments(process.argv.slice(2));
@@ -26,7 +27,8 @@ function readArguments(args: string[]): { file: string; readings: Readings; csv:
   const { values, positionals } = parsed(args);
   const [file, ...more] = positionals;
   if (file === undefined || more.length > 0) throw new Error(usage);
-  if (values.step !== undefined && values.at !== undefined) throw new Error('Give either --step or --at, not both.');
+  if (values.step !== undefined && values.at !== undefined)
+    throw new Error('Give either --step or --at, not both.');
   return { file, readings: readingsOf(values.step, values.at), csv: values.csv };
 }
 
@@ -35,7 +37,11 @@ function parsed(args: string[]) {
     return parseArgs({
       args,
       allowPositionals: true,
-      options: { step: { type: 'string' }, at: { type: 'string' }, csv: { type: 'boolean', default: false } },
+      options: {
+        step: { type: 'string' },
+        at: { type: 'string' },
+        csv: { type: 'boolean', default: false },
+      },
     });
   } catch (error) {
     throw new Error(usage, { cause: error });
@@ -62,7 +68,10 @@ async function readDesign(file: string): Promise<unknown> {
   try {
     return JSON.parse(text) as unknown;
   } catch {
-    throw invalid('', `The file ${file} is not JSON: a design is a JSON object with "format": "dipwright-tank".`);
+    throw invalid(
+      '',
+      `The file ${file} is not JSON: a design is a JSON object with "format": "dipwright-tank".`,
+    );
   }
 }
 

@@ -18,13 +18,26 @@ export interface HalfSpace {
  * The stretch of a line inside all the half-spaces (a convex solid with flat faces), its surface
  * included within `slack` mm; null when the line misses it.
  */
-export function lineInHalfSpaces(line: Line, faces: readonly HalfSpace[], slack: number): Interval | null {
+export function lineInHalfSpaces(
+  line: Line,
+  faces: readonly HalfSpace[],
+  slack: number,
+): Interval | null {
   let from = -Infinity;
   let to = Infinity;
   for (const { normal, offset } of faces) {
     const size = Math.hypot(normal[0], normal[1], normal[2]);
-    const rate = (normal[0] * line.direction[0] + normal[1] * line.direction[1] + normal[2] * line.direction[2]) / size;
-    const inside = (offset - normal[0] * line.origin[0] - normal[1] * line.origin[1] - normal[2] * line.origin[2]) / size;
+    const rate =
+      (normal[0] * line.direction[0] +
+        normal[1] * line.direction[1] +
+        normal[2] * line.direction[2]) /
+      size;
+    const inside =
+      (offset -
+        normal[0] * line.origin[0] -
+        normal[1] * line.origin[1] -
+        normal[2] * line.origin[2]) /
+      size;
     if (Math.abs(rate) < 1e-12) {
       if (inside < -slack) return null;
     } else if (rate > 0) to = Math.min(to, inside / rate);
@@ -49,7 +62,8 @@ export function lineInQuadric(line: Line, half: Vec3, slack: number): Interval |
     c += o * o;
   }
   const least = Math.min(half[0], half[1], half[2]);
-  if (a < 1e-24 / (least * least)) return c <= (2 * slack) / least ? { from: -Infinity, to: Infinity } : null;
+  if (a < 1e-24 / (least * least))
+    return c <= (2 * slack) / least ? { from: -Infinity, to: Infinity } : null;
   const middle = -b / a;
   const root = middle * middle - c / a;
   if (root < 0) return c - (b * b) / a <= (2 * slack) / least ? { from: middle, to: middle } : null;
@@ -74,7 +88,14 @@ export function lineInBarrel(
   const round = lineInQuadric(line, half, slack);
   const offset = barrel.length / 2;
   const back: Vec3 = [-normal[0], -normal[1], -normal[2]];
-  const between = lineInHalfSpaces(line, [{ normal, offset }, { normal: back, offset }], slack);
+  const between = lineInHalfSpaces(
+    line,
+    [
+      { normal, offset },
+      { normal: back, offset },
+    ],
+    slack,
+  );
   if (!round || !between) return null;
   const from = Math.max(round.from, between.from);
   const to = Math.min(round.to, between.to);

@@ -1,4 +1,8 @@
-import Module, { type Manifold, type ManifoldToplevel, type Vec2 as MutableVec2 } from 'manifold-3d';
+import Module, {
+  type Manifold,
+  type ManifoldToplevel,
+  type Vec2 as MutableVec2,
+} from 'manifold-3d';
 import { areaPreservingFactor } from './circle';
 import { exactPoints } from './exact-points';
 import type { Mesh } from './mesh';
@@ -137,7 +141,13 @@ function extrudedIn({ axis, outline, length }: Extract<Shape, { form: 'extrusion
 }
 
 /** The same for a body turned about z: each vertex back on its meridian and its point of the profile. */
-function revolvedIn({ axis, profile, facets, phase, stretch }: Extract<Shape, { form: 'revolution' }>): IntoOwn {
+function revolvedIn({
+  axis,
+  profile,
+  facets,
+  phase,
+  stretch,
+}: Extract<Shape, { form: 'revolution' }>): IntoOwn {
   const turn = turnedIn(axis);
   const exact = exactPoints(profile);
   const factor = areaPreservingFactor(facets);

@@ -26,7 +26,9 @@ export function meshHeights(mesh: Mesh, up: Vec3): MeshHeights {
   const z = levels(mesh, up);
   const a = levels(mesh, e1);
   const b = levels(mesh, e2);
-  const order = Uint32Array.from(z, (_, i) => i).sort((one, other) => z[one]! - z[other]! || one - other);
+  const order = Uint32Array.from(z, (_, i) => i).sort(
+    (one, other) => z[one]! - z[other]! || one - other,
+  );
   const rank = new Uint32Array(order.length);
   order.forEach((vertex, place) => (rank[vertex] = place));
 
@@ -40,7 +42,8 @@ export function meshHeights(mesh: Mesh, up: Vec3): MeshHeights {
     let least = rank[i]! < rank[j]! ? i : j;
     if (rank[k]! < rank[least]!) least = k;
     lowest[n / 3] = least;
-    projected[n / 3] = -0.5 * ((a[j]! - a[i]!) * (b[k]! - b[i]!) - (b[j]! - b[i]!) * (a[k]! - a[i]!));
+    projected[n / 3] =
+      -0.5 * ((a[j]! - a[i]!) * (b[k]! - b[i]!) - (b[j]! - b[i]!) * (a[k]! - a[i]!));
     for (const vertex of [i, j, k]) starts[vertex + 1]! += 1;
   }
   for (let vertex = 0; vertex < z.length; vertex += 1) starts[vertex + 1]! += starts[vertex]!;
@@ -69,7 +72,11 @@ export function meshHeights(mesh: Mesh, up: Vec3): MeshHeights {
  * Such a vertex is the nearest of its surroundings to a point just below it, and the angle-weighted normal
  * at the nearest point tells inside from outside (Bærentzen and Aanæs 2005, from memory).
  */
-export function solidBelow(mesh: Mesh, { axes, trianglesOf }: MeshHeights, vertex: number): boolean {
+export function solidBelow(
+  mesh: Mesh,
+  { axes, trianglesOf }: MeshHeights,
+  vertex: number,
+): boolean {
   const { triangles } = mesh;
   const up = axes[2];
   let sum = 0;

@@ -66,7 +66,12 @@ export function directionToOwn(place: Placing, direction: Vec3): Vec3 {
 function cosSin(degrees: number): readonly [number, number] {
   const quarter = degrees / 90;
   if (Number.isInteger(quarter)) {
-    const exact = [[1, 0], [0, 1], [-1, 0], [0, -1]] as const;
+    const exact = [
+      [1, 0],
+      [0, 1],
+      [-1, 0],
+      [0, -1],
+    ] as const;
     return exact[((quarter % 4) + 4) % 4]!;
   }
   const radians = (degrees * Math.PI) / 180;

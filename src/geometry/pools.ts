@@ -78,7 +78,8 @@ export function restingVolume(mesh: Mesh, up: Vec3, point: Vec3, nearMm: number)
       const start = lowest[n / 3]!;
       if (z[start]! >= s || sets.find(start) !== root) continue;
       volume +=
-        projected[n / 3]! * wetBelow(s, z[triangles[n]!]!, z[triangles[n + 1]!]!, z[triangles[n + 2]!]!);
+        projected[n / 3]! *
+        wetBelow(s, z[triangles[n]!]!, z[triangles[n + 1]!]!, z[triangles[n + 2]!]!);
     }
     return volume;
   }

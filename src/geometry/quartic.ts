@@ -16,7 +16,14 @@ export function carriedQuartic(rows: number): CarriedQuartic {
 }
 
 /** Adds w·(c3·t³ + c4·t⁴) from a row on, t the distance of that row from the polynomial's own zero. */
-export function join(into: CarriedQuartic, row: number, w: number, c3: number, c4: number, t: number): void {
+export function join(
+  into: CarriedQuartic,
+  row: number,
+  w: number,
+  c3: number,
+  c4: number,
+  t: number,
+): void {
   const [j0, j1, j2, j3, j4] = into.joining;
   const t2 = t * t;
   const t3 = t2 * t;

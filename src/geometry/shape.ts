@@ -30,7 +30,11 @@ export type Shape =
       stretch: Vec3;
     };
 
-const order: Record<Axis, readonly [number, number, number]> = { x: [1, 2, 0], y: [2, 0, 1], z: [0, 1, 2] };
+const order: Record<Axis, readonly [number, number, number]> = {
+  x: [1, 2, 0],
+  y: [2, 0, 1],
+  z: [0, 1, 2],
+};
 
 /** Index of the own axis that the outline's first, second and the extrusion's direction lie along. */
 export function axisOrder(axis: Axis): readonly [number, number, number] {

@@ -6,7 +6,10 @@ import type { Shape } from './shape';
  */
 export function swollen(shape: Shape, mm: number): Shape {
   if (shape.form === 'revolution') {
-    return { ...shape, profile: shape.profile.map(([radius, place]) => [grown(radius, mm), place]) };
+    return {
+      ...shape,
+      profile: shape.profile.map(([radius, place]) => [grown(radius, mm), place]),
+    };
   }
   const outline = shape.outline.map(([a, b]) => {
     const radius = Math.hypot(a, b);

@@ -60,7 +60,9 @@ function closest(face: Face, other: Face, thinMm: number): ThinPlace | null {
   let least: ThinPlace | null = null;
   for (const [x, y] of overlap) {
     // how far along the first normal the other plane lies over this point of the first
-    const at: Vec3 = [0, 1, 2].map((i) => origin[i]! + x * first[i]! + y * second[i]!) as unknown as Vec3;
+    const at: Vec3 = [0, 1, 2].map(
+      (i) => origin[i]! + x * first[i]! + y * second[i]!,
+    ) as unknown as Vec3;
     const gap = dot(other.normal, from(at, other.corners[0])) / dot(other.normal, face.normal);
     if (Math.abs(gap) < thinMm && (!least || Math.abs(gap) < least.gapMm)) {
       least = { what: gap < 0 ? 'film' : 'wall', gapMm: Math.abs(gap), at };
@@ -70,10 +72,18 @@ function closest(face: Face, other: Face, thinMm: number): ThinPlace | null {
 }
 
 function facesOf({ positions, triangles }: Mesh): Face[] {
-  const vertex = (i: number): Vec3 => [positions[3 * i]!, positions[3 * i + 1]!, positions[3 * i + 2]!];
+  const vertex = (i: number): Vec3 => [
+    positions[3 * i]!,
+    positions[3 * i + 1]!,
+    positions[3 * i + 2]!,
+  ];
   const faces: Face[] = [];
   for (let n = 0; n < triangles.length; n += 3) {
-    const corners = [vertex(triangles[n]!), vertex(triangles[n + 1]!), vertex(triangles[n + 2]!)] as const;
+    const corners = [
+      vertex(triangles[n]!),
+      vertex(triangles[n + 1]!),
+      vertex(triangles[n + 2]!),
+    ] as const;
     const normal = cross(from(corners[0], corners[1]), from(corners[0], corners[2]));
     if (Math.hypot(...normal) < 1e-9) continue;
     const direction = unit(normal);

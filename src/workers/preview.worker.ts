@@ -1,4 +1,3 @@
-
 import { DipwrightError } from '~/domain/errors';
 import { computePreview } from '~/domain/table/compute-preview';
 import type { Preview } from '~/domain/table/preview';

@@ -25,7 +25,15 @@ const cylinderAndBox: TankDocument = {
   name: 'Lying cylinder with a box through its top',
   solids: [
     { id: 'barrel', role: 'holds', kind: 'cylinder', diameter: 1400, length: 2400 },
-    { id: 'box', role: 'holds', kind: 'box', length: 900, width: 800, height: 1200, at: [950, 400, 600] },
+    {
+      id: 'box',
+      role: 'holds',
+      kind: 'box',
+      length: 900,
+      width: 800,
+      height: 1200,
+      at: [950, 400, 600],
+    },
   ],
 };
 
@@ -34,7 +42,15 @@ const withColumn: TankDocument = {
   name: 'The same with a round column through it, tilted',
   solids: [
     ...cylinderAndBox.solids,
-    { id: 'column', role: 'displaces', kind: 'cylinder', diameter: 300, length: 1900, axis: 'z', at: [300, 500, -50] },
+    {
+      id: 'column',
+      role: 'displaces',
+      kind: 'cylinder',
+      diameter: 300,
+      length: 1900,
+      axis: 'z',
+      at: [300, 500, -50],
+    },
   ],
   attitude: { pitch: 3, roll: 2 },
 };
@@ -57,7 +73,8 @@ for (const design of [...startingPoints.map((one) => one.design), cylinderAndBox
   const theirs = await cutRowByRow(mesh, levelsOf(mesh.positions));
   const ratio = theirs.ms / ours.ms;
   const whole = enclosedVolume(mesh);
-  const gap = Math.max(...ours.result.map((volume, row) => Math.abs(volume - theirs.volumes[row]!))) / whole;
+  const gap =
+    Math.max(...ours.result.map((volume, row) => Math.abs(volume - theirs.volumes[row]!))) / whole;
   const limited = solids.length <= 2 && solids.some(({ kind }) => kind.curved);
   if (limited && ratio < wantedRatio) missed += 1;
   console.log(
@@ -80,7 +97,9 @@ for (const { label, design } of startingPoints) {
   times.sort((a, b) => a - b);
   const median = times[times.length >> 1]!;
   if (median > wantedPreviewMs) missed += 1;
-  console.log(`  ${label}: median ${median.toFixed(1)} ms, slowest of ten ${slowest.toFixed(1)} ms (wanted ${wantedPreviewMs})`);
+  console.log(
+    `  ${label}: median ${median.toFixed(1)} ms, slowest of ten ${slowest.toFixed(1)} ms (wanted ${wantedPreviewMs})`,
+  );
 }
 
 console.log('A published table at 1 mm (N and 2N, bound), warm');
@@ -116,12 +135,19 @@ function cost<T>(warmUp: number, runs: number, work: () => T): { ms: number; res
 }
 
 /** The library's own way; building the mesh is not even counted. */
-async function cutRowByRow(mesh: { positions: Float64Array; triangles: Uint32Array }, levels: Float64Array) {
+async function cutRowByRow(
+  mesh: { positions: Float64Array; triangles: Uint32Array },
+  levels: Float64Array,
+) {
   const library = await Module();
   library.setup();
   const { Manifold, Mesh } = library;
   const solid = Manifold.ofMesh(
-    new Mesh({ numProp: 3, vertProperties: Float32Array.from(mesh.positions), triVerts: mesh.triangles }),
+    new Mesh({
+      numProp: 3,
+      vertProperties: Float32Array.from(mesh.positions),
+      triVerts: mesh.triangles,
+    }),
   );
   const { ms, result } = cost(1, 2, () =>
     Array.from(levels, (level) => {

@@ -10,7 +10,10 @@ describe('lines through solids', () => {
   ] as const;
 
   it('cuts half-spaces, whatever the length of their normals', () => {
-    expect(lineInHalfSpaces({ origin: [0, 0, 3], direction: [0, 0, 1] }, slab, 0)).toEqual({ from: -3, to: 7 });
+    expect(lineInHalfSpaces({ origin: [0, 0, 3], direction: [0, 0, 1] }, slab, 0)).toEqual({
+      from: -3,
+      to: 7,
+    });
     expect(lineInHalfSpaces({ origin: [6, 0, 3], direction: [0, 0, 1] }, slab, 0)).toBeNull();
   });
 
@@ -24,22 +27,43 @@ describe('lines through solids', () => {
     const whole = lineInQuadric({ origin: [0, 0, 0], direction: [0, 0, 1] }, [3, 4, 5], 0)!;
     expect(whole.from).toBeCloseTo(-5, 12);
     expect(whole.to).toBeCloseTo(5, 12);
-    const chord = lineInQuadric({ origin: [0, 3, -100], direction: [0, 0, 1] }, [Infinity, 5, 5], 0)!;
+    const chord = lineInQuadric(
+      { origin: [0, 3, -100], direction: [0, 0, 1] },
+      [Infinity, 5, 5],
+      0,
+    )!;
     expect(chord.from).toBeCloseTo(96, 10);
     expect(chord.to).toBeCloseTo(104, 10);
-    expect(lineInQuadric({ origin: [0, 0, 6], direction: [1, 0, 0] }, [Infinity, 5, 5], 0)).toBeNull();
-    expect(lineInQuadric({ origin: [0, 0, 1], direction: [1, 0, 0] }, [Infinity, 5, 5], 0)).toEqual({
-      from: -Infinity,
-      to: Infinity,
-    });
+    expect(
+      lineInQuadric({ origin: [0, 0, 6], direction: [1, 0, 0] }, [Infinity, 5, 5], 0),
+    ).toBeNull();
+    expect(lineInQuadric({ origin: [0, 0, 1], direction: [1, 0, 0] }, [Infinity, 5, 5], 0)).toEqual(
+      {
+        from: -Infinity,
+        to: Infinity,
+      },
+    );
   });
 });
 
 describe('stretches', () => {
   it('join where they touch and lose what is taken away', () => {
-    const joined = unionOf([{ from: 5, to: 9 }, { from: 0, to: 2 }, { from: 2 + 1e-7, to: 4 }], 1e-6);
-    expect(joined).toEqual([{ from: 0, to: 4 }, { from: 5, to: 9 }]);
-    expect(without(joined, [{ from: 1, to: 6 }])).toEqual([{ from: 0, to: 1 }, { from: 6, to: 9 }]);
+    const joined = unionOf(
+      [
+        { from: 5, to: 9 },
+        { from: 0, to: 2 },
+        { from: 2 + 1e-7, to: 4 },
+      ],
+      1e-6,
+    );
+    expect(joined).toEqual([
+      { from: 0, to: 4 },
+      { from: 5, to: 9 },
+    ]);
+    expect(without(joined, [{ from: 1, to: 6 }])).toEqual([
+      { from: 0, to: 1 },
+      { from: 6, to: 9 },
+    ]);
     expect(without(joined, [{ from: -1, to: 4 - 1e-7 }], 1e-6)).toEqual([{ from: 5, to: 9 }]);
   });
 });

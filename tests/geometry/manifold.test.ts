@@ -10,8 +10,14 @@ describe('spaceOf', () => {
     const size = [900.123456, 500.654321, 300.111111] as const;
     const far = meshFrom([boxShape(size, [20_000.7, -20_000.3, 20_000.1], [0, 0, 15])]);
     const exact = size[0] * size[1] * size[2];
-    expect(Math.abs(enclosedVolume(far, [20_000, -20_000, 20_000]) / exact - 1)).toBeLessThan(1e-12);
-    const moved = meshFrom([boxShape(size, [20_000.7, -20_000.3, 20_000.1], [0, 0, 15])], [], [20_450, -19_750, 20_250]);
+    expect(Math.abs(enclosedVolume(far, [20_000, -20_000, 20_000]) / exact - 1)).toBeLessThan(
+      1e-12,
+    );
+    const moved = meshFrom(
+      [boxShape(size, [20_000.7, -20_000.3, 20_000.1], [0, 0, 15])],
+      [],
+      [20_450, -19_750, 20_250],
+    );
     const near = meshFrom([boxShape(size, [0.7, -0.3, 0.1], [0, 0, 15])], [], [450, 250, 250]);
     const up = upVector(5, 3);
     const at = Float64Array.of(-60, 0, 60);
@@ -37,12 +43,16 @@ describe('spaceOf', () => {
   });
 
   it('keeps chambers apart that only share an edge', () => {
-    const parts = shells(meshFrom([boxShape([100, 100, 100]), boxShape([100, 100, 100], [100, 100, 0])]));
+    const parts = shells(
+      meshFrom([boxShape([100, 100, 100]), boxShape([100, 100, 100], [100, 100, 0])]),
+    );
     expect(parts.map(({ volumeMm3 }) => volumeMm3)).toEqual([1e6, 1e6]);
   });
 
   it('gives an enclosed void a shell of negative volume', () => {
-    const hollow = shells(meshFrom([boxShape([100, 100, 100])], [boxShape([20, 20, 20], [40, 40, 40])]));
+    const hollow = shells(
+      meshFrom([boxShape([100, 100, 100])], [boxShape([20, 20, 20], [40, 40, 40])]),
+    );
     expect(hollow.map(({ volumeMm3 }) => volumeMm3).sort((a, b) => a - b)).toEqual([-8000, 1e6]);
   });
 

@@ -19,7 +19,10 @@ describe('restingVolume', () => {
   });
 
   it('leaves all that is below an outlet above the sill', () => {
-    expect(restingVolume(sumps, up, [100, 200, 150], 0.01)).toBeCloseTo(800 * 400 * 100 + 1000 * 400 * 50, 3);
+    expect(restingVolume(sumps, up, [100, 200, 150], 0.01)).toBeCloseTo(
+      800 * 400 * 100 + 1000 * 400 * 50,
+      3,
+    );
   });
 
   it('takes a point on a wall, an edge or a corner', () => {
@@ -36,15 +39,24 @@ describe('restingVolume', () => {
     const behind = 600 * 100 * 120 - 100 * 100 * 80;
     expect(restingVolume(three, up, [900, 50, 0], 0.01)).toBeCloseTo(behind, 3);
     // outlet in the middle one: the first keeps its 80, the last its 120
-    expect(restingVolume(three, up, [450, 50, 0], 0.01)).toBeCloseTo(200 * 100 * 80 + 300 * 100 * 120, 3);
+    expect(restingVolume(three, up, [450, 50, 0], 0.01)).toBeCloseTo(
+      200 * 100 * 80 + 300 * 100 * 120,
+      3,
+    );
   });
 
   it('does not take the underside of what hangs in the tank for a pool', () => {
-    const hanging = meshFrom([boxShape([1000, 400, 300])], [boxShape([200, 200, 100], [400, 100, 150])]);
+    const hanging = meshFrom(
+      [boxShape([1000, 400, 300])],
+      [boxShape([200, 200, 100], [400, 100, 150])],
+    );
     expect(restingVolume(hanging, up, [100, 200, 0], 0.01)).toBeCloseTo(0, 6);
     expect(restingVolume(hanging, up, [500, 200, 140], 0.01)).toBeCloseTo(1000 * 400 * 140, 3);
     // hung from the roof it parts the air: the part without the vent is trapped
-    const baffle = meshFrom([boxShape([1000, 400, 300])], [boxShape([100, 400, 120], [400, 0, 180])]);
+    const baffle = meshFrom(
+      [boxShape([1000, 400, 300])],
+      [boxShape([100, 400, 120], [400, 0, 180])],
+    );
     expect(restingVolume(baffle, down, [100, 200, 300], 0.01)).toBeCloseTo(500 * 400 * 120, 3);
   });
 
@@ -54,7 +66,10 @@ describe('restingVolume', () => {
   });
 
   it('sees a hollow shell, and what stands on an island in it', () => {
-    const shell = meshFrom([boxShape([300, 300, 300])], [boxShape([100, 100, 100], [100, 100, 100])]);
+    const shell = meshFrom(
+      [boxShape([300, 300, 300])],
+      [boxShape([100, 100, 100], [100, 100, 100])],
+    );
     expect(restingVolume(shell, up, [10, 10, 0], 0.01)).toBeCloseTo(0, 6);
     expect(restingVolume(shell, up, [10, 10, 300], 0.01)).toBeCloseTo(27e6 - 1e6, 3);
   });
@@ -64,11 +79,19 @@ describe('restingVolume', () => {
     const mesh = meshFrom([boxShape([1000, 400, 300])]);
     const direction = upVector(10, 0);
     const slope = Math.tan(Math.PI / 18);
-    expect(restingVolume(mesh, direction, [0, 200, 0], 0.01)).toBeCloseTo(0.5 * 1000 * 1000 * slope * 400, 2);
+    expect(restingVolume(mesh, direction, [0, 200, 0], 0.01)).toBeCloseTo(
+      0.5 * 1000 * 1000 * slope * 400,
+      2,
+    );
     // at the lower end nothing stays
     expect(restingVolume(mesh, direction, [1000, 200, 0], 0.01)).toBeCloseTo(0, 2);
     // vent at the lower end of the roof: the air at the upper end is trapped
-    const trapped = restingVolume(mesh, [-direction[0], -direction[1], -direction[2]], [1000, 200, 300], 0.01);
+    const trapped = restingVolume(
+      mesh,
+      [-direction[0], -direction[1], -direction[2]],
+      [1000, 200, 300],
+      0.01,
+    );
     expect(trapped).toBeCloseTo(0.5 * 1000 * 1000 * slope * 400, 2);
   });
 
@@ -78,7 +101,7 @@ describe('restingVolume', () => {
     // lowest corner x = y = 1000, z = 0; outlet 100 mm along x from it
     const u = [Math.abs(direction[0]), Math.abs(direction[1]), direction[2]] as const;
     const h = 100 * u[0];
-    const left = (h / u[0]) * (h / u[1]) * (h / u[2]) / 6;
+    const left = ((h / u[0]) * (h / u[1]) * (h / u[2])) / 6;
     expect(restingVolume(mesh, direction, [900, 1000, 0], 0.01)).toBeCloseTo(left, 3);
   });
 });

@@ -11,7 +11,8 @@ describe('sectionLoops', () => {
     expect(areas).toHaveLength(2);
     expect(areas[0]).toBeCloseTo(-1600, 9);
     expect(areas[1]).toBeCloseTo(10_000, 9);
-    for (const loop of loops) for (let i = 2; i < loop.length; i += 3) expect(loop[i]).toBeCloseTo(20, 12);
+    for (const loop of loops)
+      for (let i = 2; i < loop.length; i += 3) expect(loop[i]).toBeCloseTo(20, 12);
   });
 
   it('gives nothing above the roof and below the floor, and the floor at the floor', () => {

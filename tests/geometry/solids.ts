@@ -9,8 +9,16 @@ await loadManifold();
 
 export function boxShape(size: Vec3, at: Vec3 = [0, 0, 0], turn: Vec3 = [0, 0, 0]): PlacedShape {
   const [x, y, z] = [size[0] / 2, size[1] / 2, size[2]];
-  const outline = [[-x, -y], [x, -y], [x, y], [-x, y]] as const;
-  return { shape: { form: 'extrusion', axis: 'z', outline, length: z }, place: placing(at, size, turn) };
+  const outline = [
+    [-x, -y],
+    [x, -y],
+    [x, y],
+    [-x, y],
+  ] as const;
+  return {
+    shape: { form: 'extrusion', axis: 'z', outline, length: z },
+    place: placing(at, size, turn),
+  };
 }
 
 export function cylinderShape(
@@ -22,10 +30,17 @@ export function cylinderShape(
   const extent = [2 * radius, 2 * radius, 2 * radius] as [number, number, number];
   extent['xyz'.indexOf(axis)] = length;
   const outline = circleOutline(radius, facets, phase);
-  return { shape: { form: 'extrusion', axis, outline, length }, place: placing(at, extent, [0, 0, 0]) };
+  return {
+    shape: { form: 'extrusion', axis, outline, length },
+    place: placing(at, extent, [0, 0, 0]),
+  };
 }
 
-export function meshFrom(holds: PlacedShape[], displaces: PlacedShape[] = [], origin: Vec3 = [0, 0, 0]): Mesh {
+export function meshFrom(
+  holds: PlacedShape[],
+  displaces: PlacedShape[] = [],
+  origin: Vec3 = [0, 0, 0],
+): Mesh {
   return spaceOf(holds, displaces, origin);
 }
 

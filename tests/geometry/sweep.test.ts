@@ -34,7 +34,11 @@ describe('sweep', () => {
     const mesh = cornerTetrahedron(300, 400, 500);
     const direction = unit([1, 1, 1]);
     // below the nearest corner (level 300/√3) the wet part is a corner tetrahedron with edges h√3
-    const { volume, surface, moments } = sweep(mesh, direction, Float64Array.of(10, 100, 170, 1000));
+    const { volume, surface, moments } = sweep(
+      mesh,
+      direction,
+      Float64Array.of(10, 100, 170, 1000),
+    );
     [10, 100, 170].forEach((h, row) => {
       const edge = h * Math.sqrt(3);
       expect(volume[row]).toBeCloseTo(edge ** 3 / 6, 5);
@@ -49,7 +53,10 @@ describe('sweep', () => {
 
   it('gives the same row by row and carried from row to row', () => {
     const mesh = meshFrom(
-      [cylinderShape(300, 900, 32, { axis: 'x' }), boxShape([400, 200, 500], [100, 50, 200], [10, 20, 30])],
+      [
+        cylinderShape(300, 900, 32, { axis: 'x' }),
+        boxShape([400, 200, 500], [100, 50, 200], [10, 20, 30]),
+      ],
       [boxShape([100, 100, 400], [300, 250, 100])],
     );
     const direction = upVector(17, -23);
@@ -79,7 +86,10 @@ describe('sweep', () => {
     const steps = 4000;
     let sum = 0;
     for (let i = 0; i < steps; i += 1) {
-      sum += areaOf(sectionLoops(mesh, direction, low + ((i + 0.5) / steps) * (at - low)), direction);
+      sum += areaOf(
+        sectionLoops(mesh, direction, low + ((i + 0.5) / steps) * (at - low)),
+        direction,
+      );
     }
     const { volume, surface } = sweep(mesh, direction, Float64Array.of(at, high));
     expect((sum * (at - low)) / steps / volume[0]!).toBeCloseTo(1, 6);
@@ -102,14 +112,22 @@ describe('sweep', () => {
           const [low, high] = ends(mesh, direction);
           const at = even(low, high, count);
           const { volume, surface, moments } = sweep(mesh, direction, at);
-          const down = sweep(mesh, [-direction[0], -direction[1], -direction[2]], at.map((h) => -h).reverse());
+          const down = sweep(
+            mesh,
+            [-direction[0], -direction[1], -direction[2]],
+            at.map((h) => -h).reverse(),
+          );
           for (let row = 0; row < count; row += 1) {
             if (row > 0) expect(volume[row]! - volume[row - 1]!).toBeGreaterThan(-1e-11 * whole);
             expect(surface[row]).toBeGreaterThan(-1e-9 * whole);
             // what is below and what is above make the whole; a corner within 1e-9 of a level counts as met
-            expect(Math.abs(volume[row]! + down.volume[count - 1 - row]! - whole)).toBeLessThan(1e-9 * whole);
+            expect(Math.abs(volume[row]! + down.volume[count - 1 - row]! - whole)).toBeLessThan(
+              1e-9 * whole,
+            );
             if (volume[row]! > 1e-6 * whole) {
-              const centroid = moments.map((moment) => moment[row]! / volume[row]!) as unknown as Vec3;
+              const centroid = moments.map(
+                (moment) => moment[row]! / volume[row]!,
+              ) as unknown as Vec3;
               expect(dot(direction, centroid)).toBeLessThan(at[row]! + 1e-6);
               expect(dot(direction, centroid)).toBeGreaterThan(low - 1e-6);
             }
@@ -132,7 +150,10 @@ describe('sweep', () => {
   });
 
   it('does not mind levels that meet corners within rounding', () => {
-    const mesh = meshFrom([boxShape([100, 100, 100]), boxShape([50, 50, 100], [100, 0, 0.1 + 0.2])]);
+    const mesh = meshFrom([
+      boxShape([100, 100, 100]),
+      boxShape([50, 50, 100], [100, 0, 0.1 + 0.2]),
+    ]);
     const { surface } = sweep(mesh, up, Float64Array.of(0.3 - 1e-13, 50, 100.3));
     expect(surface[0]).toBeCloseTo(12_500, 6);
   });

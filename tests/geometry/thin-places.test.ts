@@ -32,9 +32,15 @@ describe('thinPlace', () => {
     const c = Math.cos(Math.PI / 6);
     const s = Math.sin(Math.PI / 6);
     const step = 100.005;
-    const mesh = meshFrom([boxShape([100, 100, 100], [0, 0, 0], turn), boxShape([100, 100, 100], [step * c, step * s, 0], turn)]);
+    const mesh = meshFrom([
+      boxShape([100, 100, 100], [0, 0, 0], turn),
+      boxShape([100, 100, 100], [step * c, step * s, 0], turn),
+    ]);
     expect(thinPlace(mesh, 0.01)?.what).toBe('wall');
-    const nested = meshFrom([cylinderShape(200, 600, 64)], [cylinderShape(199.995, 500, 64, { at: [0.005, 0.005, 0] })]);
+    const nested = meshFrom(
+      [cylinderShape(200, 600, 64)],
+      [cylinderShape(199.995, 500, 64, { at: [0.005, 0.005, 0] })],
+    );
     expect(thinPlace(nested, 0.01)?.what).toBe('film');
   });
 

@@ -24,9 +24,7 @@ export function columnAt(solids: readonly PlacedSolid[], x: number, y: number): 
 function column(solids: readonly PlacedSolid[], x: number, y: number, slack: number): Interval[] {
   const line = { origin: [x, y, 0], direction: [0, 0, 1] } as const;
   const stretches = (role: 'holds' | 'displaces', within: number) =>
-    solids
-      .filter(({ solid }) => solid.role === role)
-      .flatMap((one) => chordsOf(one, line, within));
+    solids.filter(({ solid }) => solid.role === role).flatMap((one) => chordsOf(one, line, within));
   const held = unionOf(stretches('holds', samePlaceMm), samePlaceMm);
   return without(held, unionOf(stretches('displaces', slack)), samePlaceMm);
 }

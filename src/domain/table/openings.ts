@@ -32,7 +32,8 @@ export function openings(
       );
     }
     const [x, y, z] = space.origin;
-    const nearMm = 2 * (thinMm + Math.max(...solids.map((one) => facetStandOffMm(one, space.facets))));
+    const nearMm =
+      2 * (thinMm + Math.max(...solids.map((one) => facetStandOffMm(one, space.facets))));
     return (
       restingVolume(space.mesh, direction, [point[0] - x, point[1] - y, point[2] - z], nearMm) / 1e6
     );

@@ -20,6 +20,8 @@ export type Readings = { stepMm: number } | { atMm: readonly number[] };
 export const computeRequest = z
   .strictObject({ design: tankDocument, stepMm: stepMm.optional(), atMm: atMm.optional() })
   .superRefine((request, context) => {
+    // a faulty one of the two is told already, and left out of what is seen here
+    if (context.issues.some(({ path }) => path?.[0] === 'stepMm' || path?.[0] === 'atMm')) return;
     if ((request.stepMm === undefined) === (request.atMm === undefined)) {
       context.addIssue({
         code: 'custom',

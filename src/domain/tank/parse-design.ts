@@ -20,9 +20,15 @@ type Issue = z.core.$ZodIssue;
 export function designFaults(issues: readonly Issue[], value: unknown): FieldFault[] {
   return issues.flatMap((issue) => {
     if (issue.code === 'unrecognized_keys') {
-      return issue.keys.map((key) => fault([...issue.path, key], 'there is no such field here.', value));
+      return issue.keys.map((key) =>
+        fault([...issue.path, key], 'there is no such field here.', value),
+      );
     }
-    if (issue.code === 'invalid_type' && valueAt(value, issue.path) === undefined && issue.path.length > 0) {
+    if (
+      issue.code === 'invalid_type' &&
+      valueAt(value, issue.path) === undefined &&
+      issue.path.length > 0
+    ) {
       return [fault(issue.path, 'this field is missing.', value)];
     }
     return [fault(issue.path, plainSentence(issue), value)];
@@ -35,11 +41,15 @@ function plainSentence(issue: Issue): string {
   if (issue.path.length === 0) return 'A design is a JSON object with "format": "dipwright-tank".';
   const expected = issue.code === 'invalid_type' ? issue.expected : 'value';
   if (expected === 'object') return 'Give an object in braces.';
-  return expected === 'array' || expected === 'tuple' ? 'Give a list in brackets.' : `Give a ${expected}.`;
+  return expected === 'array' || expected === 'tuple'
+    ? 'Give a list in brackets.'
+    : `Give a ${expected}.`;
 }
 
 function fault(path: readonly PropertyKey[], sentence: string, value: unknown): FieldFault {
-  const pointer = path.map((key) => `/${String(key).replace(/~/g, '~0').replace(/\//g, '~1')}`).join('');
+  const pointer = path
+    .map((key) => `/${String(key).replace(/~/g, '~0').replace(/\//g, '~1')}`)
+    .join('');
   const place = placeWords(path, value);
   const [first = '', ...rest] = sentence;
   // a sentence that begins with a name of the format keeps its capital
@@ -54,7 +64,8 @@ function placeWords(path: readonly PropertyKey[], value: unknown): string {
   );
   if (!ofSolid) return capital(words.join(', '));
   const id = valueAt(value, ['solids', path[1]!, 'id']);
-  const named = typeof id === 'string' && id !== '' ? `"${id.slice(0, 64)}"` : String(Number(path[1]) + 1);
+  const named =
+    typeof id === 'string' && id !== '' ? `"${id.slice(0, 64)}"` : String(Number(path[1]) + 1);
   return [`Solid ${named}`, ...words].join(', ');
 }
 

@@ -32,7 +32,14 @@ export function highestLevel({ solid, kind, place }: PlacedSolid, up: Vec3): num
 }
 
 /** Stretches of a line of the tank's frame inside the solid, closed form; see Kind.chords. */
-export function chordsOf({ solid, kind, place }: PlacedSolid, line: Line, slack: number): readonly Interval[] {
-  const own = { origin: toOwn(place, line.origin), direction: directionToOwn(place, line.direction) };
+export function chordsOf(
+  { solid, kind, place }: PlacedSolid,
+  line: Line,
+  slack: number,
+): readonly Interval[] {
+  const own = {
+    origin: toOwn(place, line.origin),
+    direction: directionToOwn(place, line.direction),
+  };
   return kind.chords(solid, own, slack);
 }

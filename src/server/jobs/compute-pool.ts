@@ -39,7 +39,8 @@ const mostWaiting = 200;
 
 export function createComputePool(options: ComputePoolOptions): ComputePool {
   const { threads, workerFile, limitSeconds = {}, onError = () => {} } = options;
-  const filename = workerFile ?? fileURLToPath(new URL('./compute-worker-from-source.mjs', import.meta.url));
+  const filename =
+    workerFile ?? fileURLToPath(new URL('./compute-worker-from-source.mjs', import.meta.url));
   const pool = new Piscina({
     filename,
     minThreads: 1,
@@ -51,7 +52,10 @@ export function createComputePool(options: ComputePoolOptions): ComputePool {
   pool.on('error', onError);
   let closed = false;
 
-  async function run(task: ComputeTask, seconds: number): Promise<ComputedTable | IssuedTable | Sketched> {
+  async function run(
+    task: ComputeTask,
+    seconds: number,
+  ): Promise<ComputedTable | IssuedTable | Sketched> {
     if (closed) throw unavailable('The server is stopping. Try again in a moment.');
     const signal = AbortSignal.timeout(seconds * 1000);
     let outcome: ComputeOutcome;
@@ -69,7 +73,10 @@ export function createComputePool(options: ComputePoolOptions): ComputePool {
       }
       if (closed) throw unavailable('The server is stopping. Try again in a moment.', error);
       onError(error);
-      throw unavailable('The table could not be computed. Try again; if it happens again, change the shape a little.', error);
+      throw unavailable(
+        'The table could not be computed. Try again; if it happens again, change the shape a little.',
+        error,
+      );
     }
     if ('refusal' in outcome) {
       const { code, message, faults } = outcome.refusal;
@@ -82,8 +89,12 @@ export function createComputePool(options: ComputePoolOptions): ComputePool {
     table: (design, readings) =>
       run({ work: 'table', design, readings }, limitSeconds.table ?? 30) as Promise<ComputedTable>,
     issue: (design, settings, stepMm) =>
-      run({ work: 'issue', design, settings, stepMm }, limitSeconds.issue ?? 90) as Promise<IssuedTable>,
-    sketch: (design) => run({ work: 'sketch', design }, limitSeconds.table ?? 30) as Promise<Sketched>,
+      run(
+        { work: 'issue', design, settings, stepMm },
+        limitSeconds.issue ?? 90,
+      ) as Promise<IssuedTable>,
+    sketch: (design) =>
+      run({ work: 'sketch', design }, limitSeconds.table ?? 30) as Promise<Sketched>,
     async close() {
       closed = true;
       await pool.close();

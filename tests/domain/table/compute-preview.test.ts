@@ -27,7 +27,10 @@ describe('computePreview', () => {
   it('draws the space and each solid in the frame of the tank', async () => {
     const { space, solids, capacityL } = await computePreview(slopedCistern);
     expect(enclosedVolume(space) / 1e6).toBeCloseTo(capacityL, 9);
-    expect(solids.map(({ id, role }) => [id, role])).toEqual([['body', 'holds'], ['ramp', 'displaces']]);
+    expect(solids.map(({ id, role }) => [id, role])).toEqual([
+      ['body', 'holds'],
+      ['ramp', 'displaces'],
+    ]);
     expect(enclosedVolume(solids[0]!) / 1e6).toBeCloseTo(135, 9);
     expect(enclosedVolume(solids[1]!) / 1e6).toBeCloseTo(12, 9);
     const xs = solids[1]!.positions.filter((_, i) => i % 3 === 0);
@@ -54,7 +57,10 @@ describe('computePreview', () => {
   });
 
   it('counts pieces and says so', async () => {
-    const apart = design([box('a', [100, 100, 100]), box('b', [100, 100, 100], { at: [200, 0, 0] })]);
+    const apart = design([
+      box('a', [100, 100, 100]),
+      box('b', [100, 100, 100], { at: [200, 0, 0] }),
+    ]);
     const preview = await computePreview(apart);
     expect(preview.pieces).toBe(2);
     expect(preview.notices).toEqual(['The liquid space is in 2 pieces.']);

@@ -4,7 +4,10 @@ import type { TankDocument } from '~/domain/tank/document';
 import type { DipwrightError } from '~/domain/errors';
 import { box, cylinder, design, hull, slopedCistern, wedge } from './designs';
 
-async function refusal(tank: TankDocument, readings: Parameters<typeof computeTable>[1] = { stepMm: 10 }) {
+async function refusal(
+  tank: TankDocument,
+  readings: Parameters<typeof computeTable>[1] = { stepMm: 10 },
+) {
   return computeTable(tank, readings).then(
     () => {
       throw new Error('was not refused');
@@ -19,7 +22,9 @@ describe('rows', () => {
     expect(heightMm).toBe(300);
     expect(rows.map(({ depthMm }) => depthMm)).toEqual([0, 40, 80, 120, 160, 200, 240, 280, 300]);
     expect((await computeTable(slopedCistern, { stepMm: 0.1 })).rows).toHaveLength(3001);
-    expect((await computeTable(slopedCistern, { stepMm: 500 })).rows.map(({ depthMm }) => depthMm)).toEqual([0, 300]);
+    expect(
+      (await computeTable(slopedCistern, { stepMm: 500 })).rows.map(({ depthMm }) => depthMm),
+    ).toEqual([0, 300]);
   });
 
   it('come in the order asked for, repeated where repeated', async () => {
@@ -28,16 +33,22 @@ describe('rows', () => {
   });
 
   it('have the surface just above each level, and just below the brim', async () => {
-    const step = design([box('body', [100, 100, 100])].concat(box('shelf', [50, 100, 40], { role: 'displaces' })));
+    const step = design(
+      [box('body', [100, 100, 100])].concat(box('shelf', [50, 100, 40], { role: 'displaces' })),
+    );
     const { rows } = await computeTable(step, { atMm: [0, 39.9, 40, 100] });
-    expect(rows.map(({ surfaceCm2 }) => Math.round(surfaceCm2 * 1e6) / 1e6)).toEqual([50, 50, 100, 100]);
+    expect(rows.map(({ surfaceCm2 }) => Math.round(surfaceCm2 * 1e6) / 1e6)).toEqual([
+      50, 50, 100, 100,
+    ]);
   });
 
   it('have the centroid of the liquid in the frame of the tank', async () => {
     const far = design([box('body', [900, 500, 300], { at: [20_000, -7000, 400] })]);
     const { rows } = await computeTable(far, { atMm: [0, 100] });
     expect(rows[0]!.centroidMm).toEqual([20_450, -6750, 400]);
-    rows[1]!.centroidMm.forEach((value, i) => expect(value).toBeCloseTo([20_450, -6750, 450][i]!, 9));
+    rows[1]!.centroidMm.forEach((value, i) =>
+      expect(value).toBeCloseTo([20_450, -6750, 450][i]!, 9),
+    );
   });
 
   it('a floor along a line or at a point is empty at 0 and its centroid lies there', async () => {
@@ -60,7 +71,10 @@ describe('the stick', () => {
 
   it('stands beside a step when it stands on its edge, and over the floor at an end wall', async () => {
     const arch = design(
-      [box('body', [900, 500, 300]), box('arch', [200, 100, 120], { role: 'displaces', at: [300, 0, 0] })],
+      [
+        box('body', [900, 500, 300]),
+        box('arch', [200, 100, 120], { role: 'displaces', at: [300, 0, 0] }),
+      ],
       { stick: { at: [300, 50] } },
     );
     expect((await computeTable(arch, { stepMm: 100 })).heightMm).toBe(300);
@@ -123,17 +137,25 @@ describe('refusals', () => {
     const error = await refusal(slopedCistern, { atMm: [0, 300, 300.1] });
     expect(error.code).toBe('invalid');
     expect(error.faults).toEqual([
-      { pointer: '/atMm/2', detail: 'A reading of 300.1 mm lies outside 0 to 300 mm, the range of this tank.' },
+      {
+        pointer: '/atMm/2',
+        detail: 'A reading of 300.1 mm lies outside 0 to 300 mm, the range of this tank.',
+      },
     ]);
     expect((await refusal(slopedCistern, { atMm: [-1] })).faults[0]!.pointer).toBe('/atMm/0');
   });
 
   it('ask for a larger step instead of too many rows', async () => {
-    expect((await refusal(slopedCistern, { stepMm: 0.01 })).message).toMatch(/more than 20000 rows: take 0.02 mm/);
+    expect((await refusal(slopedCistern, { stepMm: 0.01 })).message).toMatch(
+      /more than 20000 rows: take 0.02 mm/,
+    );
   });
 
   it('name an empty liquid space', async () => {
-    const gone = design([box('body', [9, 5, 3]), box('hole', [10, 10, 10], { role: 'displaces', at: [-0.5, -1, -1] })]);
+    const gone = design([
+      box('body', [9, 5, 3]),
+      box('hole', [10, 10, 10], { role: 'displaces', at: [-0.5, -1, -1] }),
+    ]);
     expect((await refusal(gone)).message).toMatch(/empty: what displaces takes away all/);
     const nothing = design([box('hole', [10, 10, 10], { role: 'displaces' })]);
     expect((await refusal(nothing)).message).toMatch(/no solid has the role "holds"/);
@@ -141,7 +163,9 @@ describe('refusals', () => {
 
   it('name what cannot be computed yet, and sizes that are nothing', async () => {
     const outside = await refusal({ ...slopedCistern, wall: { thickness: 6, sizes: 'outside' } });
-    expect(outside.message).toBe('Wall, sizes: outside sizes are not computed yet: give inside sizes.');
+    expect(outside.message).toBe(
+      'Wall, sizes: outside sizes are not computed yet: give inside sizes.',
+    );
     const flat = await refusal(design([box('body', [900, 500, 0.001])]));
     expect(flat.faults).toEqual([
       { pointer: '/solids/0/height', detail: 'Solid "body", height: a size is at least 0.01 mm.' },
@@ -213,16 +237,27 @@ describe('outlet and vent', () => {
   it('are refused outside the liquid space', async () => {
     const outside = await refusal({ ...slopedCistern, outlet: [50, 250, -1] });
     expect(outside.faults[0]!.pointer).toBe('/outlet');
-    expect((await refusal({ ...slopedCistern, vent: [850, 250, 30] })).faults[0]!.pointer).toBe('/vent');
+    expect((await refusal({ ...slopedCistern, vent: [850, 250, 30] })).faults[0]!.pointer).toBe(
+      '/vent',
+    );
   });
 });
 
 describe('turned and mirrored tanks', () => {
   it('hold the same whichever way they are described', async () => {
-    const upright = await computeTable(design([cylinder('c', 400, 700, { axis: 'z' })]), { stepMm: 50 });
-    const turned = await computeTable(design([cylinder('c', 400, 700, { axis: 'x', turn: [0, -90, 0] })]), { stepMm: 50 });
-    turned.rows.forEach(({ volumeL }, i) => expect(volumeL).toBeCloseTo(upright.rows[i]!.volumeL, 7));
-    const round = await computeTable(design([wedge('w', [300, 200, 100], { turn: [0, 0, 360] })]), { stepMm: 10 });
+    const upright = await computeTable(design([cylinder('c', 400, 700, { axis: 'z' })]), {
+      stepMm: 50,
+    });
+    const turned = await computeTable(
+      design([cylinder('c', 400, 700, { axis: 'x', turn: [0, -90, 0] })]),
+      { stepMm: 50 },
+    );
+    turned.rows.forEach(({ volumeL }, i) =>
+      expect(volumeL).toBeCloseTo(upright.rows[i]!.volumeL, 7),
+    );
+    const round = await computeTable(design([wedge('w', [300, 200, 100], { turn: [0, 0, 360] })]), {
+      stepMm: 10,
+    });
     const plain = await computeTable(design([wedge('w', [300, 200, 100])]), { stepMm: 10 });
     expect(round.rows).toEqual(plain.rows);
   });

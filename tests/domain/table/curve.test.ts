@@ -6,11 +6,17 @@ import { box, cylinder, design, slopedCistern } from './designs';
 
 const between = [0.3, 17.3, 59.2, 118.8, 205, 209.9, 214, 260.5, 297.7];
 
-async function worst(tank: Parameters<typeof computeTable>[0], stepMm: number, depths: readonly number[]) {
+async function worst(
+  tank: Parameters<typeof computeTable>[0],
+  stepMm: number,
+  depths: readonly number[],
+) {
   const { rows, capacityL } = await computeTable(tank, { stepMm });
   const exact = await computeTable(tank, { atMm: depths });
   const curve = curveFromRows(rows);
-  const gaps = exact.rows.map(({ depthMm, volumeL }) => Math.abs(volumeAt(curve, depthMm) - volumeL));
+  const gaps = exact.rows.map(({ depthMm, volumeL }) =>
+    Math.abs(volumeAt(curve, depthMm) - volumeL),
+  );
   return Math.max(...gaps) / capacityL;
 }
 
@@ -25,14 +31,18 @@ describe('the curve through a table', () => {
     expect(await worst(arch, 10, between)).toBeLessThan(1e-12);
     // with its top inside a segment nothing can tell where it is: at most a quarter of the jump times the step
     expect(await worst(arch, 20, [209.9])).toBeLessThan(0.01);
-    const ledge = design([box('low', [400, 400, 100]), box('high', [200, 400, 100], { at: [0, 0, 100] })]);
+    const ledge = design([
+      box('low', [400, 400, 100]),
+      box('high', [200, 400, 100], { at: [0, 0, 100] }),
+    ]);
     expect(await worst(ledge, 10, [95, 99, 101, 105, 150])).toBeLessThan(1e-12);
   });
 
   it('goes back from litres to depth', async () => {
     const { rows } = await computeTable(slopedCistern, { stepMm: 10 });
     const curve = curveFromRows(rows);
-    for (const depth of between) expect(depthAt(curve, volumeAt(curve, depth))).toBeCloseTo(depth, 7);
+    for (const depth of between)
+      expect(depthAt(curve, volumeAt(curve, depth))).toBeCloseTo(depth, 7);
     expect(depthAt(curve, 55.5)).toBeCloseTo(150, 7);
   });
 

@@ -16,7 +16,12 @@ export function box(
 }
 
 /** A cylinder that holds, lying along x unless told. */
-export function cylinder(id: string, diameter: number, length: number, rest: Partial<Solid> = {}): Solid {
+export function cylinder(
+  id: string,
+  diameter: number,
+  length: number,
+  rest: Partial<Solid> = {},
+): Solid {
   return { id, role: 'holds', kind: 'cylinder', diameter, length, ...rest } as Solid;
 }
 

@@ -15,15 +15,27 @@ const size = fc.oneof(
   fc.double({ min: 10, max: 1000, noNaN: true }),
   fc.double({ min: 10, max: 1000, noNaN: true }),
 );
-const place = fc.oneof(fc.constantFrom(0, 50, 100, -100_000), fc.double({ min: -500, max: 500, noNaN: true }));
-const turn = fc.oneof(fc.constantFrom(0, 90, 180, 45, 1e-9), fc.double({ min: -360, max: 360, noNaN: true }));
+const place = fc.oneof(
+  fc.constantFrom(0, 50, 100, -100_000),
+  fc.double({ min: -500, max: 500, noNaN: true }),
+);
+const turn = fc.oneof(
+  fc.constantFrom(0, 90, 180, 45, 1e-9),
+  fc.double({ min: -360, max: 360, noNaN: true }),
+);
 const three = <T>(one: fc.Arbitrary<T>) => fc.tuple(one, one, one);
 
 const seldom = <T>(one: fc.Arbitrary<T>) =>
   fc.oneof({ arbitrary: fc.constant(undefined), weight: 3 }, { arbitrary: one, weight: 1 });
 
 const solid = fc
-  .record({ kind: fc.constantFrom(...kinds), sizes: fc.array(size, { minLength: 3, maxLength: 3 }), at: three(place), turn: three(turn), holds: fc.constantFrom(true, true, false) })
+  .record({
+    kind: fc.constantFrom(...kinds),
+    sizes: fc.array(size, { minLength: 3, maxLength: 3 }),
+    at: three(place),
+    turn: three(turn),
+    holds: fc.constantFrom(true, true, false),
+  })
   .map(({ kind, sizes, at, turn: turned, holds }): Solid => {
     const one = structuredClone(kind.blank('it')) as unknown as Record<string, unknown>;
     kind.sizes(kind.blank('it')).forEach(({ path }, i) => (one[path[0]!] = sizes[i]));
@@ -40,7 +52,11 @@ const tank = fc
   .map(({ solids, pitch, stick, outlet }) =>
     design(
       solids.map((one, i) => ({ ...one, id: `s${i}` })),
-      { attitude: { pitch, roll: 0 }, ...(stick ? { stick: { at: stick } } : {}), ...(outlet ? { outlet } : {}) },
+      {
+        attitude: { pitch, roll: 0 },
+        ...(stick ? { stick: { at: stick } } : {}),
+        ...(outlet ? { outlet } : {}),
+      },
     ),
   );
 
@@ -73,7 +89,9 @@ describe('hostile designs', { timeout: 180_000 }, () => {
 
   it('200 solids are computed and judged in good time', async () => {
     const many = design(
-      Array.from({ length: 200 }, (_, i) => box(`b${i}`, [11, 50, 20 + (i % 7)], { at: [10 * i, 0, i % 3] })),
+      Array.from({ length: 200 }, (_, i) =>
+        box(`b${i}`, [11, 50, 20 + (i % 7)], { at: [10 * i, 0, i % 3] }),
+      ),
     );
     const { capacityL } = await computeTable(many, { stepMm: 1 });
     expect(capacityL).toBeGreaterThan(1.9);

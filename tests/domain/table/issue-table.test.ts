@@ -17,28 +17,51 @@ const settings: TankSettings = {
 };
 
 describe('what may not be issued', () => {
-  it.each(startingPoints.map(({ label, design: tank }) => [label, tank] as const))('not this: %s', async (_, tank) => {
-    expect(await checkIssuable(tank)).toEqual([]);
-  });
+  it.each(startingPoints.map(({ label, design: tank }) => [label, tank] as const))(
+    'not this: %s',
+    async (_, tank) => {
+      expect(await checkIssuable(tank)).toEqual([]);
+    },
+  );
 
   it('a space in pieces, told from one that only looks so', async () => {
     const body = box('body', [900, 500, 300]);
-    const apart = await checkIssuable(design([body, box('b', [100, 100, 100], { at: [1000, 0, 0] })]));
+    const apart = await checkIssuable(
+      design([body, box('b', [100, 100, 100], { at: [1000, 0, 0] })]),
+    );
     expect(apart).toEqual([expect.stringMatching(/^The liquid space is in 2 pieces/)]);
-    expect(await checkIssuable(design([body, box('b', [100, 100, 100], { at: [900, 0, 0] })]))).toEqual([]);
+    expect(
+      await checkIssuable(design([body, box('b', [100, 100, 100], { at: [900, 0, 0] })])),
+    ).toEqual([]);
     // only an edge in common
-    expect(await checkIssuable(design([body, box('b', [100, 100, 100], { at: [900, 500, 0] })]))).toHaveLength(1);
+    expect(
+      await checkIssuable(design([body, box('b', [100, 100, 100], { at: [900, 500, 0] })])),
+    ).toHaveLength(1);
   });
 
   it('a wall, a gap or a film thinner than 0.01 mm, with the place', async () => {
     const body = box('body', [900, 500, 300]);
-    const gap = await checkIssuable(design([body, box('b', [100, 100, 100], { at: [900.004, 0, 0] })]));
-    expect(gap.some((reason) => /What parts the liquid space is thinner than 0.01 mm near x 900, /.test(reason))).toBe(true);
-    const film = design([body, box('pump', [100, 100, 299.995], { role: 'displaces', at: [400, 200, 0] })]);
-    expect(await checkIssuable(film)).toEqual([
-      expect.stringMatching(/^The liquid space is thinner than 0.01 mm near x \d+(\.\d)?, y \d+(\.\d)?, z (300|299.9|300.0)/),
+    const gap = await checkIssuable(
+      design([body, box('b', [100, 100, 100], { at: [900.004, 0, 0] })]),
+    );
+    expect(
+      gap.some((reason) =>
+        /What parts the liquid space is thinner than 0.01 mm near x 900, /.test(reason),
+      ),
+    ).toBe(true);
+    const film = design([
+      body,
+      box('pump', [100, 100, 299.995], { role: 'displaces', at: [400, 200, 0] }),
     ]);
-    const clear = design([body, box('pump', [100, 100, 299.9], { role: 'displaces', at: [400, 200, 0] })]);
+    expect(await checkIssuable(film)).toEqual([
+      expect.stringMatching(
+        /^The liquid space is thinner than 0.01 mm near x \d+(\.\d)?, y \d+(\.\d)?, z (300|299.9|300.0)/,
+      ),
+    ]);
+    const clear = design([
+      body,
+      box('pump', [100, 100, 299.9], { role: 'displaces', at: [400, 200, 0] }),
+    ]);
     expect(await checkIssuable(clear)).toEqual([]);
   });
 
@@ -56,7 +79,10 @@ describe('what may not be issued', () => {
   });
 
   it('is refused with one fault a reason', async () => {
-    const apart = design([box('a', [100, 100, 100]), box('b', [100, 100, 100], { at: [100.005, 0, 0] })]);
+    const apart = design([
+      box('a', [100, 100, 100]),
+      box('b', [100, 100, 100], { at: [100.005, 0, 0] }),
+    ]);
     await expect(issueTable(apart, settings, 10)).rejects.toMatchObject({
       code: 'invalid',
       faults: [{ pointer: '/solids' }, { pointer: '/solids' }],
@@ -65,7 +91,11 @@ describe('what may not be issued', () => {
 });
 
 describe('the ± of a row', () => {
-  const rowAt = async (tank: Parameters<typeof issueTable>[0], depth: number, change: Partial<TankSettings> = {}) => {
+  const rowAt = async (
+    tank: Parameters<typeof issueTable>[0],
+    depth: number,
+    change: Partial<TankSettings> = {},
+  ) => {
     const { rows } = await issueTable(tank, { ...settings, ...change }, 10);
     return rows.find(({ depthMm }) => depthMm === depth)!;
   };
@@ -81,7 +111,10 @@ describe('the ± of a row', () => {
 
   it('is 0.9 L by the dip alone on straight sides of 0.45 L/mm', async () => {
     // the figure for a dipstick read to ± 2 mm on 0.45 L/mm
-    expect((await rowAt(slopedCistern, 150, { sizePlusMinusMm: 0 })).plusMinusL).toBeCloseTo(0.9, 6);
+    expect((await rowAt(slopedCistern, 150, { sizePlusMinusMm: 0 })).plusMinusL).toBeCloseTo(
+      0.9,
+      6,
+    );
   });
 
   it('adds variances as JCGM 100:2008, 5.1.2, has it: 2 ± 0.1 by 2 ± 0.2 by 2 ± 0.3', async () => {

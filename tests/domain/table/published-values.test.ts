@@ -84,7 +84,14 @@ describe('elliptical tank', () => {
   it('of 4 ft by 3 ft, 8 ft long, holds 75.398224 ft³ or 564.0179 US gal (V1.04)', async () => {
     // convertit.com, "Measurement FAQ 6"; its working misprints π, its product does not
     const footMm = 12 * inchMm;
-    const oval: Solid = { id: 'o', role: 'holds', kind: 'oval', length: 8 * footMm, width: 4 * footMm, height: 3 * footMm };
+    const oval: Solid = {
+      id: 'o',
+      role: 'holds',
+      kind: 'oval',
+      length: 8 * footMm,
+      width: 4 * footMm,
+      height: 3 * footMm,
+    };
     const { capacityL, heightMm } = await computeTable(design([oval]), { stepMm: 100 });
     expect(capacityL / (footMm / 100) ** 3).toBeCloseTo(75.398224, 6);
     expect(capacityL / usGallonL).toBeCloseTo(564.0179, 4);
@@ -93,7 +100,14 @@ describe('elliptical tank', () => {
 
   it('of 1.78 by 1.20 by 2.45 m, level (V3.17 to V3.19, V3.25 to V3.31: own integration of open data)', async () => {
     // CUMCM 2010, problem A: the geometric litres of the level tank
-    const oval: Solid = { id: 'o', role: 'holds', kind: 'oval', length: 2450, width: 1780, height: 1200 };
+    const oval: Solid = {
+      id: 'o',
+      role: 'holds',
+      kind: 'oval',
+      length: 2450,
+      width: 1780,
+      height: 1200,
+    };
     const expected: readonly (readonly [number, number])[] = [
       [159.02, 322.883],
       [200, 450.271],
@@ -104,12 +118,21 @@ describe('elliptical tank', () => {
       [1200, 4110.146],
     ];
     const { rows } = await computeTable(design([oval]), { atMm: expected.map(([depth]) => depth) });
-    rows.forEach(({ volumeL }, i) => expect(Math.abs(volumeL - expected[i]![1])).toBeLessThan(0.001));
+    rows.forEach(({ volumeL }, i) =>
+      expect(Math.abs(volumeL - expected[i]![1])).toBeLessThan(0.001),
+    );
   });
 
   it('the same tilted 4.1°, probe 0.4 m from the low end (V3.24 to V3.31)', async () => {
     // the low end is x = 0: a negative pitch; the probe stands square to the axis
-    const oval: Solid = { id: 'o', role: 'holds', kind: 'oval', length: 2450, width: 1780, height: 1200 };
+    const oval: Solid = {
+      id: 'o',
+      role: 'holds',
+      kind: 'oval',
+      length: 2450,
+      width: 1780,
+      height: 1200,
+    };
     const tank = design([oval], { attitude: { pitch: -4.1, roll: 0 }, stick: { at: [400, 890] } });
     const expected: readonly (readonly [number, number])[] = [
       [0, 1.674],
@@ -122,7 +145,9 @@ describe('elliptical tank', () => {
       [1200, 4012.745],
     ];
     const { rows } = await computeTable(tank, { atMm: expected.map(([depth]) => depth) });
-    rows.forEach(({ volumeL }, i) => expect(Math.abs(volumeL - expected[i]![1])).toBeLessThan(0.001));
+    rows.forEach(({ volumeL }, i) =>
+      expect(Math.abs(volumeL - expected[i]![1])).toBeLessThan(0.001),
+    );
   });
 });
 
@@ -139,10 +164,28 @@ describe('ball', () => {
 
   it.each<[string, Solid, number]>([
     ['sphere', { id: 's', role: 'holds', kind: 'sphere', diameter: 1200 }, 1200],
-    ['ellipsoid', { id: 'e', role: 'holds', kind: 'ellipsoid', length: 1500, width: 900, height: 600 }, 600],
-    ['turned ellipsoid', { id: 'e', role: 'holds', kind: 'ellipsoid', length: 1500, width: 900, height: 600, turn: [0, 90, 30] }, 1500],
+    [
+      'ellipsoid',
+      { id: 'e', role: 'holds', kind: 'ellipsoid', length: 1500, width: 900, height: 600 },
+      600,
+    ],
+    [
+      'turned ellipsoid',
+      {
+        id: 'e',
+        role: 'holds',
+        kind: 'ellipsoid',
+        length: 1500,
+        width: 900,
+        height: 600,
+        turn: [0, 90, 30],
+      },
+      1500,
+    ],
   ])('gives the fractions of a %s (V1.05)', async (_, solid, heightMm) => {
-    const table = await computeTable(design([solid]), { atMm: fractions.map(([share]) => share * heightMm) });
+    const table = await computeTable(design([solid]), {
+      atMm: fractions.map(([share]) => share * heightMm),
+    });
     expect(table.heightMm).toBeCloseTo(heightMm, 9);
     table.rows.forEach(({ volumeL }, i) => {
       const gap = Math.abs(volumeL / table.capacityL - fractions[i]![1]);
@@ -153,7 +196,10 @@ describe('ball', () => {
 
   it('of radius 6 cm holds 837.76 cm³ at 10 cm and 670.21 at 8 (V3.04)', async () => {
     // algebra.com, question 1189056
-    const { rows } = await computeTable(design([{ id: 's', role: 'holds', kind: 'sphere', diameter: 120 }]), { atMm: [80, 100] });
+    const { rows } = await computeTable(
+      design([{ id: 's', role: 'holds', kind: 'sphere', diameter: 120 }]),
+      { atMm: [80, 100] },
+    );
     expect(Math.abs(rows[0]!.volumeL * 1000 - 670.21)).toBeLessThan(0.005);
     expect(Math.abs(rows[1]!.volumeL * 1000 - 837.76)).toBeLessThan(0.005);
   });
@@ -162,7 +208,14 @@ describe('ball', () => {
 describe('cone', () => {
   it('frustum 24 high with radii 21 and 14 cm holds 23 398.58 cm³ (V3.03, with exact π)', async () => {
     // NCERT-style exercise, esaral.com q.97245, prints 23 408 with π = 22/7
-    const bucket: Solid = { id: 'b', role: 'holds', kind: 'cone', start: 280, end: 420, length: 240 };
+    const bucket: Solid = {
+      id: 'b',
+      role: 'holds',
+      kind: 'cone',
+      start: 280,
+      end: 420,
+      length: 240,
+    };
     const { capacityL } = await computeTable(design([bucket]), { stepMm: 100 });
     expect(capacityL * 1000).toBeCloseTo(23_398.58, 2);
     expect((capacityL * 1000 * (22 / 7)) / Math.PI).toBeCloseTo(23_408, 0);
@@ -170,7 +223,14 @@ describe('cone', () => {
 
   it('apex down, 4 m by 12 m, holds π·125/27 m³ at 5 m (V3.06, corrected: the page prints it wrong)', async () => {
     // jiskha.com q.22584 gives 161.16; the closed form is 14.5444
-    const funnel: Solid = { id: 'f', role: 'holds', kind: 'cone', start: 0, end: 8000, length: 12_000 };
+    const funnel: Solid = {
+      id: 'f',
+      role: 'holds',
+      kind: 'cone',
+      start: 0,
+      end: 8000,
+      length: 12_000,
+    };
     const { rows, capacityL } = await computeTable(design([funnel]), { atMm: [5000] });
     expect(rows[0]!.volumeL / 1000).toBeCloseTo((Math.PI * 125) / 27, 6);
     expect(capacityL / 1000).toBeCloseTo(201.062, 3);
@@ -180,7 +240,17 @@ describe('cone', () => {
     // worked outside the project: frustum and cylinder that share a face
     const hopper = design([
       cylinder('s1', 1800, 1500, { axis: 'x', at: [-750, -900, 750], turn: [0, -90, 0] }),
-      { id: 's2', role: 'holds', kind: 'cone', start: 300, end: 1800, length: 900, axis: 'x', at: [-450, -900, -450], turn: [0, -90, 0] },
+      {
+        id: 's2',
+        role: 'holds',
+        kind: 'cone',
+        start: 300,
+        end: 1800,
+        length: 900,
+        axis: 'x',
+        at: [-450, -900, -450],
+        turn: [0, -90, 0],
+      },
     ]);
     const expected: readonly (readonly [number, number])[] = [
       [72, 7.396565743611809],

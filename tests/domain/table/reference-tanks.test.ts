@@ -26,7 +26,9 @@ describe('reference tanks, within 1e-7 of capacity', () => {
     const table = await computeTable(tank, { atMm: expected.map(([depth]) => depth) });
     expect(table.heightMm).toBe(1900);
     expect(Math.abs(table.capacityL / capacityL - 1)).toBeLessThan(1e-9);
-    const worst = Math.max(...table.rows.map(({ volumeL }, i) => Math.abs(volumeL - expected[i]![1])));
+    const worst = Math.max(
+      ...table.rows.map(({ volumeL }, i) => Math.abs(volumeL - expected[i]![1])),
+    );
     expect(worst / capacityL).toBeLessThan(1e-7);
     // the printed bound covers the true error
     expect(worst).toBeLessThan(table.errorL);
@@ -43,9 +45,12 @@ describe('reference tanks, within 1e-7 of capacity', () => {
       [717.7131068010287, 997.5325796779318],
       [830.126003046973, 1064.7545350168373],
     ];
-    const tank = design([box('s1', [1830, 910, 640], { at: [-910, -449, -313], turn: [0, 0, 15] })], {
-      attitude: { pitch: -5.967369192703691, roll: 2.995896099163017 },
-    });
+    const tank = design(
+      [box('s1', [1830, 910, 640], { at: [-910, -449, -313], turn: [0, 0, 15] })],
+      {
+        attitude: { pitch: -5.967369192703691, roll: 2.995896099163017 },
+      },
+    );
     const table = await computeTable(tank, { atMm: expected.map(([depth]) => depth) });
     expect(table.heightMm).toBeCloseTo(864.7145865072636, 9);
     expect(table.capacityL).toBeCloseTo(1065.792, 9);

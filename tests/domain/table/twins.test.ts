@@ -11,9 +11,15 @@ const count = 150_000;
  * in a solid that holds, in none that displaces, and below the surface. It shares no code with the engine: no
  * mesh, no sweep, no frame of its own.
  */
-function litresByPoints(tank: TankDocument, levels: readonly number[]): { litres: number[]; boxL: number } {
+function litresByPoints(
+  tank: TankDocument,
+  levels: readonly number[],
+): { litres: number[]; boxL: number } {
   const up = upVectorByHand(tank);
-  const [low, high] = [[1e9, 1e9, 1e9], [-1e9, -1e9, -1e9]];
+  const [low, high] = [
+    [1e9, 1e9, 1e9],
+    [-1e9, -1e9, -1e9],
+  ];
   for (const solid of tank.solids.filter(({ role }) => role === 'holds')) {
     const centre = centreOf(solid);
     const reach = Math.hypot(...sizeOf(solid)) / 2;
@@ -22,7 +28,10 @@ function litresByPoints(tank: TankDocument, levels: readonly number[]): { litres
       high[axis] = Math.max(high[axis]!, value + reach);
     });
   }
-  const tests = tank.solids.map((solid) => ({ holds: solid.role === 'holds', inside: membership(solid) }));
+  const tests = tank.solids.map((solid) => ({
+    holds: solid.role === 'holds',
+    inside: membership(solid),
+  }));
   // a rank-1 lattice (generalised golden ratio, R. Roberts 2018, from memory): evener than random points
   const step = [0.8191725133961645, 0.6710436067037893, 0.5497004779019703];
   const inside = levels.map(() => 0);
@@ -75,7 +84,8 @@ function membership(solid: Solid): (p: readonly number[]) => boolean {
     [x, y] = [x * cz + y * sz, -x * sz + y * cz];
     [z, x] = [z * cy + x * sy, -z * sy + x * cy];
     [y, z] = [y * cx + z * sx, -y * sx + z * cx];
-    if (Math.abs(x) > size[0]! / 2 || Math.abs(y) > size[1]! / 2 || Math.abs(z) > size[2]! / 2) return false;
+    if (Math.abs(x) > size[0]! / 2 || Math.abs(y) > size[1]! / 2 || Math.abs(z) > size[2]! / 2)
+      return false;
     if (solid.kind === 'wedge') return z / size[2]! + x / size[0]! <= 0;
     if (solid.kind === 'cylinder') {
       const axis = 'xyz'.indexOf(solid.axis ?? 'x');
@@ -104,13 +114,21 @@ function randomTank(seed: number): TankDocument {
       id: `s${i}`,
       role: i === 0 || random(0, 1) < 0.6 ? ('holds' as const) : ('displaces' as const),
       at: [random(-300, 200), random(-200, 150), random(-150, 150)] as [number, number, number],
-      turn: (random(0, 1) < 0.5 ? [0, 0, 0] : [random(-180, 180), random(-180, 180), random(-180, 180)]) as [number, number, number],
+      turn: (random(0, 1) < 0.5
+        ? [0, 0, 0]
+        : [random(-180, 180), random(-180, 180), random(-180, 180)]) as [number, number, number],
     };
     const [length, width, height] = [random(200, 700), random(150, 500), random(100, 400)];
     const which = random(0, 3);
     if (which < 1) return { ...fields, kind: 'box', length, width, height };
     if (which < 2) return { ...fields, kind: 'wedge', length, width, height };
-    return { ...fields, kind: 'cylinder', diameter: width, length, axis: (['x', 'y', 'z'] as const)[Math.floor(random(0, 3))]! };
+    return {
+      ...fields,
+      kind: 'cylinder',
+      diameter: width,
+      length,
+      axis: (['x', 'y', 'z'] as const)[Math.floor(random(0, 3))]!,
+    };
   });
   return design(solids, { attitude: { pitch: random(-30, 30), roll: random(-30, 30) } });
 }
@@ -125,7 +143,10 @@ describe('random unions and cut-outs at random attitudes', { timeout: 90_000 }, 
     const zero = upVectorByHand(tank).reduce((sum, part, axis) => sum + part * lowest[axis]!, 0);
     const atMm = [0.2, 0.45, 0.7, 1].map((share) => share * heightMm);
     const { rows } = await computeTable(tank, { atMm });
-    const { litres, boxL } = litresByPoints(tank, atMm.map((reading) => zero + reading));
+    const { litres, boxL } = litresByPoints(
+      tank,
+      atMm.map((reading) => zero + reading),
+    );
     // three times the spread that as many random points would have
     const tolerance = 3 * Math.sqrt(boxL / (capacityL * count));
     expect(tolerance).toBeLessThan(0.05);

@@ -13,7 +13,10 @@ describe('the published JSON Schema', () => {
       additionalProperties: boolean;
       required: string[];
       properties: {
-        solids: { maxItems: number; items: { anyOf: { properties: { kind: { const: string } } }[] } };
+        solids: {
+          maxItems: number;
+          items: { anyOf: { properties: { kind: { const: string } } }[] };
+        };
         outlet: { prefixItems: unknown[]; minItems: number; items: boolean };
       };
     };
@@ -21,7 +24,9 @@ describe('the published JSON Schema', () => {
     expect(schema.required).toEqual(['format', 'version', 'name', 'solids']);
     const { solids, outlet } = schema.properties;
     expect(solids.maxItems).toBe(200);
-    expect(solids.items.anyOf.map(({ properties }) => properties.kind.const)).toEqual(kinds.map(({ kind }) => kind));
+    expect(solids.items.anyOf.map(({ properties }) => properties.kind.const)).toEqual(
+      kinds.map(({ kind }) => kind),
+    );
     expect(outlet).toMatchObject({ minItems: 3, items: false });
   });
 });

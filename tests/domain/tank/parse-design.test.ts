@@ -24,22 +24,74 @@ describe('parseDesign', () => {
   });
 
   it.each([
-    [withBody({ height: -1 }), '/solids/0/height', 'Solid "body", height: a length is more than 0 mm.'],
-    [withBody({ height: 100_001 }), '/solids/0/height', 'Solid "body", height: a length is at most 100 000 mm.'],
-    [withBody({ height: '300' }), '/solids/0/height', 'Solid "body", height: give a length in millimetres.'],
-    [withBody({ height: Infinity }), '/solids/0/height', 'Solid "body", height: give a length in millimetres.'],
-    [withBody({ height: undefined }), '/solids/0/height', 'Solid "body", height: this field is missing.'],
-    [withBody({ hight: 1 }), '/solids/0/hight', 'Solid "body", hight: there is no such field here.'],
-    [withBody({ 'a/b~c': 1 }), '/solids/0/a~1b~0c', 'Solid "body", a/b~c: there is no such field here.'],
-    [withBody({ at: [0, 0, 1e6] }), '/solids/0/at/2', 'Solid "body", at, number 3: a place lies within ± 100 000 mm.'],
-    [withBody({ role: 'contains' }), '/solids/0/role', 'Solid "body", role: the role is "holds" or "displaces".'],
+    [
+      withBody({ height: -1 }),
+      '/solids/0/height',
+      'Solid "body", height: a length is more than 0 mm.',
+    ],
+    [
+      withBody({ height: 100_001 }),
+      '/solids/0/height',
+      'Solid "body", height: a length is at most 100 000 mm.',
+    ],
+    [
+      withBody({ height: '300' }),
+      '/solids/0/height',
+      'Solid "body", height: give a length in millimetres.',
+    ],
+    [
+      withBody({ height: Infinity }),
+      '/solids/0/height',
+      'Solid "body", height: give a length in millimetres.',
+    ],
+    [
+      withBody({ height: undefined }),
+      '/solids/0/height',
+      'Solid "body", height: this field is missing.',
+    ],
+    [
+      withBody({ hight: 1 }),
+      '/solids/0/hight',
+      'Solid "body", hight: there is no such field here.',
+    ],
+    [
+      withBody({ 'a/b~c': 1 }),
+      '/solids/0/a~1b~0c',
+      'Solid "body", a/b~c: there is no such field here.',
+    ],
+    [
+      withBody({ at: [0, 0, 1e6] }),
+      '/solids/0/at/2',
+      'Solid "body", at, number 3: a place lies within ± 100 000 mm.',
+    ],
+    [
+      withBody({ role: 'contains' }),
+      '/solids/0/role',
+      'Solid "body", role: the role is "holds" or "displaces".',
+    ],
     [withBody({ id: '' }), '/solids/0/id', 'Solid 1, id: an id has at least one character.'],
-    [withBody({ edges: { z: 20 } }), '/solids/0/edges/z', /^Solid "body", edges, z: rounded edges of a box are not computed yet/],
-    [{ ...slopedCistern, solids: [body, body] }, '/solids/1/id', /^Solid "body", id: two solids have the id "body"/],
+    [
+      withBody({ edges: { z: 20 } }),
+      '/solids/0/edges/z',
+      /^Solid "body", edges, z: rounded edges of a box are not computed yet/,
+    ],
+    [
+      { ...slopedCistern, solids: [body, body] },
+      '/solids/1/id',
+      /^Solid "body", id: two solids have the id "body"/,
+    ],
     [{ ...slopedCistern, solids: [] }, '/solids', 'Solids: a tank needs at least one solid.'],
-    [{ ...slopedCistern, attitude: { pitch: 61, roll: 0 } }, '/attitude/pitch', 'Attitude, pitch: a slope lies within ± 60°.'],
+    [
+      { ...slopedCistern, attitude: { pitch: 61, roll: 0 } },
+      '/attitude/pitch',
+      'Attitude, pitch: a slope lies within ± 60°.',
+    ],
     [{ ...slopedCistern, version: 2 }, '/version', 'Version: the version is 1.'],
-    [{ ...slopedCistern, stick: { at: [1, 2], zero: 'low' } }, '/stick/zero', 'Stick, zero: give a number.'],
+    [
+      { ...slopedCistern, stick: { at: [1, 2], zero: 'low' } },
+      '/stick/zero',
+      'Stick, zero: give a number.',
+    ],
     [null, '', /^A design is a JSON object/],
     [[], '', /^A design is a JSON object/],
   ])('refuses, naming solid and field: case %#', (value, pointer, sentence) => {

@@ -21,21 +21,28 @@ describe('the compute pool', { timeout: 60_000 }, () => {
     let turns = 0;
     const timer = setInterval(() => (turns += 1), 1);
     const many = design(
-      Array.from({ length: 6 }, (_, i) => cylinder(`c${i}`, 300, 900, { axis: 'z', at: [200 * i, 0, 0] })),
+      Array.from({ length: 6 }, (_, i) =>
+        cylinder(`c${i}`, 300, 900, { axis: 'z', at: [200 * i, 0, 0] }),
+      ),
     );
     const [table] = await Promise.all([
       pool.table(slopedCistern, { atMm: [30, 60, 150, 300] }),
       pool.table(many, { stepMm: 1 }),
     ]);
     clearInterval(timer);
-    expect(table.rows.map(({ volumeL }) => Math.round(volumeL * 1e9) / 1e9)).toEqual([4.5, 15, 55.5, 123]);
+    expect(table.rows.map(({ volumeL }) => Math.round(volumeL * 1e9) / 1e9)).toEqual([
+      4.5, 15, 55.5, 123,
+    ]);
     expect(turns).toBeGreaterThan(3);
   });
 
   it('issues, and refuses as data that keeps code and pointers', async () => {
     const { rows } = await pool.issue(slopedCistern, settings, 50);
     expect(rows).toHaveLength(7);
-    const apart = design([box('a', [100, 100, 100]), box('b', [100, 100, 100], { at: [300, 0, 0] })]);
+    const apart = design([
+      box('a', [100, 100, 100]),
+      box('b', [100, 100, 100], { at: [300, 0, 0] }),
+    ]);
     await expect(pool.issue(apart, settings, 50)).rejects.toMatchObject({
       name: 'DipwrightError',
       code: 'invalid',
@@ -55,6 +62,8 @@ describe('the compute pool', { timeout: 60_000 }, () => {
     const { rows } = await hasty.issue(slopedCistern, settings, 100);
     expect(rows).toHaveLength(4);
     await hasty.close();
-    await expect(hasty.table(slopedCistern, { stepMm: 1 })).rejects.toMatchObject({ code: 'unavailable' });
+    await expect(hasty.table(slopedCistern, { stepMm: 1 })).rejects.toMatchObject({
+      code: 'unavailable',
+    });
   });
 });

@@ -2,7 +2,10 @@ import { z } from 'zod/v4';
 import { length, solidFields } from '../../solid';
 
 /** Rectangular box. Rounded edges are not computed yet: `edges` may be left out or all 0. */
-const edge = z.literal(0, 'Rounded edges of a box are not computed yet: leave edges out or give 0.');
+const edge = z.literal(
+  0,
+  'Rounded edges of a box are not computed yet: leave edges out or give 0.',
+);
 
 export const boxSchema = z.strictObject({
   ...solidFields,

@@ -34,7 +34,9 @@ export const cone: Kind<Cone> = {
       [0, half],
     ];
     // at a tip two of them are one
-    const profile = points.filter(([r, z], i) => !points.some(([r2, z2], j) => j < i && r === r2 && z === z2));
+    const profile = points.filter(
+      ([r, z], i) => !points.some(([r2, z2], j) => j < i && r === r2 && z === z2),
+    );
     const phase = facetPhase(axis, tank.x, tank.z);
     return { form: 'revolution', axis, profile, facets, phase, stretch: [1, 1, 1] };
   },
@@ -46,15 +48,28 @@ export const cone: Kind<Cone> = {
   },
   chords(solid, line, slack) {
     const { start, end, length } = solid;
-    const chord = lineInFrustum(line, { axis: axisOf(solid), start: start / 2, end: end / 2, length }, slack);
+    const chord = lineInFrustum(
+      line,
+      { axis: axisOf(solid), start: start / 2, end: end / 2, length },
+      slack,
+    );
     return chord ? [chord] : [];
   },
-  volume: ({ start, end, length }) => (Math.PI * length * (start * start + start * end + end * end)) / 12,
+  volume: ({ start, end, length }) =>
+    (Math.PI * length * (start * start + start * end + end * end)) / 12,
   faults: ({ start, end }) =>
     start === 0 && end === 0
       ? [{ path: ['end'], detail: 'at least one of the two diameters is more than 0 mm.' }]
       : [],
-  blank: (id) => ({ id, role: 'holds', kind: 'cone', start: 200, end: 600, length: 400, axis: 'z' }),
+  blank: (id) => ({
+    id,
+    role: 'holds',
+    kind: 'cone',
+    start: 200,
+    end: 600,
+    length: 400,
+    axis: 'z',
+  }),
 };
 
 function axisOf(solid: Cone): Axis {

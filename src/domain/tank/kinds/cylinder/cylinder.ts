@@ -44,5 +44,9 @@ function axisOf(solid: Cylinder): Axis {
 }
 
 function alongAxis(axis: Axis, across: number, along: number): Vec3 {
-  return [axis === 'x' ? along : across, axis === 'y' ? along : across, axis === 'z' ? along : across];
+  return [
+    axis === 'x' ? along : across,
+    axis === 'y' ? along : across,
+    axis === 'z' ? along : across,
+  ];
 }

@@ -27,7 +27,12 @@ export const oval: Kind<Oval> = {
     // the direction met on the ellipse is that of the circle before it was stretched
     const phase = facetPhase(axis, tank.x, tank.z);
     const onCircle = Math.atan2(Math.sin(phase) / b, Math.cos(phase) / a);
-    return { form: 'extrusion', axis, outline: ellipseOutline(a, b, facets, onCircle), length: solid.length };
+    return {
+      form: 'extrusion',
+      axis,
+      outline: ellipseOutline(a, b, facets, onCircle),
+      length: solid.length,
+    };
   },
   support(solid, up) {
     const [first, second, third] = axisOrder(axisOf(solid));
@@ -35,12 +40,24 @@ export const oval: Kind<Oval> = {
     return Math.hypot(a * up[first]!, b * up[second]!) + (Math.abs(up[third]!) * solid.length) / 2;
   },
   chords(solid, line, slack) {
-    const chord = lineInBarrel(line, { axis: axisOf(solid), half: halves(solid), length: solid.length }, slack);
+    const chord = lineInBarrel(
+      line,
+      { axis: axisOf(solid), half: halves(solid), length: solid.length },
+      slack,
+    );
     return chord ? [chord] : [];
   },
   volume: ({ length, width, height }) => (Math.PI * length * width * height) / 4,
   faults: () => [],
-  blank: (id) => ({ id, role: 'holds', kind: 'oval', length: 800, width: 500, height: 350, axis: 'x' }),
+  blank: (id) => ({
+    id,
+    role: 'holds',
+    kind: 'oval',
+    length: 800,
+    width: 500,
+    height: 350,
+    axis: 'x',
+  }),
 };
 
 function axisOf(solid: Oval): 'x' | 'y' {
