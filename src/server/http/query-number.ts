@@ -4,7 +4,7 @@ import { z } from 'zod/v4';
 export function queryNumber(sentence: string) {
   return z
     .string(sentence)
-    .regex(/^-?\d{1,15}(\.\d{1,20})?$/, sentence)
+    .regex(/^-?\d{1,15}(\.\d{1,20})?$/, { error: sentence, abort: true })
     .transform(Number)
     .pipe(z.number());
 }

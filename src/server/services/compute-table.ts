@@ -1,4 +1,5 @@
 import type { z } from 'zod/v4';
+import { DipwrightError } from '~/domain/errors';
 import type { computeRequest, ComputedTable } from '~/domain/table/request';
 import type { Actor, Context } from '../context';
 
@@ -10,5 +11,21 @@ export async function computeTable(
 ): Promise<ComputedTable> {
   const { design, stepMm, atMm } = input;
   const readings = stepMm === undefined ? { atMm: atMm ?? [] } : { stepMm };
-  return context.computePool.table(design, readings);
+  try {
+    return await context.computePool.table(design, readings);
+  } catch (error) {
+    throw error instanceof DipwrightError ? pointingIntoRequest(error) : error;
+  }
+}
+
+/** The engine points into the design; what was sent holds the design in a field of its own. */
+function pointingIntoRequest({ code, message, faults, facts, cause }: DipwrightError) {
+  return new DipwrightError(code, message, {
+    faults: faults.map(({ pointer, detail }) => ({
+      pointer: /^\/(stepMm|atMm)(\/|$)/.test(pointer) ? pointer : `/design${pointer}`,
+      detail,
+    })),
+    facts,
+    cause,
+  });
 }

@@ -56,7 +56,7 @@ const boxTriangles = [
 function boxOf(design: TankDocument) {
   const [solid, another] = design.solids;
   if (solid?.kind !== 'box' || another !== undefined) {
-    throw invalid('/design/solids', 'This test pool computes one box only.');
+    throw invalid('/solids', 'This test pool computes one box only.');
   }
   const { length, width, height } = solid;
   return { length, width, height, areaMm2: length * width, heightMm: height };

@@ -16,6 +16,8 @@ const readingQuery = z
     ullageMm: queryNumber('Give ullageMm in millimetres, such as 150 or 150.5.').optional(),
   })
   .superRefine(({ depthMm, ullageMm }, context) => {
+    // a faulty one of the two is told already, and left out of what is seen here
+    if (context.issues.length > 0) return;
     if ((depthMm === undefined) === (ullageMm === undefined)) {
       const message =
         'Give either depthMm (up from the zero) or ullageMm (down from the top of the stick).';
