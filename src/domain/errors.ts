@@ -50,10 +50,12 @@ export class DipwrightError extends Error {
   }
 }
 
+/** `what`: the noun of what was asked for. The same words whether it is not there or of another workshop. */
 export function notFound(what: string): DipwrightError {
   return new DipwrightError('not-found', `There is no such ${what}, or it is not yours to see.`);
 }
 
+/** One field at fault: `pointer` leads to it, `detail` says what would be right and is the message too. */
 export function invalid(pointer: string, detail: string): DipwrightError {
   return new DipwrightError('invalid', detail, { faults: [{ pointer, detail }] });
 }

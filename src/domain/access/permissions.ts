@@ -26,6 +26,7 @@ export const permissions = {
 
 export type Permission = keyof typeof permissions;
 
+/** Whether the role holds the permission. */
 export function may(role: Role, permission: Permission): boolean {
   return (permissions[permission] as readonly Role[]).includes(role);
 }

@@ -27,6 +27,7 @@ export interface ChartLevels {
   largestPlusMinusL: number;
 }
 
+/** The levels of one frozen revision, from its issued rows. A reading outside its range throws `invalid`. */
 export function chartLevels(input: ChartInput): ChartLevels {
   const { settings, capacityL, heightMm } = input;
   const table: DipTable = {
