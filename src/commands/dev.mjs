@@ -39,7 +39,12 @@ await runCommand(async () => {
       ],
       {
         cwd: checkout,
-        env: { ...process.env, ASTRO_TELEMETRY_DISABLED: '1', ...settings },
+        env: {
+          ...process.env,
+          ASTRO_TELEMETRY_DISABLED: '1',
+          ASTRO_DISABLE_UPDATE_CHECK: 'true',
+          ...settings,
+        },
         stdio: ['ignore', 'inherit', 'inherit'],
       },
     );
