@@ -1,6 +1,13 @@
-import { answerAt, safeFillL, safeFillMm, type DipTable } from '~/domain/table/answer-at';
+import {
+  answerAt,
+  densityOf,
+  safeFillL,
+  safeFillMm,
+  type DipTable,
+} from '~/domain/table/answer-at';
 import { liquids } from '~/domain/liquid/liquids';
 import { formatLength, formatLengthWithUnit } from '~/domain/units/format-length';
+import { formatMass } from '~/domain/units/format-mass';
 import { formatPlusMinus, formatVolume } from '~/domain/units/format-volume';
 import type { LengthUnit } from '~/domain/units/length-unit';
 import { volumeUnitSigns, type VolumeUnit } from '~/domain/units/volume-unit';
@@ -23,6 +30,10 @@ export function Answer({ table, depthMm, onDepth, stands, length, volume }: Answ
   const waste = liquids[table.settings.liquid].watch === 'high';
   const sign = volumeUnitSigns[volume];
   const written = (litres: number) => formatVolume(litres, volume, answer.plusMinusL);
+  const kilograms = formatMass(
+    answer.massKg,
+    (answer.plusMinusL * densityOf(table.settings)) / 1000,
+  );
   const top = safeFillMm(table);
   const parse = (text: string) => {
     const parsed = parseHeight(length)(text);
@@ -59,8 +70,8 @@ export function Answer({ table, depthMm, onDepth, stands, length, volume }: Answ
         <p className="text-lead">
           {waste
             ? `${written(answer.volumeL)} ${sign} in the tank`
-            : `${written(answer.roomL)} ${sign} room`}{' '}
-          · {Math.round(answer.massKg)} kg
+            : `${written(answer.roomL)} ${sign} room to safe fill`}{' '}
+          · {kilograms} kg
         </p>
         {answer.aboveSafeFillL > 0 && (
           <p className="fault mt-1">

@@ -12,7 +12,11 @@ interface ConflictProps {
 /** Two people on one tank: the second save is told who changed what and offered both. */
 export function Conflict({ conflict, mine, onTakeTheirs, onKeepMine }: ConflictProps) {
   const heading = useRef<HTMLHeadingElement>(null);
-  useEffect(() => heading.current?.focus(), []);
+  useEffect(() => {
+    heading.current?.focus();
+    // what was chosen goes away with its button: undo is what may be wanted next
+    return () => void setTimeout(focusUndo);
+  }, []);
   const at = new Date(conflict.at).toLocaleTimeString('en-GB', {
     hour: '2-digit',
     minute: '2-digit',
@@ -39,6 +43,10 @@ export function Conflict({ conflict, mine, onTakeTheirs, onKeepMine }: ConflictP
       </p>
     </section>
   );
+}
+
+function focusUndo(): void {
+  document.getElementById('bench-actions')?.querySelector('button')?.focus();
 }
 
 /** The solids and settings in which two drafts differ, one plain line each. */

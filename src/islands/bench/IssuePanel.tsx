@@ -10,12 +10,14 @@ import { asProblem } from '../shared/problem';
 interface IssuePanelProps {
   tankId: string;
   letter: string;
+  /** Why the server does not have all that is shown yet; null when it has. */
+  waitsFor: string | null;
   onIssued(letter: string): void;
   onClose(): void;
 }
 
 /** Issues the draft as the next revision: asks for the step and a note, tells reasons against it. */
-export function IssuePanel({ tankId, letter, onIssued, onClose }: IssuePanelProps) {
+export function IssuePanel({ tankId, letter, waitsFor, onIssued, onClose }: IssuePanelProps) {
   const heading = useRef<HTMLHeadingElement>(null);
   useEffect(() => heading.current?.focus(), []);
   const form = useForm<z.input<typeof newRevision>, unknown, NewRevision>({
@@ -71,7 +73,7 @@ export function IssuePanel({ tankId, letter, onIssued, onClose }: IssuePanelProp
           {errors.note && <span className="fault block">{errors.note.message}</span>}
         </label>
         <div className="flex gap-3 self-end">
-          <button type="submit" className="act" disabled={issue.isPending}>
+          <button type="submit" className="act" disabled={issue.isPending || waitsFor !== null}>
             {issue.isPending ? 'Computing the table …' : `Issue ${letter}`}
           </button>
           <button type="button" className="act-plain" onClick={onClose}>
@@ -79,7 +81,12 @@ export function IssuePanel({ tankId, letter, onIssued, onClose }: IssuePanelProp
           </button>
         </div>
       </form>
-      {problem && (
+      {waitsFor !== null && !issue.isPending && (
+        <p role="status" className="fault mt-3">
+          What is saved is what gets issued. {waitsFor}
+        </p>
+      )}
+      {problem && waitsFor === null && Object.keys(errors).length === 0 && (
         <div role="alert" className="mt-3">
           <p className="fault">{problem.message}</p>
           {reasons && reasons.length > 0 && (

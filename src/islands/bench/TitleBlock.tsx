@@ -1,14 +1,20 @@
 import { useId, type Dispatch, type ReactNode } from 'react';
 import type { FieldFault } from '~/domain/errors';
 import { liquidCodes, liquids, type LiquidCode } from '~/domain/liquid/liquids';
-import { safeFillL, safeFillMm, unusableL, type DipTable } from '~/domain/table/answer-at';
+import {
+  plusMinusAt,
+  safeFillL,
+  safeFillMm,
+  unusableL,
+  type DipTable,
+} from '~/domain/table/answer-at';
 import type { TankDocument } from '~/domain/tank/document';
 import { sizePlusMinusByMeans, type TankSettings } from '~/domain/tank/settings';
 import type { TankChange } from '~/domain/tank/tank';
 import { formatLength, formatLengthWithUnit } from '~/domain/units/format-length';
-import { formatVolume, formatVolumeWithPlusMinus } from '~/domain/units/format-volume';
+import { formatVolumeWithPlusMinus } from '~/domain/units/format-volume';
 import type { LengthUnit } from '~/domain/units/length-unit';
-import { volumeUnitSigns, type VolumeUnit } from '~/domain/units/volume-unit';
+import type { VolumeUnit } from '~/domain/units/volume-unit';
 import { setAttitude, setStick } from '~/scene/commands';
 import type { SceneAction } from '~/scene/scene';
 import { parseBetween, parseHeight, parsePlace, parseSize } from './parse-typed';
@@ -34,8 +40,6 @@ export function TitleBlock(props: TitleBlockProps) {
   const { document, dispatch, settings, onSettings, table, length, volume } = props;
   const format = (mm: number) => formatLength(mm, length);
   const brimPlusMinus = table ? (table.plusMinusL[table.plusMinusL.length - 1] ?? 0) : 0;
-  const written = (litres: number) =>
-    `${formatVolume(litres, volume, brimPlusMinus)} ${volumeUnitSigns[volume]}`;
   const safeMm = table ? safeFillMm(table) : null;
   const fault = (key: keyof TankSettings) =>
     props.settingsFaults.find(({ pointer }) => pointer === `/${key}`)?.detail;
@@ -90,7 +94,11 @@ export function TitleBlock(props: TitleBlockProps) {
         />
         {table && (
           <p className="font-semibold">
-            {written(safeFillL(table))}
+            {formatVolumeWithPlusMinus(
+              safeFillL(table),
+              volume,
+              (brimPlusMinus * settings.safeFillPercent) / 100,
+            )}
             {safeMm !== null &&
               ` at ${formatLengthWithUnit(safeMm, length, length === 'mm' ? 0 : 1)}`}
           </p>
@@ -113,7 +121,7 @@ export function TitleBlock(props: TitleBlockProps) {
           <p className="font-semibold">
             {settings.outletMm === null
               ? 'all counted usable'
-              : `${written(unusableL(table))} unusable`}
+              : `${formatVolumeWithPlusMinus(unusableL(table), volume, plusMinusAt(table, Math.min(settings.outletMm, table.heightMm)))} unusable`}
           </p>
         )}
       </Cell>
@@ -175,6 +183,7 @@ export function TitleBlock(props: TitleBlockProps) {
           onValue={(referenceHeightMm) => onSettings({ referenceHeightMm })}
           onEmpty={() => onSettings({ referenceHeightMm: null })}
         />
+        <p className="label mt-2">Revision</p>
         <p className="font-semibold">{props.revisionWords}</p>
       </Cell>
     </section>

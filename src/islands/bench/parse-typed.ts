@@ -1,3 +1,5 @@
+import { greatestLengthMm } from '~/domain/tank/solid';
+import { formatLengthWithUnit } from '~/domain/units/format-length';
 import type { LengthUnit } from '~/domain/units/length-unit';
 import { parseLength } from '~/domain/units/parse-length';
 import type { Parsed } from './TypedNumber';
@@ -7,7 +9,10 @@ export function parseSize(unit: LengthUnit) {
   return (text: string): Parsed => {
     const parsed = parseLength(text, unit);
     if ('refused' in parsed) return parsed;
-    return parsed.mm > 0 ? { value: parsed.mm } : { refused: 'A length is more than 0.' };
+    if (parsed.mm <= 0) return { refused: 'A length is more than 0.' };
+    return parsed.mm <= greatestLengthMm
+      ? { value: parsed.mm }
+      : { refused: `A length is at most ${formatLengthWithUnit(greatestLengthMm, unit)}.` };
   };
 }
 
@@ -15,7 +20,10 @@ export function parseSize(unit: LengthUnit) {
 export function parsePlace(unit: LengthUnit) {
   return (text: string): Parsed => {
     const parsed = parseLength(text, unit);
-    return 'refused' in parsed ? parsed : { value: parsed.mm };
+    if ('refused' in parsed) return parsed;
+    return Math.abs(parsed.mm) <= greatestLengthMm
+      ? { value: parsed.mm }
+      : { refused: `A place lies within ± ${formatLengthWithUnit(greatestLengthMm, unit)}.` };
   };
 }
 

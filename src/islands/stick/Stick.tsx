@@ -2,6 +2,7 @@ import { useId, useRef, type KeyboardEvent, type PointerEvent } from 'react';
 import { depthAt, type Curve } from '~/domain/table/curve';
 import { marksFor, multiples } from '~/domain/units/marks';
 import { Patterns } from './Patterns';
+import { volumeMarks } from './volume-marks';
 
 /** A unit of the scale: how much of the SI unit it is, and how a mark is written in it. */
 export interface Scale {
@@ -49,6 +50,7 @@ export function Stick(props: StickProps) {
   const prefix = useId();
   const svg = useRef<SVGSVGElement>(null);
   const yOf = (mm: number) => stickMarginPx + railPx * (1 - mm / heightMm);
+  const wetY = depthMm === null ? null : yOf(depthMm);
   const clamp = (mm: number) => Math.min(heightMm, Math.max(0, mm));
 
   const follow = (event: PointerEvent) => {
@@ -90,9 +92,15 @@ export function Stick(props: StickProps) {
     >
       <Patterns prefix={prefix} />
       <Rail {...props} prefix={prefix} yOf={yOf} />
-      <LengthMarks heightMm={heightMm} scale={props.length} railPx={railPx} yOf={yOf} />
-      <VolumeMarks heightMm={heightMm} curve={props.curve} scale={props.volume} yOf={yOf} />
-      {depthMm !== null && <WetLine y={yOf(depthMm)} grip={props.grip === true} />}
+      <LengthMarks heightMm={heightMm} scale={props.length} railPx={railPx} yOf={yOf} wetY={wetY} />
+      <VolumeMarks
+        heightMm={heightMm}
+        curve={props.curve}
+        scale={props.volume}
+        yOf={yOf}
+        wetY={wetY}
+      />
+      {wetY !== null && <WetLine y={wetY} grip={props.grip === true} />}
     </svg>
   );
 }
@@ -161,8 +169,9 @@ function LengthMarks(props: {
   scale: Scale;
   railPx: number;
   yOf(mm: number): number;
+  wetY: number | null;
 }) {
-  const { heightMm, scale, railPx, yOf } = props;
+  const { heightMm, scale, railPx, yOf, wetY } = props;
   const span = heightMm / scale.per;
   const { numbered, fine } = marksFor(span, railPx / 36, railPx / 5, scale.eighths);
   const isNumbered = (value: number) =>
@@ -182,7 +191,7 @@ function LengthMarks(props: {
               className="stroke-ink"
               strokeWidth={long ? 1.25 : 0.75}
             />
-            {long && (
+            {long && !struckOut(y, wetY) && (
               <text x={leftScalePx - 8} y={y + 4.5} textAnchor="end" className="fill-ink text-note">
                 {trim(value)}
               </text>
@@ -199,26 +208,20 @@ function VolumeMarks(props: {
   curve: Curve;
   scale: Scale;
   yOf(mm: number): number;
+  wetY: number | null;
 }) {
-  const { heightMm, curve, scale, yOf } = props;
+  const { heightMm, curve, scale, yOf, wetY } = props;
   const right = leftScalePx + railWidthPx;
   const most = curve.volumeL[curve.volumeL.length - 1] ?? 0;
   const least = curve.volumeL[0] ?? 0;
   const span = most / scale.per;
   if (!(span > 0)) return null;
-  const { numbered } = marksFor(span, 10, 10);
-  const marks: { value: number; y: number }[] = [];
-  let lastY = Infinity;
-  // the low end of a narrowing tank gets finer marks where they have room
-  const values = [...multiples(numbered / 4, numbered), ...multiples(numbered, span).slice(2)];
-  for (const value of values) {
-    const litres = value * scale.per;
-    if (litres <= least || litres > most) continue;
-    const y = yOf(depthAt(curve, litres));
-    if (lastY - y < 17 || y < yOf(heightMm) + 9) continue;
-    marks.push({ value, y });
-    lastY = y;
-  }
+  const marks = volumeMarks(
+    least / scale.per,
+    span,
+    (value) => yOf(depthAt(curve, value * scale.per)),
+    yOf(heightMm) + 9,
+  );
   return (
     <g>
       <text x={right - 2} y={8} textAnchor="end" className="fill-ink-2 text-note">
@@ -227,13 +230,20 @@ function VolumeMarks(props: {
       {marks.map(({ value, y }) => (
         <g key={value}>
           <path d={`M${right} ${y}h-9`} className="stroke-ink" strokeWidth="1" />
-          <text x={right - 12} y={y + 4} textAnchor="end" className="fill-ink-2 text-[0.6875rem]">
-            {trim(value)}
-          </text>
+          {!struckOut(y, wetY) && (
+            <text x={right - 12} y={y + 4} textAnchor="end" className="fill-ink-2 text-[0.6875rem]">
+              {trim(value)}
+            </text>
+          )}
         </g>
       ))}
     </g>
   );
+}
+
+/** The wet line runs through whole: a number that it would strike out gives way. */
+function struckOut(y: number, wetY: number | null): boolean {
+  return wetY !== null && Math.abs(y - wetY) < 8;
 }
 
 function WetLine({ y, grip }: { y: number; grip: boolean }) {
@@ -241,7 +251,7 @@ function WetLine({ y, grip }: { y: number; grip: boolean }) {
   return (
     <g className="cursor-ns-resize">
       <path
-        d={`M${leftScalePx - 6} ${y}h${railWidthPx + 18}`}
+        d={`M0 ${y}h${leftScalePx + railWidthPx + 12}`}
         className="stroke-datum"
         strokeWidth="2"
       />

@@ -45,7 +45,9 @@ export function AnswerBlock({
       </ul>
       {answer.aboveSafeFillL > 0 && (
         <p className="fault mt-3">
-          {volume(answer.aboveSafeFillL)} {sign} above safe fill: put no more in.
+          {answer.aboveSafeFillL > answer.plusMinusL
+            ? `${volume(answer.aboveSafeFillL)} ${sign} above safe fill: put no more in.`
+            : 'At safe fill: put no more in.'}
         </p>
       )}
     </div>

@@ -1,5 +1,8 @@
 import type { Dimension } from './dimensions';
 
+/** Along an upright dimension, from its foot. */
+const figureShare = 0.68;
+
 /** A dimension with oblique ticks, its figure standing along the line. */
 export function DimensionLine({ dimension, text }: { dimension: Dimension; text: string }) {
   const { from, to, offset } = dimension;
@@ -7,7 +10,10 @@ export function DimensionLine({ dimension, text }: { dimension: Dimension; text:
   const b = [to[0] + offset[0], to[1] + offset[1]] as const;
   const lengthPx = Math.hypot(b[0] - a[0], b[1] - a[1]);
   if (lengthPx < 28) return null;
-  const middle = [(a[0] + b[0]) / 2, (a[1] + b[1]) / 2];
+  // a standing figure keeps off the middle, where the wet line stands at first
+  const upright = Math.abs(b[1] - a[1]) > 2 * Math.abs(b[0] - a[0]);
+  const share = upright ? figureShare : 0.5;
+  const middle = [a[0] + share * (b[0] - a[0]), a[1] + share * (b[1] - a[1])];
   let angle = (Math.atan2(b[1] - a[1], b[0] - a[0]) * 180) / Math.PI;
   if (angle > 90 || angle < -90) angle += 180;
   const witness = (p: readonly [number, number], q: readonly [number, number]) => {
