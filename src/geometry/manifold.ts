@@ -7,7 +7,7 @@ import { areaPreservingFactor } from './circle';
 import { exactPoints } from './exact-points';
 import type { Mesh } from './mesh';
 import { toTank, type Placing } from './placing';
-import { isConvex, prismMesh } from './prism-mesh';
+import { prismMesh } from './prism-mesh';
 import { axisOrder, type Axis, type Shape } from './shape';
 import type { Vec3 } from './vec3';
 
@@ -21,9 +21,6 @@ export interface ManifoldSource {
   wasmUrl?: string;
   wasmBinary?: ArrayBuffer | Uint8Array;
 }
-
-/** Up to so many corners a convex outline is cheaper as the hull of its corners, which keeps their doubles. */
-const fewCorners = 8;
 
 let loading: Promise<void> | undefined;
 let library: ManifoldToplevel | undefined;
@@ -103,10 +100,16 @@ function loadedLibrary(): ManifoldToplevel {
 
 function make({ shape, place }: PlacedShape, origin: Vec3): Manifold {
   const { Manifold } = loadedLibrary();
-  if (shape.form === 'extrusion' && shape.outline.length <= fewCorners && isConvex(shape.outline)) {
-    const { positions } = prismMesh(shape, place, origin)!;
-    const corners = Array.from({ length: positions.length / 3 }, (_, i) => vertexOf(positions, i));
-    return Manifold.hull(corners);
+  const prism = shape.form === 'extrusion' ? prismMesh(shape, place, origin) : null;
+  if (prism) {
+    // a convex prism is the hull of its corners, which keeps their doubles and costs half as much
+    const corners = Array.from({ length: prism.positions.length / 3 }, (_, i) =>
+      vertexOf(prism.positions, i),
+    );
+    const hull = Manifold.hull(corners);
+    if (hull.numVert() === corners.length) return hull;
+    // corners so near to flat that the hull left some out
+    hull.delete();
   }
   const raw =
     shape.form === 'extrusion'

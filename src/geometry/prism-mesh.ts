@@ -37,7 +37,7 @@ export function prismMesh(
 }
 
 /** Whether an outline turns against the clock at every corner. */
-export function isConvex(outline: readonly Vec2[]): boolean {
+function isConvex(outline: readonly Vec2[]): boolean {
   const n = outline.length;
   return outline.every(([x, y], i) => {
     const [x1, y1] = outline[(i + 1) % n]!;
