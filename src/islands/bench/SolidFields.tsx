@@ -7,7 +7,7 @@ import { formatLength } from '~/domain/units/format-length';
 import type { LengthUnit } from '~/domain/units/length-unit';
 import { changeSolid, renameSolid, setPlace, setRole, setSize, setTurn } from '~/scene/commands';
 import type { SceneAction } from '~/scene/scene';
-import { parseBetween, parsePlace, parseSize } from './parse-typed';
+import { parseBetween, parseHeight, parsePlace, parseSize } from './parse-typed';
 import { TypedNumber } from './TypedNumber';
 
 interface SolidFieldsProps {
@@ -39,16 +39,17 @@ export function SolidFields({ solid, document, dispatch, unit, faults }: SolidFi
           solid={solid}
           onRole={(role) => edit(`${solid.id} ${role}`, (now) => setRole(now, solid.id, role))}
         />
-        {'axis' in solid || solid.kind === 'cylinder' ? (
+        {kind.axes && (
           <AxisField
-            solid={solid as Solid & { axis?: 'x' | 'y' | 'z' }}
+            axis={axisOf(solid) ?? kind.axes.usual}
+            choices={kind.axes.choices}
             onAxis={(axis) =>
               edit(`axis of ${solid.id}`, (now) =>
                 changeSolid(now, solid.id, (one) => ({ ...one, axis }) as Solid),
               )
             }
           />
-        ) : null}
+        )}
       </div>
       <fieldset className="flex items-start gap-x-3">
         <legend className="sr-only">Sizes of {solid.id}</legend>
@@ -57,7 +58,7 @@ export function SolidFields({ solid, document, dispatch, unit, faults }: SolidFi
             key={size.path.join('.')}
             label={size.label}
             value={Number(valueAt(solid, size.path))}
-            parse={parseSize(unit)}
+            parse={size.mayBeZero ? parseHeight(unit) : parseSize(unit)}
             format={format}
             step={step}
             fault={faultAt(`/${size.path.join('/')}`)}
@@ -188,10 +189,19 @@ function RoleField({ solid, onRole }: { solid: Solid; onRole(role: Solid['role']
   );
 }
 
-function AxisField(props: {
-  solid: { axis?: 'x' | 'y' | 'z' };
-  onAxis(axis: 'x' | 'y' | 'z'): void;
-}) {
+type Axis = 'x' | 'y' | 'z';
+
+const axisWords: Record<Axis, string> = {
+  x: 'x, lying along',
+  y: 'y, lying across',
+  z: 'z, standing',
+};
+
+function axisOf(solid: Solid): Axis | undefined {
+  return 'axis' in solid ? solid.axis : undefined;
+}
+
+function AxisField(props: { axis: Axis; choices: readonly Axis[]; onAxis(axis: Axis): void }) {
   const id = useId();
   return (
     <div className="w-30">
@@ -201,12 +211,14 @@ function AxisField(props: {
       <select
         id={id}
         className="typed min-h-8 py-0.5"
-        value={props.solid.axis ?? 'x'}
-        onChange={(event) => props.onAxis(event.target.value as 'x' | 'y' | 'z')}
+        value={props.axis}
+        onChange={(event) => props.onAxis(event.target.value as Axis)}
       >
-        <option value="x">x, lying along</option>
-        <option value="y">y, lying across</option>
-        <option value="z">z, standing</option>
+        {props.choices.map((axis) => (
+          <option key={axis} value={axis}>
+            {axisWords[axis]}
+          </option>
+        ))}
       </select>
     </div>
   );

@@ -1,7 +1,7 @@
 import type { z } from 'zod/v4';
 import type { Interval } from '../../../geometry/intervals';
 import type { Line } from '../../../geometry/line';
-import type { Shape } from '../../../geometry/shape';
+import type { Axis, Shape } from '../../../geometry/shape';
 import type { SolidFields, Vec3 } from '../solid';
 
 /** One size of a solid, as the parts list shows it and lets it be typed. */
@@ -11,6 +11,8 @@ export interface Size {
   /** The trade's word for it: "length", "diameter". */
   label: string;
   unit: 'mm';
+  /** A tip: 0 is a size of it too. */
+  mayBeZero?: true;
 }
 
 /** The tank's own directions as the solid sees them: unit vectors in the own frame. */
@@ -32,6 +34,8 @@ export interface Kind<S extends SolidFields & { kind: string }> {
   curved: false | 'once' | 'twice';
   /** Extent of the upright box along x, y, z, mm. */
   extent(solid: S): Vec3;
+  /** Where the kind has an axis: the directions it may take, and the one when none is said. */
+  axes: { usual: Axis; choices: readonly Axis[] } | null;
   /** The sizes that are typed, in drawing order. */
   sizes(solid: S): readonly Size[];
   /** The sizes in one phrase for the list: "900 × 500 × 300". */

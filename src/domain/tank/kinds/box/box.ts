@@ -10,6 +10,7 @@ export const box: Kind<Box> = {
   schema: boxSchema,
   curved: false,
   extent: ({ length, width, height }) => [length, width, height],
+  axes: null,
   sizes: () => [
     { path: ['length'], label: 'length', unit: 'mm' },
     { path: ['width'], label: 'width', unit: 'mm' },

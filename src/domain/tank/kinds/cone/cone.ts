@@ -17,9 +17,10 @@ export const cone: Kind<Cone> = {
     extent[axisOrder(axisOf(solid))[2]] = solid.length;
     return extent;
   },
+  axes: { usual: 'z', choices: ['x', 'y', 'z'] },
   sizes: () => [
-    { path: ['start'], label: 'diameter at start', unit: 'mm' },
-    { path: ['end'], label: 'diameter at end', unit: 'mm' },
+    { path: ['start'], label: 'start ⌀', unit: 'mm', mayBeZero: true },
+    { path: ['end'], label: 'end ⌀', unit: 'mm', mayBeZero: true },
     { path: ['length'], label: 'length', unit: 'mm' },
   ],
   words: (solid) =>

@@ -13,6 +13,7 @@ export const cylinder: Kind<Cylinder> = {
   schema: cylinderSchema,
   curved: 'once',
   extent: (solid) => alongAxis(axisOf(solid), solid.diameter, solid.length),
+  axes: { usual: 'x', choices: ['x', 'y', 'z'] },
   sizes: () => [
     { path: ['diameter'], label: 'diameter', unit: 'mm' },
     { path: ['length'], label: 'length', unit: 'mm' },

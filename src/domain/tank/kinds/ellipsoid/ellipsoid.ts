@@ -10,6 +10,7 @@ export const ellipsoid: Kind<Ellipsoid> = {
   schema: ellipsoidSchema,
   curved: 'twice',
   extent: sizesOf,
+  axes: null,
   sizes: () => [
     { path: ['length'], label: 'length', unit: 'mm' },
     { path: ['width'], label: 'width', unit: 'mm' },

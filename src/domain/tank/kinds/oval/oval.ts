@@ -15,6 +15,7 @@ export const oval: Kind<Oval> = {
     axisOf(solid) === 'x'
       ? [solid.length, solid.width, solid.height]
       : [solid.width, solid.length, solid.height],
+  axes: { usual: 'x', choices: ['x', 'y'] },
   sizes: () => [
     { path: ['length'], label: 'length', unit: 'mm' },
     { path: ['width'], label: 'width', unit: 'mm' },

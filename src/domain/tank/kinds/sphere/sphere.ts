@@ -9,6 +9,7 @@ export const sphere: Kind<Sphere> = {
   schema: sphereSchema,
   curved: 'twice',
   extent: ({ diameter }) => [diameter, diameter, diameter],
+  axes: null,
   sizes: () => [{ path: ['diameter'], label: 'diameter', unit: 'mm' }],
   words: ({ diameter }) => `⌀ ${sizeWords(diameter)}`,
   shape: ({ diameter }, facets, tank) => ball.shape([diameter, diameter, diameter], facets, tank),

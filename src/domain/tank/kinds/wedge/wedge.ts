@@ -12,6 +12,7 @@ export const wedge: Kind<Wedge> = {
   schema: wedgeSchema,
   curved: false,
   extent: ({ length, width, height }) => [length, width, height],
+  axes: null,
   sizes: () => [
     { path: ['length'], label: 'length', unit: 'mm' },
     { path: ['width'], label: 'width', unit: 'mm' },

@@ -1,0 +1,37 @@
+import { cleanup, render, screen, within } from '@testing-library/react';
+import { afterEach, expect, it } from 'vitest';
+import type { TankDocument } from '~/domain/tank/document';
+import { kinds, solidSchema } from '~/domain/tank/kinds/registry';
+import { SolidFields } from '~/islands/bench/SolidFields';
+
+afterEach(cleanup);
+
+function show(kind: (typeof kinds)[number]) {
+  const solid = kind.blank('part');
+  const document: TankDocument = {
+    format: 'dipwright-tank',
+    version: 1,
+    name: 'Tank',
+    solids: [solid],
+  };
+  render(
+    <SolidFields solid={solid} document={document} dispatch={() => {}} unit="mm" faults={[]} />,
+  );
+  return solid;
+}
+
+it.each(kinds.map((kind) => [kind.label, kind] as const))(
+  'offers every size of a %s, and only directions that the document takes',
+  (_label, kind) => {
+    const solid = show(kind);
+    const sizes = within(screen.getByRole('group', { name: 'Sizes of part' }));
+    expect(sizes.getAllByRole('textbox')).toHaveLength(kind.sizes(solid).length);
+    const axis = screen.queryByLabelText('axis');
+    expect(axis !== null).toBe(kind.axes !== null);
+    if (axis === null) return;
+    const choices = within(axis).getAllByRole<HTMLOptionElement>('option');
+    for (const { value } of choices) {
+      expect(solidSchema.safeParse({ ...solid, axis: value }).success, value).toBe(true);
+    }
+  },
+);
