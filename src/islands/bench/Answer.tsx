@@ -70,9 +70,9 @@ export function Answer({ table, depthMm, onDepth, stands, length, volume }: Answ
         <p className="text-lead">
           {waste
             ? `${written(answer.volumeL)} ${sign} in the tank`
-            : `${written(answer.roomL)} ${sign} room to safe fill`}{' '}
-          · {kilograms} kg
+            : `${written(answer.roomL)} ${sign} room to safe fill`}
         </p>
+        <p className="text-lead">{kilograms} kg</p>
         {answer.aboveSafeFillL > 0 && (
           <p className="fault mt-1">
             Above safe fill, {formatVolume(safeFillL(table), volume, answer.plusMinusL)} {sign}

@@ -319,7 +319,7 @@ function StickFields(props: {
     });
   return (
     <>
-      <div className="flex flex-wrap gap-x-4">
+      <div role="group" aria-label="Place of the stick" className="flex flex-wrap gap-x-4">
         <TypedNumber
           label="at x"
           value={stick.at[0]}

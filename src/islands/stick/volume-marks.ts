@@ -34,9 +34,16 @@ export function volumeMarks(
     if (y >= topPx && free) taken.push({ value, y });
   };
   multiples(numbered, most).forEach(take);
-  const parts = leadingDigits(numbered) === 20 ? 4 : 5;
-  multiples(numbered / parts, numbered).forEach(take);
+  for (const parts of finerParts(leadingDigits(numbered))) {
+    multiples(numbered / parts, numbered).forEach(take);
+  }
   return taken.sort((a, b) => a.value - b.value);
+}
+
+/** Into how many a step is parted, the rounder first: 10 into 5s then 2s, 20 into 10s then 5s. */
+function finerParts(leading: number): number[] {
+  if (leading === 10) return [2, 5];
+  return leading === 20 ? [2, 4] : [5];
 }
 
 /** 25 of 0.25, 2.5 and 250; 20 of 2. */

@@ -12,6 +12,13 @@ describe('numbers of the litre scale', () => {
     expect(values).toEqual([5, 10, 20, 40, 60, 80, 100, 120, 140, 160]);
   });
 
+  it('halves a step before it goes finer: 5 under 10, not 6', () => {
+    // a lying cylinder, roughly V ~ h^1.5 at its foot
+    const yOf = (litres: number) => 330 * (1 - (litres / 82) ** (2 / 3));
+    const values = volumeMarks(0, 82, yOf, 9).map(({ value }) => value);
+    expect(values.filter((value) => value <= 20)).toEqual([2, 5, 10, 20]);
+  });
+
   it('never crowds', () => {
     for (const brim of [30, 130, 162, 820, 2262]) {
       for (const yOf of [vHull(brim), box(brim)]) {

@@ -32,7 +32,8 @@ export function balloonsOf(preview: Preview, projection: Projection, plate: Plat
       id: preview.solids[index]!.id,
       number: index + 1,
       anchor,
-      centre: [x, anchor[1] + 26],
+      // above its solid's middle: the wet line stands at half the stick at first
+      centre: [x, anchor[1] - 26],
     });
   });
   return [...spread(columns.left, plate), ...spread(columns.right, plate)];
