@@ -1,5 +1,5 @@
 import type { TankDocument } from '~/domain/tank/document';
-import type { Solid } from '~/domain/tank/kinds/registry';
+import { kindOf, type Solid } from '~/domain/tank/kinds/registry';
 
 /**
  * What can be done to a design, as pure functions document → document. None of them validates:
@@ -43,14 +43,36 @@ export function changeSolid(
   };
 }
 
-/** Sets one size by its path inside the solid's entry, e.g. `['length']`. */
+/**
+ * Sets one size by its path inside the solid's entry, e.g. `['length']`. A stick that stood at the
+ * middle of the solid stays at its middle: off it, the zero of a round tank would climb the wall.
+ */
 export function setSize(
   document: TankDocument,
   id: string,
   path: readonly string[],
   valueMm: number,
 ): TankDocument {
-  return changeSolid(document, id, (solid) => setPath(solid, path, valueMm) as Solid);
+  const before = document.solids.find((solid) => solid.id === id);
+  const after = changeSolid(document, id, (solid) => setPath(solid, path, valueMm) as Solid);
+  const resized = after.solids.find((solid) => solid.id === id);
+  return before && resized ? keepInTheMiddle(after, before, resized) : after;
+}
+
+function keepInTheMiddle(document: TankDocument, before: Solid, after: Solid): TankDocument {
+  const { stick } = document;
+  const turned = before.turn?.some((degrees) => degrees !== 0) ?? false;
+  if (!stick || turned || before.role !== 'holds') return document;
+  const at: [number, number] = [...stick.at];
+  for (const axis of [0, 1] as const) {
+    if (Math.abs(at[axis] - middleOf(before, axis)) < 1e-6) at[axis] = middleOf(after, axis);
+  }
+  const moved = at[0] !== stick.at[0] || at[1] !== stick.at[1];
+  return moved ? setStick(document, { ...stick, at }) : document;
+}
+
+function middleOf(solid: Solid, axis: 0 | 1): number {
+  return (solid.at?.[axis] ?? 0) + kindOf(solid).extent(solid)[axis] / 2;
 }
 
 export function setPlace(

@@ -30,6 +30,16 @@ describe('commands on a design', () => {
     expect(after.solids[0]).toBe(sloped.solids[0]);
   });
 
+  it('keeps a stick at the middle of the solid whose size changes, and leaves another where it is', () => {
+    const lying = startingPoints.find(({ code }) => code === 'lying-cylinder')!.design;
+    const after = setSize(setSize(lying, 'barrel', ['diameter'], 1200), 'barrel', ['length'], 2000);
+    expect(after.stick?.at).toEqual([1000, 600]);
+    // 75 mm from the deep end of the sloped tank, in the middle across
+    expect(setSize(sloped, 'body', ['length'], 900).stick?.at).toEqual([75, 225]);
+    expect(setSize(sloped, 'body', ['width'], 500).stick?.at).toEqual([75, 250]);
+    expect(setSize(sloped, 'ramp', ['width'], 500).stick).toEqual(sloped.stick);
+  });
+
   it('places and turns one axis at a time, from the defaults when nothing was said', () => {
     expect(setPlace(sloped, 'body', 2, 12).solids[0]?.at).toEqual([0, 0, 12]);
     expect(setTurn(sloped, 'ramp', 0, 90).solids[1]?.turn).toEqual([90, 0, 180]);

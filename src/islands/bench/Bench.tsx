@@ -18,6 +18,7 @@ import { liveTable } from './live-table';
 import { PartsList } from './PartsList';
 import { TitleBlock } from './TitleBlock';
 import { TopLine } from './TopLine';
+import { unseenWords } from './unseen';
 import { useDraftSaving, type Saving } from './use-draft-saving';
 import { usePreview } from './use-preview';
 import { useSettings } from './use-settings';
@@ -76,6 +77,7 @@ function BenchSheet({ tank, design, etag, role, person }: BenchProps) {
     };
   }, [preview, table, settings.outletMm]);
 
+  const unseen = table && !problem ? unseenWords(table, units.volume) : null;
   const waitsFor = settingsSaved
     ? waitsForDraft(saving)
     : `The settings are not saved yet${unsaved ? `: ${unsaved}` : '.'}`;
@@ -156,6 +158,11 @@ function BenchSheet({ tank, design, etag, role, person }: BenchProps) {
           {notice}
         </p>
       ))}
+      {unseen && (
+        <p role="status" className="fault border-b border-hair px-4 py-2 sm:px-6">
+          {unseen}
+        </p>
+      )}
       <Drawing
         preview={preview}
         table={table}
