@@ -163,8 +163,8 @@ function Drawing({ preview, plate, projection, levels, selected }: TankCanvasPro
       />
       <Lines
         segments={chosen}
-        colour={ink.ink}
-        widthPx={1.5}
+        colour={ink.ink2}
+        widthPx={1.1}
         where="always"
         order={9}
         resolution={resolution}

@@ -65,6 +65,11 @@ export async function computePreview(document: TankDocument): Promise<Preview> {
     trappedL,
     pieces,
     rows,
-    notices: pieces > 1 ? [`The liquid space is in ${pieces} pieces.`] : [],
+    notices:
+      pieces > 1
+        ? [
+            `The liquid space is in ${pieces} pieces, which one stick cannot tell apart: join them, or make each a tank of its own.`,
+          ]
+        : [],
   };
 }

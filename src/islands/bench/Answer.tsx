@@ -30,10 +30,10 @@ export function Answer({ table, depthMm, onDepth, stands, length, volume }: Answ
   const waste = liquids[table.settings.liquid].watch === 'high';
   const sign = volumeUnitSigns[volume];
   const written = (litres: number) => formatVolume(litres, volume, answer.plusMinusL);
-  const kilograms = formatMass(
-    answer.massKg,
-    (answer.plusMinusL * densityOf(table.settings)) / 1000,
-  );
+  const density = densityOf(table.settings);
+  const weight = Number.isFinite(density)
+    ? `${formatMass(answer.massKg, (answer.plusMinusL * density) / 1000)} kg`
+    : 'no weight before the density is typed';
   const top = safeFillMm(table);
   const parse = (text: string) => {
     const parsed = parseHeight(length)(text);
@@ -72,7 +72,7 @@ export function Answer({ table, depthMm, onDepth, stands, length, volume }: Answ
             ? `${written(answer.volumeL)} ${sign} in the tank`
             : `${written(answer.roomL)} ${sign} room to safe fill`}
         </p>
-        <p className="text-lead">{kilograms} kg</p>
+        <p className="text-lead">{weight}</p>
         {answer.aboveSafeFillL > 0 && (
           <p className="fault mt-1">
             Above safe fill, {formatVolume(safeFillL(table), volume, answer.plusMinusL)} {sign}

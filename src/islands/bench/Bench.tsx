@@ -175,6 +175,7 @@ function BenchSheet({ tank, design, etag, role, person }: BenchProps) {
         length={units.length}
         volume={units.volume}
         name={tank.name}
+        person={person}
       />
       <div className="grid border-t border-ink bg-sheet lg:grid-cols-[minmax(0,2fr)_minmax(21rem,1fr)]">
         <div className="min-w-0 px-2 pb-3 sm:px-4 lg:border-r lg:border-ink">

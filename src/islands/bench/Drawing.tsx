@@ -8,6 +8,7 @@ import { formatVolume } from '~/domain/units/format-volume';
 import type { LengthUnit } from '~/domain/units/length-unit';
 import { volumeUnitWords, type VolumeUnit } from '~/domain/units/volume-unit';
 import type { View } from '~/viewport/projection';
+import { UnitsChooser } from '../shared/UnitsChooser';
 import { lengthScales, volumeScales } from '../stick/scales';
 import { Stick, stickMarginPx } from '../stick/Stick';
 import { StickTable } from '../table/StickTable';
@@ -27,6 +28,8 @@ interface DrawingProps {
   length: LengthUnit;
   volume: VolumeUnit;
   name: string;
+  /** Whose units are chosen here. */
+  person: string;
 }
 
 const views: { name: 'end' | 'side' | 'plan' | 'away'; label: string }[] = [
@@ -40,7 +43,7 @@ const views: { name: 'end' | 'side' | 'plan' | 'away'; label: string }[] = [
 export function Drawing(props: DrawingProps) {
   const { preview, table, depthMm, onDepth, length, volume } = props;
   const [view, setView] = useState<View>({ name: 'away' });
-  const { frame, plate } = usePlate();
+  const { frame, plate } = usePlate(preview?.frame ?? null);
   const ready = preview && table && plate;
   const yOf = (mm: number) =>
     ready ? plate.railTop + plate.railPx * (1 - mm / table.heightMm) : 0;
@@ -135,6 +138,9 @@ export function Drawing(props: DrawingProps) {
               length={length}
               volume={volume}
             />
+            <div className="mt-6 hidden lg:block">
+              <UnitsChooser person={props.person} />
+            </div>
           </div>
         )}
       </div>

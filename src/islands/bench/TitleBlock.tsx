@@ -17,6 +17,7 @@ import type { LengthUnit } from '~/domain/units/length-unit';
 import type { VolumeUnit } from '~/domain/units/volume-unit';
 import { setAttitude, setStick } from '~/scene/commands';
 import type { SceneAction } from '~/scene/scene';
+import { NoGas } from '../shared/NoGas';
 import { parseBetween, parseHeight, parsePlace, parseSize } from './parse-typed';
 import { TypedNumber } from './TypedNumber';
 
@@ -212,10 +213,7 @@ function LiquidField(props: Pick<TitleBlockProps, 'settings' | 'onSettings'>) {
         value={props.settings.liquid}
         onChange={(event) => {
           const liquid = event.target.value as LiquidCode;
-          props.onSettings({
-            liquid,
-            ...(liquid === 'other' ? { densityKgPerM3: 1000 } : { densityKgPerM3: null }),
-          });
+          props.onSettings({ liquid, densityKgPerM3: null });
         }}
       >
         {liquidCodes.map((code) => (
@@ -224,6 +222,7 @@ function LiquidField(props: Pick<TitleBlockProps, 'settings' | 'onSettings'>) {
           </option>
         ))}
       </select>
+      <NoGas />
     </>
   );
 }

@@ -51,6 +51,7 @@ function Rows({ table, length, volume }: FineTableProps) {
           <tr>
             <th className="figure sticky left-0 bg-film">{length}</th>
             <th className="figure">{litres}</th>
+            <th className="figure">±</th>
             <th className="figure">usable</th>
             <th className="figure">room</th>
             <th className="figure">kg</th>
@@ -61,6 +62,7 @@ function Rows({ table, length, volume }: FineTableProps) {
             <tr key={mm}>
               <td className="figure sticky left-0 bg-film font-semibold">{figures.depth}</td>
               <td className="figure">{figures.litres}</td>
+              <td className="figure text-ink-2">{figures.plusMinus}</td>
               <td className="figure">{figures.usable}</td>
               <td className="figure">{figures.room}</td>
               <td className="figure">{figures.kg}</td>

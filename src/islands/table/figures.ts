@@ -11,6 +11,7 @@ export interface RowFigures {
   usable: string;
   room: string;
   kg: string;
+  plusMinus: string;
 }
 
 /** The digits of a whole table: those that its largest ± deserves, so that columns stay straight. */
@@ -29,8 +30,10 @@ export function rowFigures(
   return {
     depth: formatLength(depthMm, length),
     litres: digits.volume(answer.volumeL),
+    plusMinus: digits.plusMinus(answer.plusMinusL),
     usable: digits.volume(answer.usableL),
     room: digits.volume(answer.roomL),
-    kg: digits.mass(answer.massKg),
+    // a liquid that is not on the list has no weight before its density is typed
+    kg: Number.isFinite(answer.massKg) ? digits.mass(answer.massKg) : 'density?',
   };
 }

@@ -45,12 +45,9 @@ export function useReadings(tankId: string, first: readonly Reading[]): Readings
       }
     } catch (error) {
       const problem = asProblem(error);
-      const refused =
-        problem.status >= 400 &&
-        problem.status < 500 &&
-        problem.status !== 401 &&
-        problem.status !== 429;
-      // a refused one would be refused again; anything else waits under its key
+      // what is wrong in itself would be refused again; anything else (a slow line, a session that
+      // ended, a role that changed) waits under its key
+      const refused = problem.status === 400 || problem.status === 422;
       const stored = hold(refused ? left.slice(1) : left);
       setSaid({ ok: false, text: refused ? problem.message : notSent(problem.message, stored) });
     } finally {

@@ -1,11 +1,12 @@
 import { useEffect, useState } from 'react';
 import { useWatch } from 'react-hook-form';
 import type { Installation } from '~/domain/installation/installation';
-import { liquidCodes, liquids, lpgRefusal } from '~/domain/liquid/liquids';
+import { liquidCodes, liquids } from '~/domain/liquid/liquids';
 import { carriedDraft, dropCarriedDraft, type CarriedDraft } from '../front/carried-draft';
 import { createTank } from '../shared/api';
 import { Choice, Field } from '../shared/Field';
 import { FaultSummary } from '../shared/FaultSummary';
+import { NoGas } from '../shared/NoGas';
 import { useSentForm } from '../shared/use-sent-form';
 import { carriedCode, newTankForm, newTankOf } from './new-tank-form';
 import { StartingPointChoice, type Shape } from './StartingPointChoice';
@@ -100,14 +101,5 @@ function AddTankForm({
         </button>
       </div>
     </form>
-  );
-}
-
-function NoGas() {
-  return (
-    <details>
-      <summary className="cursor-pointer">LPG or another gas under pressure?</summary>
-      <span className="mt-1 block">{lpgRefusal}</span>
-    </details>
   );
 }

@@ -83,6 +83,24 @@ describe('keeping a reading', () => {
     expect(screen.queryByText('Waiting to be sent')).toBeNull();
   });
 
+  it('holds on to a reading while the session or the line is at fault, not the reading', async () => {
+    for (const [status, code] of [
+      [401, 'unauthenticated'],
+      [403, 'forbidden'],
+      [408, 'unreadable'],
+      [409, 'conflict'],
+      [429, 'rate-limited'],
+    ] as const) {
+      fetch.mockResolvedValueOnce(problem(status, { code, detail: 'Not now.' }));
+      render(<TankCard {...cistern} />);
+      readAndKeep();
+      expect(await screen.findByText(/^Not sent yet\./)).toBeDefined();
+      expect(screen.getByText('Waiting to be sent')).toBeDefined();
+      cleanup();
+      localStorage.clear();
+    }
+  });
+
   it('keeps waiting ones in order and drops one only when told to', async () => {
     fetch.mockResolvedValue(problem(503, { code: 'unavailable', detail: 'The database is away.' }));
     render(<TankCard {...cistern} />);
