@@ -50,7 +50,7 @@ export const liquids: Record<LiquidCode, Liquid> = {
     densitySource: 'M. Tanaka et al., Metrologia 38 (2001) 301: 998.2 kg/m³ at 20 °C',
     watch: 'low',
     cautions: ['drinking-water', ...always],
-    safeFillPercent: 100,
+    safeFillPercent: 95,
   },
   'grey-water': {
     code: 'grey-water',
@@ -105,7 +105,7 @@ export const liquids: Record<LiquidCode, Liquid> = {
       'UNESCO Tech. Papers Mar. Sci. 44: 1027.7 kg/m³ at 35 and 5 °C; 1025 is common practice',
     watch: 'low',
     cautions: [...always],
-    safeFillPercent: 100,
+    safeFillPercent: 95,
   },
   'heating-oil': {
     code: 'heating-oil',
