@@ -31,6 +31,11 @@ async function serve(): Promise<void> {
   });
   const context = await composeContext(config);
   sendConsoleToLog(context.log);
+  // A promise that nobody awaited has failed: the request it belonged to is answered or timed out by
+  // itself, and others are under way, so the process stays and says what happened.
+  process.on('unhandledRejection', (error) => {
+    context.log.error('a failure that nothing awaited', { error });
+  });
   process.on('uncaughtException', (error) => {
     context.log.error('an error that nothing caught', { error });
     process.exit(1);

@@ -59,6 +59,8 @@ export async function openFrontServer(
   const { port } = server.address() as AddressInfo;
 
   return {
+    /** Where its static files lie. */
+    folder,
     server,
     state,
     lines,

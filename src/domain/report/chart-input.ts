@@ -1,9 +1,9 @@
 import type { Installation } from '../installation/installation';
-import type { Preview } from '../table/preview';
 import type { IssuedRow } from '../table/request';
 import type { TankDocument } from '../tank/document';
 import type { TankSettings } from '../tank/settings';
 import type { ChartOptions } from './chart-options';
+import type { Sketch } from './sketch';
 
 /** One frozen revision and its surroundings: all that a chart is made from. */
 export interface ChartInput {
@@ -33,7 +33,7 @@ export interface ChartInput {
   capacityL: number;
   errorL: number;
   rows: readonly IssuedRow[];
-  /** The shape as a mesh, for the sketch; null leaves the sketch out. */
-  preview: Pick<Preview, 'space' | 'frame'> | null;
+  /** The elevation that a print shows (sketchOf); null leaves it out. */
+  sketch: Sketch | null;
   options: ChartOptions;
 }

@@ -13,7 +13,7 @@ import type { ChartReport, ChartSketch } from './chart-report';
 import { chartColumns, chartRows, rowGroup } from './chart-rows';
 import { chartStick } from './chart-stick';
 import { printDate } from './print-date';
-import { sketchOf, type Sketch } from './sketch';
+import type { Sketch } from './sketch';
 
 /** Most rows of one print: a larger step is asked for beyond it. */
 const mostChartRows = 2000;
@@ -32,7 +32,7 @@ export function buildChart(input: ChartInput): ChartReport {
   }
   const levels = chartLevels(input);
   const digits = tableDigits(options.volume, levels.largestPlusMinusL, levels.densityKgPerM3);
-  const sketch = input.preview === null ? null : sketchOf(input.preview.space, input.preview.frame);
+  const { sketch } = input;
   const columns = chartColumns(input);
   const rows = chartRows(input, levels, digits, columns);
   const liquid = liquids[settings.liquid].name;

@@ -49,6 +49,7 @@ export function elevation({ positions, triangles }: TankMesh, view: View): Eleva
     maxY: -least(ys.map(negate)),
   };
   const front = faces.filter(({ facing }) => facing < 0);
+  const before = gridOf(front, frame);
   return {
     view,
     ...frame,
@@ -60,7 +61,7 @@ export function elevation({ positions, triangles }: TankMesh, view: View): Eleva
         y1: a[1],
         x2: b[0],
         y2: b[1],
-        hidden: isHidden([(a[0] + b[0]) / 2, (a[1] + b[1]) / 2, (a[2] + b[2]) / 2], front),
+        hidden: isHidden([(a[0] + b[0]) / 2, (a[1] + b[1]) / 2, (a[2] + b[2]) / 2], before),
       })),
     ),
   };
@@ -136,8 +137,8 @@ function place(x: number, y: number): string {
   return `${Math.round(x * 100)},${Math.round(y * 100)}`;
 }
 
-function isHidden([x, y, depth]: Point, front: readonly Face[]): boolean {
-  return front.some(({ p }) => {
+function isHidden([x, y, depth]: Point, before: FaceGrid): boolean {
+  return before(x, y).some(({ p }) => {
     const inside = depthInside(p, x, y);
     return inside !== null && inside < depth - 0.01;
   });
@@ -151,6 +152,26 @@ function depthInside([a, b, c]: Face['p'], x: number, y: number): number | null 
   const v = ((c[0] - x) * (a[1] - y) - (a[0] - x) * (c[1] - y)) / area;
   const w = 1 - u - v;
   return u > 1e-6 && v > 1e-6 && w > 1e-6 ? u * a[2] + v * b[2] + w * c[2] : null;
+}
+
+/** The faces that may lie over a point of the frame. */
+type FaceGrid = (x: number, y: number) => readonly Face[];
+
+/** Faces sorted by the cells of the frame that they touch, so that an edge is held against few. */
+function gridOf(front: readonly Face[], { minX, maxX, minY, maxY }: Frame): FaceGrid {
+  const grid = Array.from({ length: cells * cells }, (): Face[] => []);
+  const [stepX, stepY] = [(maxX - minX) / cells, (maxY - minY) / cells];
+  for (const one of front) {
+    const columns = span(one.p.map(([x]) => (x - minX) / stepX));
+    const rows = span(one.p.map(([, y]) => (y - minY) / stepY));
+    for (let row = rows.first; row <= rows.last; row += 1) {
+      for (let column = columns.first; column <= columns.last; column += 1) {
+        grid[row * cells + column]!.push(one);
+      }
+    }
+  }
+  const cell = (value: number) => Math.min(cells - 1, Math.max(0, Math.floor(value)));
+  return (x, y) => grid[cell((y - minY) / stepY) * cells + cell((x - minX) / stepX)]!;
 }
 
 /** Share of the frame that the faces cover, on a coarse grid. */

@@ -45,8 +45,24 @@ const methods = new Set(['GET', 'HEAD', 'POST', 'PUT', 'PATCH', 'DELETE', 'OPTIO
 export function createFront({ config, log, state, files, handler }: FrontParts) {
   const headers = securityHeaders(config.http.tls);
 
+  /** Never rejects: whatever fails on the way is one answer and one line of the log. */
   return async function front(request: IncomingMessage, response: ServerResponse): Promise<void> {
     const requestId = randomUUID();
+    try {
+      await answer(request, response, requestId);
+    } catch (error) {
+      const { method, url } = request;
+      log.error('the front failed', { error, method, path: requestPath(url), requestId });
+      if (response.headersSent) response.destroy();
+      else failed(request, response, requestId);
+    }
+  };
+
+  async function answer(
+    request: IncomingMessage,
+    response: ServerResponse,
+    requestId: string,
+  ): Promise<void> {
     const startedAt = performance.now();
     for (const [name, value] of Object.entries(headers)) response.setHeader(name, value);
     response.setHeader('X-Request-Id', requestId);
@@ -109,7 +125,13 @@ export function createFront({ config, log, state, files, handler }: FrontParts) 
       request.url = '/404';
       return handler(request, response, () => say(refusals.notFound), locals);
     }
-  };
+  }
+}
+
+/** What a half-made answer said of itself (length, coding, tag) goes; the headers of every answer stay. */
+function failed(request: IncomingMessage, response: ServerResponse, requestId: string): void {
+  for (const name of ['ETag', 'Content-Encoding', 'Vary']) response.removeHeader(name);
+  refuse(refusals.failed, request, response, requestId);
 }
 
 function sayLeaving(response: ServerResponse): void {

@@ -2,7 +2,7 @@ import { fileURLToPath } from 'node:url';
 import { Piscina } from 'piscina';
 import { DipwrightError } from '~/domain/errors';
 import type { IssuedTable } from '~/domain/table/issued-table';
-import type { Preview } from '~/domain/table/preview';
+import type { Sketch } from '~/domain/report/sketch';
 import type { ComputedTable, Readings } from '~/domain/table/request';
 import type { TankDocument } from '~/domain/tank/document';
 import type { TankSettings } from '~/domain/tank/settings';
@@ -16,13 +16,11 @@ export interface ComputePool {
   table(design: TankDocument, readings: Readings): Promise<ComputedTable>;
   /** Refuses (`invalid`, one fault a reason) what may not be issued: empty, in pieces, thinner than 0.01 mm. */
   issue(design: TankDocument, settings: TankSettings, stepMm: number): Promise<IssuedTable>;
-  /** The shape as a mesh and how readings lie on it, for the sketch of a print. */
-  sketch(design: TankDocument): Promise<Sketched>;
+  /** The sketch of a print: hidden edges are found here, not on the event loop. */
+  sketch(design: TankDocument): Promise<Sketch>;
   /** Waits for running work, then ends the threads. */
   close(): Promise<void>;
 }
-
-export type Sketched = Pick<Preview, 'space' | 'frame'>;
 
 export interface ComputePoolOptions {
   threads: number;
@@ -55,7 +53,7 @@ export function createComputePool(options: ComputePoolOptions): ComputePool {
   async function run(
     task: ComputeTask,
     seconds: number,
-  ): Promise<ComputedTable | IssuedTable | Sketched> {
+  ): Promise<ComputedTable | IssuedTable | Sketch> {
     if (closed) throw unavailable('The server is stopping. Try again in a moment.');
     const signal = AbortSignal.timeout(seconds * 1000);
     let outcome: ComputeOutcome;
@@ -94,7 +92,7 @@ export function createComputePool(options: ComputePoolOptions): ComputePool {
         limitSeconds.issue ?? 90,
       ) as Promise<IssuedTable>,
     sketch: (design) =>
-      run({ work: 'sketch', design }, limitSeconds.table ?? 30) as Promise<Sketched>,
+      run({ work: 'sketch', design }, limitSeconds.table ?? 30) as Promise<Sketch>,
     async close() {
       closed = true;
       await pool.close();

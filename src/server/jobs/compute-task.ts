@@ -1,6 +1,6 @@
 import type { ErrorCode, FieldFault } from '~/domain/errors';
 import type { IssuedTable } from '~/domain/table/issued-table';
-import type { Preview } from '~/domain/table/preview';
+import type { Sketch } from '~/domain/report/sketch';
 import type { ComputedTable, Readings } from '~/domain/table/request';
 import type { TankDocument } from '~/domain/tank/document';
 import type { TankSettings } from '~/domain/tank/settings';
@@ -13,5 +13,5 @@ export type ComputeTask =
 
 /** Worker → pool. A refusal travels as data, since an error loses its fields between threads. */
 export type ComputeOutcome =
-  | { result: ComputedTable | IssuedTable | Pick<Preview, 'space' | 'frame'> }
+  | { result: ComputedTable | IssuedTable | Sketch }
   | { refusal: { code: ErrorCode; message: string; faults: readonly FieldFault[] } };

@@ -1,6 +1,7 @@
 import { readFile } from 'node:fs/promises';
 import { createRequire } from 'node:module';
 import { DipwrightError } from '~/domain/errors';
+import { sketchOf } from '~/domain/report/sketch';
 import { computePreview } from '~/domain/table/compute-preview';
 import { computeTable } from '~/domain/table/compute-table';
 import { issueTable } from '~/domain/table/issue-table';
@@ -31,7 +32,7 @@ async function work(task: ComputeTask) {
       return issueTable(task.design, task.settings, task.stepMm);
     case 'sketch': {
       const { space, frame } = await computePreview(task.design);
-      return { space, frame };
+      return sketchOf(space, frame);
     }
   }
 }

@@ -16,7 +16,10 @@ const leastFreeMb = 256;
 export async function checkReadiness(
   context: Context,
 ): Promise<{ ready: boolean; checks: Check[] }> {
-  const applied = await appliedMigrations(context.database).catch(() => null);
+  const applied = await appliedMigrations(context.database).catch((error: unknown) =>
+    // a database that answers, but was never migrated
+    isMissingTable(error) ? [] : null,
+  );
   const checks: Check[] = [
     {
       name: 'database',
@@ -27,6 +30,12 @@ export async function checkReadiness(
     await diskCheck(),
   ];
   return { ready: checks.every(({ fit }) => fit), checks };
+}
+
+/** ER_NO_SUCH_TABLE. */
+function isMissingTable(error: unknown): boolean {
+  const cause = (error as { original?: { errno?: unknown } } | null)?.original;
+  return cause?.errno === 1146;
 }
 
 async function migrationsCheck(applied: readonly string[]): Promise<Check> {

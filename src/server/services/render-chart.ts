@@ -49,7 +49,7 @@ export async function renderChart(
     capacityL,
     errorL,
     rows: await soundRows(scope, revision),
-    preview: await context.computePool.sketch(design),
+    sketch: await context.computePool.sketch(design),
     options: input.options,
   });
   return { fileName: `${tank.name} ${letter}.pdf`, pdf: await drawChart(report) };

@@ -1,3 +1,4 @@
+import { sketchOf } from '~/domain/report/sketch';
 import { describe, expect, it } from 'vitest';
 import { buildChart } from '~/domain/report/chart';
 import { computePreview } from '~/domain/table/compute-preview';
@@ -8,8 +9,9 @@ describe('a chart of a computed table', () => {
   it('gives the worked answers of the sloped cistern', async () => {
     const input = cisternInput();
     const { table, rows } = await issueTable(input.design, input.settings, 5);
-    const preview = await computePreview(input.design);
-    const report = buildChart({ ...input, ...table, rows, preview });
+    const { space, frame } = await computePreview(input.design);
+    const sketch = sketchOf(space, frame);
+    const report = buildChart({ ...input, ...table, rows, sketch });
     const litres = new Map(report.rows.map(({ cells }) => [cells[0], cells[1]]));
     // closed form: 0.05 h + h²/300 up to 60 mm, 15 + 0.45 (h − 60) above
     expect(['30', '60', '150', '300'].map((depth) => litres.get(depth))).toEqual([

@@ -1,3 +1,4 @@
+import { sketchOf } from '~/domain/report/sketch';
 import type { ChartInput } from '~/domain/report/chart-input';
 import type { ReadingFrame, TankMesh } from '~/domain/table/preview';
 import type { IssuedRow } from '~/domain/table/request';
@@ -157,8 +158,8 @@ export function cisternInput(changes: Partial<ChartInput> = {}): ChartInput {
     capacityL: 123,
     errorL: 2e-6,
     rows: rowsOf(cistern, 5),
-    preview: {
-      space: prismMesh(
+    sketch: sketchOf(
+      prismMesh(
         [
           [0, 0],
           [100, 0],
@@ -169,8 +170,8 @@ export function cisternInput(changes: Partial<ChartInput> = {}): ChartInput {
         500,
         'y',
       ),
-      frame: frameOf(300, [50, 250]),
-    },
+      frameOf(300, [50, 250]),
+    ),
     options: { paper: 'a4', length: 'mm', volume: 'l' },
     ...changes,
   };
@@ -199,8 +200,8 @@ export function vHullInput(changes: Partial<ChartInput> = {}): ChartInput {
     heightMm: 500,
     capacityL: 180,
     rows: rowsOf(vHull, 5),
-    preview: {
-      space: prismMesh(
+    sketch: sketchOf(
+      prismMesh(
         [
           [300, 0],
           [600, 500],
@@ -209,8 +210,8 @@ export function vHullInput(changes: Partial<ChartInput> = {}): ChartInput {
         1200,
         'y',
       ),
-      frame: frameOf(500, [300, 600]),
-    },
+      frameOf(500, [300, 600]),
+    ),
     ...changes,
   };
 }
@@ -232,10 +233,7 @@ export function heatingOilInput(changes: Partial<ChartInput> = {}): ChartInput {
     heightMm: 1200,
     capacityL: shape.volumeL(1200),
     rows: rowsOf(shape, 5),
-    preview: {
-      space: prismMesh(circle(600, 48), 2000, 'x'),
-      frame: frameOf(1200, [300, 600]),
-    },
+    sketch: sketchOf(prismMesh(circle(600, 48), 2000, 'x'), frameOf(1200, [300, 600])),
     ...changes,
   };
 }
@@ -258,7 +256,7 @@ export function greyWaterInput(changes: Partial<ChartInput> = {}): ChartInput {
     heightMm: 320,
     capacityL: shape.volumeL(320),
     rows: rowsOf(shape, 5),
-    preview: { space: prismMesh(circle(160, 48), 800, 'x'), frame: frameOf(320, [400, 160]) },
+    sketch: sketchOf(prismMesh(circle(160, 48), 800, 'x'), frameOf(320, [400, 160])),
     ...changes,
   };
 }

@@ -1,3 +1,5 @@
+import { rmSync } from 'node:fs';
+import { join } from 'node:path';
 import { brotliDecompressSync, gunzipSync } from 'node:zlib';
 import { afterEach, describe, expect, it } from 'vitest';
 import type { Handler } from '~/server/front/front';
@@ -28,6 +30,20 @@ const echo: Handler = async (request, response, _next, locals) => {
 };
 const never: Handler = () => Promise.reject(new Error('the framework must not see this request'));
 const json = { 'Content-Type': 'application/json' };
+
+describe('a file that cannot be read any more', () => {
+  it('is one answer and one line of the log, and the server goes on', async () => {
+    const front = await open(echo);
+    const headers = { Host: 'tarnside.example' };
+    rmSync(join(front.folder, 'favicon.svg'));
+    const answer = await front.ask('/favicon.svg', { headers });
+    expect(answer.status).toBe(500);
+    expect(answer.headers['content-security-policy']).toContain("default-src 'none'");
+    expect(answer.headers.etag).toBeUndefined();
+    expect(front.lines.filter((line) => line.includes('the front failed'))).toHaveLength(1);
+    expect((await front.ask('/', { headers })).status).toBe(200);
+  });
+});
 
 describe('host', () => {
   it.each([

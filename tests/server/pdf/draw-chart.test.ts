@@ -117,7 +117,7 @@ const cases: [string, ChartInput][] = [
   ['V hull, Letter', vHullInput({ options: letters })],
   ['heating oil', heatingOilInput({ options: { paper: 'a4', length: 'cm', volume: 'impgal' } })],
   ['grey water', greyWaterInput()],
-  ['no sketch', cisternInput({ preview: null })],
+  ['no sketch', cisternInput({ sketch: null })],
   [
     'long names, superseded',
     cisternInput({

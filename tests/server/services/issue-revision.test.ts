@@ -1,3 +1,4 @@
+import { computePreview } from '~/domain/table/compute-preview';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { DipwrightError } from '~/domain/errors';
 import { createComputePool, type ComputePool } from '~/server/jobs/compute-pool';
@@ -217,7 +218,7 @@ describe('with the real engine', () => {
       attitude: { pitch: 5, roll: -3 },
       stick: { at: [500, 250] as [number, number] },
     };
-    const { frame } = await pool.sketch(design);
+    const { frame } = await computePreview(design);
     expect(levelPerReading(design)).toBeCloseTo(frame.levelPerReading, 14);
     const { tank } = await addDraft(house, team, { design });
     const context = { ...house.context, computePool: pool };

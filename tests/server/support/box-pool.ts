@@ -1,4 +1,5 @@
 import { invalid } from '~/domain/errors';
+import { sketchOf } from '~/domain/report/sketch';
 import type { IssuedRow, TableRow } from '~/domain/table/request';
 import type { TankDocument } from '~/domain/tank/document';
 import type { ComputePool } from '~/server/jobs/compute-pool';
@@ -41,7 +42,7 @@ export function boxPool(): ComputePool {
         lowestLevelMm: 0,
         highestLevelMm: height,
       };
-      return { space, frame };
+      return sketchOf(space, frame);
     },
     async close() {},
   };
