@@ -32,6 +32,20 @@ const cells = 24;
  * is cut right through along the line of sight counts as not filled.
  */
 export function silhouetteOf(design: TankDocument): SilhouetteDrawing {
+  const key = JSON.stringify(design.solids);
+  const known = drawn.get(key);
+  if (known) return known;
+  const drawing = draw(design);
+  if (drawn.size >= mostDrawn) drawn.delete(drawn.keys().next().value!);
+  drawn.set(key, drawing);
+  return drawing;
+}
+
+/** The last drawings by their solids: a home page shows the same shapes again and again. */
+const drawn = new Map<string, SilhouetteDrawing>();
+const mostDrawn = 500;
+
+function draw(design: TankDocument): SilhouetteDrawing {
   const [side, end] = [0, 1].map((axis) => view(design.solids, axis as 0 | 1)) as [View, View];
   const chosen = end.filled < side.filled - 0.02 ? end : side;
   const { frame, outlines } = chosen;

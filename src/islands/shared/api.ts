@@ -4,6 +4,7 @@ import { handover } from '~/domain/access/handover';
 import { me, member } from '~/domain/access/member';
 import { installation, type NewInstallation } from '~/domain/installation/installation';
 import { reading, type NewReading } from '~/domain/reading/reading';
+import { depthAnswer } from '~/domain/table/depth-answer';
 import { computedTable, issuedRow } from '~/domain/table/request';
 import { tankDocument, type TankDocument } from '~/domain/tank/document';
 import {
@@ -18,19 +19,7 @@ import { call, type Answered } from './call';
 
 /** The only caller of `/api/v1` in the browser. Refusals are thrown as `ApiProblem`. */
 
-const issued = z.object({
-  id: z.string(),
-  letter: z.string(),
-  capacityL: z.number(),
-  errorL: z.number(),
-  hash: z.string(),
-});
 const issuedTable = z.object({ revision: revisionSummary, rows: z.array(issuedRow) });
-const depthAnswer = z.object({
-  depthMm: z.number(),
-  volumeL: z.number(),
-  plusMinusMm: z.number().nullable().optional(),
-});
 
 const tankPath = (id: string): string => `/tanks/${encodeURIComponent(id)}`;
 const revisionPath = (id: string): string => `/revisions/${encodeURIComponent(id)}`;
@@ -69,7 +58,7 @@ export const saveDesign = (id: string, body: TankDocument, etag: string) =>
   });
 
 export const issueRevision = (id: string, body: NewRevision) =>
-  valueOf(call(`${tankPath(id)}/revisions`, { method: 'POST', body, answer: issued }));
+  valueOf(call(`${tankPath(id)}/revisions`, { method: 'POST', body, answer: revisionSummary }));
 export const listRevisions = (id: string) =>
   valueOf(call(`${tankPath(id)}/revisions`, { answer: z.array(revisionSummary) }));
 export const readRevision = (id: string) =>

@@ -31,3 +31,12 @@ it('shows a lying cylinder from its end and a wheel arch where it cuts in', () =
   expect(width).toBeCloseTo(height!, 5);
   expect(drawn('wheel-arch').displaces).toHaveLength(1);
 });
+
+it('draws a shape once, however often it is shown, and another shape anew', () => {
+  const { design } = startingPoints.find(({ code }) => code === 'wheel-arch')!;
+  const first = silhouetteOf(structuredClone(design));
+  expect(silhouetteOf({ ...structuredClone(design), name: 'Another name' })).toBe(first);
+  const [body, ...rest] = design.solids;
+  const taller = { ...design, solids: [{ ...body!, height: 400 } as typeof body & {}, ...rest] };
+  expect(silhouetteOf(taller as typeof design)).not.toEqual(first);
+});
