@@ -166,7 +166,7 @@ function Drawing({ preview, plate, projection, levels, selected }: TankCanvasPro
         colour={ink.ink2}
         widthPx={1.1}
         where="always"
-        order={9}
+        order={7}
         resolution={resolution}
       />
       <Lines
