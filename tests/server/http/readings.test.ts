@@ -30,13 +30,13 @@ it('keeps a reading once: 201, again the same answer, another body 422', async (
   const first = await send('key-1', dip);
   expect(first.status).toBe(201);
   const body = await first.json();
-  // the box of 1000 × 500 mm: half a litre a millimetre
+  // the box of 1000 × 500 × 300 mm: half a litre a millimetre; 95 % of its 150 L is the safe fill
   expect(body).toMatchObject({
     at: '2026-11-30T08:15:00.000Z',
     depthMm: 120,
     volumeL: 60,
     usableL: 60,
-    roomL: 90,
+    roomL: 82.5,
     revision: 'A',
     by: 'owner of Tarnside Outfitters',
     note: 'After the weekend',
