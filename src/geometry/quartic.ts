@@ -1,3 +1,5 @@
+import { columns } from './columns';
+
 /**
  * A sum of polynomials of degree ≤ 4 in the level, each of which starts or ends at some row. Each is
  * given expanded about the row it starts at and carried on from row to row; global powers of the
@@ -11,8 +13,7 @@ export interface CarriedQuartic {
 }
 
 export function carriedQuartic(rows: number): CarriedQuartic {
-  const one = () => new Float64Array(rows);
-  return { joining: [one(), one(), one(), one(), one()], run: new Float64Array(5) };
+  return { joining: columns(5, rows), run: new Float64Array(5) };
 }
 
 /** Adds w·(c3·t³ + c4·t⁴) from a row on, t the distance of that row from the polynomial's own zero. */

@@ -1,3 +1,4 @@
+import { columns } from './columns';
 import { horizontalAxes } from './horizontal-axes';
 import { levels as vertexLevels, type Mesh } from './mesh';
 import { advance, carriedQuartic, join } from './quartic';
@@ -37,11 +38,7 @@ export function sweep(mesh: Mesh, up: Vec3, atLevels: Float64Array): Sweep {
   const b = vertexLevels(mesh, e2);
   const slack = 1e-9 * span(z);
 
-  const volume = new Float64Array(rows);
-  const surface = new Float64Array(rows);
-  const integral = new Float64Array(rows);
-  const alongA = new Float64Array(rows);
-  const alongB = new Float64Array(rows);
+  const [volume, surface, integral, alongA, alongB, mx, my, mz] = columns(8, rows);
   const q = carriedQuartic(rows);
   const ma = carriedQuartic(rows);
   const mb = carriedQuartic(rows);
@@ -153,7 +150,6 @@ export function sweep(mesh: Mesh, up: Vec3, atLevels: Float64Array): Sweep {
     return from;
   }
 
-  const [mx, my, mz] = [new Float64Array(rows), new Float64Array(rows), new Float64Array(rows)];
   const [ux, uy, uz] = up;
   const [ax, ay, az] = e1;
   const [bx, by, bz] = e2;
