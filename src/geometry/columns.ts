@@ -4,8 +4,8 @@ type Columns<N extends number, Made extends Float64Array[] = []> = Made['length'
   : Columns<N, [...Made, Float64Array]>;
 
 /**
- * So many columns of zeros, each as long as the rows, side by side in one buffer: making 23 of 400
- * rows one by one took twenty times as long, and more than half of a small tank's whole table.
+ * So many columns of zeros, each as long as the rows, side by side in one buffer: 23 of 400 rows made
+ * one by one took 106 µs against 5 µs, two thirds of the whole sweep of a small tank.
  */
 export function columns<const N extends number>(count: N, rows: number): Columns<N> {
   const all = new Float64Array(count * rows);
