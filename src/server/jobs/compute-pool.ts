@@ -55,6 +55,7 @@ export function createComputePool(options: ComputePoolOptions): ComputePool {
     seconds: number,
   ): Promise<ComputedTable | IssuedTable | Sketch> {
     if (closed) throw unavailable('The server is stopping. Try again in a moment.');
+    const product = task.work === 'sketch' ? 'sketch' : 'table';
     const signal = AbortSignal.timeout(seconds * 1000);
     let outcome: ComputeOutcome;
     try {
@@ -62,7 +63,7 @@ export function createComputePool(options: ComputePoolOptions): ComputePool {
     } catch (error) {
       if (signal.aborted) {
         throw unavailable(
-          `The table was not ready after ${seconds} seconds. Try again, or take a simpler shape or a larger step.`,
+          `The ${product} was not ready after ${seconds} seconds. Try again, or take a simpler shape${task.work === 'sketch' ? '' : ' or a larger step'}.`,
           error,
         );
       }
@@ -72,7 +73,7 @@ export function createComputePool(options: ComputePoolOptions): ComputePool {
       if (closed) throw unavailable('The server is stopping. Try again in a moment.', error);
       onError(error);
       throw unavailable(
-        'The table could not be computed. Try again; if it happens again, change the shape a little.',
+        `The ${product} could not be computed. Try again; if it happens again, change the shape a little.`,
         error,
       );
     }

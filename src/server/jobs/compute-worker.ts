@@ -1,8 +1,7 @@
 import { readFile } from 'node:fs/promises';
 import { createRequire } from 'node:module';
 import { DipwrightError } from '~/domain/errors';
-import { sketchOf } from '~/domain/report/sketch';
-import { computePreview } from '~/domain/table/compute-preview';
+import { sketchDesign } from '~/domain/report/sketch-design';
 import { computeTable } from '~/domain/table/compute-table';
 import { issueTable } from '~/domain/table/issue-table';
 import { loadManifold } from '~/geometry/manifold';
@@ -30,9 +29,7 @@ async function work(task: ComputeTask) {
       return computeTable(task.design, task.readings);
     case 'issue':
       return issueTable(task.design, task.settings, task.stepMm);
-    case 'sketch': {
-      const { space, frame } = await computePreview(task.design);
-      return sketchOf(space, frame);
-    }
+    case 'sketch':
+      return sketchDesign(task.design);
   }
 }

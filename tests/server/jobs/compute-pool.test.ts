@@ -53,6 +53,45 @@ describe('the compute pool', { timeout: 60_000 }, () => {
     });
   });
 
+  it('sketches sixty balls in a thread: small, soon, while the event loop answers', async () => {
+    const balls = design(
+      Array.from({ length: 60 }, (_, i) => ({
+        id: `ball ${i}`,
+        role: 'holds',
+        kind: 'sphere',
+        diameter: 200,
+        at: [160 * (i % 10), 160 * Math.floor(i / 10), 0],
+      })),
+    );
+    let [last, longestMs] = [performance.now(), 0];
+    const timer = setInterval(() => {
+      longestMs = Math.max(longestMs, performance.now() - last);
+      last = performance.now();
+    }, 1);
+    const start = performance.now();
+    const sketch = await pool.sketch(balls);
+    const tookMs = performance.now() - start;
+    clearInterval(timer);
+    expect(sketch.lines.length).toBeGreaterThan(50);
+    // lines of a print, not a mesh of a hundred thousand triangles
+    expect(JSON.stringify(sketch).length).toBeLessThan(500_000);
+    expect(tookMs).toBeLessThan(8000);
+    // far under what the work takes; two busy processors alone make some tens of ms
+    expect(longestMs).toBeLessThan(500);
+    console.log(
+      `sketch of 60 balls: ${Math.round(tookMs)} ms, loop held at most ${Math.round(longestMs)} ms`,
+    );
+  });
+
+  it('says of a sketch that takes too long that it is the sketch', async () => {
+    const hasty = createComputePool({ threads: 1, limitSeconds: { table: 0.005 } });
+    await expect(hasty.sketch(slopedCistern)).rejects.toMatchObject({
+      code: 'unavailable',
+      message: expect.stringMatching(/^The sketch was not ready after 0.005 seconds/),
+    });
+    await hasty.close();
+  });
+
   it('gives up at the time limit, says so, and works on', async () => {
     const hasty = createComputePool({ threads: 1, limitSeconds: { table: 0.005 } });
     await expect(hasty.table(slopedCistern, { stepMm: 1 })).rejects.toMatchObject({

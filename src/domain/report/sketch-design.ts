@@ -1,0 +1,31 @@
+import { loadManifold } from '../../geometry/manifold';
+import { shifted } from '../../geometry/mesh';
+import { liquidSpace } from '../table/liquid-space';
+import { readingFrame } from '../table/reading-frame';
+import { refuseUncomputable } from '../table/refuse-uncomputable';
+import type { TankDocument } from '../tank/document';
+import { placedSolid, type PlacedSolid } from '../tank/placed-solid';
+import { sketchOf, type Sketch } from './sketch';
+
+/**
+ * The sketch that a print shows of a design, mm, drawn in the tank's own frame. The mesh serves the eye only:
+ * a circle is drawn with 64 chords or fewer, stick and overall sizes come from closed form.
+ * Throws `invalid` like computeTable.
+ */
+export async function sketchDesign(document: TankDocument): Promise<Sketch> {
+  refuseUncomputable(document);
+  await loadManifold();
+  const solids = document.solids.map(placedSolid);
+  const space = liquidSpace(solids, facetsFor(solids));
+  const { mesh, origin } = space;
+  return sketchOf(shifted(mesh, origin), readingFrame(document, solids, space));
+}
+
+/**
+ * Triangles of a ball grow with the square of its facets and each is held against the edges near it: of many
+ * curved solids each is small on paper, and fewer chords keep two hundred balls below 60 000 triangles.
+ */
+function facetsFor(solids: readonly PlacedSolid[]): number {
+  const curved = solids.filter(({ kind }) => kind.curved).length;
+  return curved <= 12 ? 64 : curved <= 48 ? 32 : 16;
+}
