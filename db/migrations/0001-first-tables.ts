@@ -120,7 +120,6 @@ const statements = [
     level_per_reading DOUBLE NOT NULL,
     capacity_l DOUBLE NOT NULL,
     error_l DOUBLE NOT NULL,
-    unusable_l DOUBLE NOT NULL,
     row_count INT NOT NULL,
     hash CHAR(64) NOT NULL,
     note VARCHAR(500) NULL,

@@ -1,7 +1,5 @@
 import { requirePermission } from '~/domain/access/permissions';
 import { DipwrightError, invalid, notFound } from '~/domain/errors';
-import { unusableL } from '~/domain/table/answer-at';
-import { curveFromRows } from '~/domain/table/curve';
 import type { IssuedTable } from '~/domain/table/issued-table';
 import type { TankDocument } from '~/domain/tank/document';
 import type { TankSettings } from '~/domain/tank/settings';
@@ -99,15 +97,13 @@ async function contentOf(
 function freeze({ design, settings }: Content, { table, rows }: IssuedTable) {
   const { heightMm } = table;
   refuseOutletAbove(settings, heightMm);
-  const factor = levelPerReading(design);
   return {
     design: JSON.stringify(design),
     settings: JSON.stringify(settings),
     heightMm,
-    levelPerReading: factor,
+    levelPerReading: levelPerReading(design),
     capacityL: table.capacityL,
     errorL: table.errorL,
-    unusableL: unusableL({ curve: curveFromRows(rows, factor), settings, heightMm }),
     rowCount: rows.length,
     hash: revisionHash(design, settings, rows),
   };

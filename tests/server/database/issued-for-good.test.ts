@@ -40,7 +40,7 @@ describe('the database itself refuses to change what was issued', () => {
     await expect(
       run(
         `INSERT INTO revisions SELECT UUID(), workshop_id, tank_id, number, letter, design, settings, content_hash,
-           step_mm, height_mm, level_per_reading, capacity_l, error_l, unusable_l, row_count, hash, note, issued_by,
+           step_mm, height_mm, level_per_reading, capacity_l, error_l, row_count, hash, note, issued_by,
            issued_at FROM revisions WHERE id = ?`,
         [made.revision.id],
       ),

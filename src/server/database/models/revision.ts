@@ -15,7 +15,6 @@ export interface RevisionRecord {
   levelPerReading: number;
   capacityL: number;
   errorL: number;
-  unusableL: number;
   rowCount: number;
   hash: string;
   note: string | null;
@@ -40,7 +39,6 @@ export function defineRevision(sequelize: Sequelize): ModelStatic<Model<Revision
       levelPerReading: { type: DataTypes.DOUBLE, allowNull: false, field: 'level_per_reading' },
       capacityL: { type: DataTypes.DOUBLE, allowNull: false, field: 'capacity_l' },
       errorL: { type: DataTypes.DOUBLE, allowNull: false, field: 'error_l' },
-      unusableL: { type: DataTypes.DOUBLE, allowNull: false, field: 'unusable_l' },
       rowCount: { type: DataTypes.INTEGER, allowNull: false, field: 'row_count' },
       hash: { type: DataTypes.CHAR(64), allowNull: false },
       note: { type: DataTypes.STRING(500), allowNull: true },
