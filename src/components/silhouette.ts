@@ -21,13 +21,12 @@ interface Outline {
   sight: readonly [number, number];
 }
 
-/** Directions in which each solid is felt: right angles and 45° among them, so that boxes stay sharp. */
-const directions = 360;
 const cells = 24;
 
 /**
- * The small picture of a tank: every solid's outline, exact for flat faces at whole degrees and
- * within a thousandth of its size otherwise, from the kinds' support functions (all of them convex).
+ * The small picture of a tank: every solid's outline, from the kinds' support functions (all of them
+ * convex). Of a dozen solids or fewer exact for flat faces at whole degrees and within a thousandth of its
+ * size otherwise; of more, each small in the picture, within a hundredth.
  * Of side and end the one that fills less of its frame, which is the one that tells more; only what
  * is cut right through along the line of sight counts as not filled.
  */
@@ -77,7 +76,8 @@ interface View {
 
 /** `across`: the axis that runs to the right, 0 = x (from the side), 1 = y (from the end). */
 function view(solids: readonly Solid[], across: 0 | 1): View {
-  const outlines = solids.map((solid) => outlineOf(solid, across));
+  const felt = feelers(directionsFor(solids.length), across);
+  const outlines = solids.map((solid) => outlineOf(solid, across, felt));
   const all = outlines.filter(({ role }) => role === 'holds').flatMap(({ points }) => points);
   const xs = all.map(([x]) => x);
   const ys = all.map(([, y]) => y);
@@ -86,20 +86,40 @@ function view(solids: readonly Solid[], across: 0 | 1): View {
   return { outlines, frame, filled: filledShare(outlines, frame) };
 }
 
-/** Where neighbouring tangents meet: the corners, each once. */
-function outlineOf(solid: Solid, across: 0 | 1): Outline {
-  const placed = placedSolid(solid);
-  const lines = Array.from({ length: directions }, (_, i) => {
-    const angle = (2 * Math.PI * i) / directions;
+/**
+ * Directions in which each solid is felt: right angles and 45° among them, so that boxes stay sharp. Of two
+ * hundred solids a picture must still be drawn, and sent, in no time.
+ */
+function directionsFor(solids: number): number {
+  return solids <= 12 ? 360 : solids <= 60 ? 72 : 24;
+}
+
+interface Feeler {
+  c: number;
+  s: number;
+  up: Vec3;
+}
+
+function feelers(count: number, across: 0 | 1): Feeler[] {
+  return Array.from({ length: count }, (_, i) => {
+    const angle = (2 * Math.PI * i) / count;
     const [c, s] = [Math.cos(angle), Math.sin(angle)];
-    return { c, s, reach: highestLevel(placed, across === 0 ? [c, 0, s] : [0, c, s]) };
+    return { c, s, up: across === 0 ? [c, 0, s] : [0, c, s] };
   });
+}
+
+/** Where neighbouring tangents meet: the corners, each once. */
+function outlineOf(solid: Solid, across: 0 | 1, felt: readonly Feeler[]): Outline {
+  const placed = placedSolid(solid);
+  const reaches = felt.map(({ up }) => highestLevel(placed, up));
   const points: Point[] = [];
-  lines.forEach((a, i) => {
-    const b = lines[(i + 1) % directions]!;
+  felt.forEach((a, i) => {
+    const next = (i + 1) % felt.length;
+    const b = felt[next]!;
+    const [reachA, reachB] = [reaches[i]!, reaches[next]!];
     const det = a.c * b.s - a.s * b.c;
-    const x = (a.reach * b.s - b.reach * a.s) / det;
-    const z = (a.c * b.reach - b.c * a.reach) / det;
+    const x = (reachA * b.s - reachB * a.s) / det;
+    const z = (a.c * reachB - b.c * reachA) / det;
     const last = points.at(-1);
     // y runs down on the drawing
     if (last === undefined || Math.hypot(last[0] - x, last[1] + z) > 1e-6) points.push([x, -z]);
@@ -122,16 +142,33 @@ function filledShare(outlines: readonly Outline[], frame: Frame): number {
     ({ role, sight }) =>
       role === 'displaces' && sight[0] <= low + slack && sight[1] >= high - slack,
   );
-  let count = 0;
-  for (let i = 0; i < cells * cells; i += 1) {
-    const point: Point = [
-      frame.minX + (((i % cells) + 0.5) / cells) * frame.width,
-      frame.minY + ((Math.floor(i / cells) + 0.5) / cells) * frame.height,
-    ];
-    const inside = (some: readonly Outline[]) => some.some(({ points }) => contains(points, point));
-    if (inside(held) && !inside(cuts)) count += 1;
+  const [inHeld, inCut] = [covered(held, frame), covered(cuts, frame)];
+  return inHeld.filter((inside, i) => inside && !inCut[i]).length / (cells * cells);
+}
+
+/** Which cells of the frame have their middle inside one of the outlines; each is held against its own few. */
+function covered(some: readonly Outline[], { minX, minY, width, height }: Frame): boolean[] {
+  const inside = Array.from({ length: cells * cells }, () => false);
+  const [stepX, stepY] = [width / cells, height / cells];
+  for (const { points } of some) {
+    const columns = middlesWithin(points, 0, minX, stepX);
+    const rows = middlesWithin(points, 1, minY, stepY);
+    for (let row = rows.first; row <= rows.last; row += 1) {
+      for (let column = columns.first; column <= columns.last; column += 1) {
+        const i = row * cells + column;
+        inside[i] ||= contains(points, [minX + (column + 0.5) * stepX, minY + (row + 0.5) * stepY]);
+      }
+    }
   }
-  return count / (cells * cells);
+  return inside;
+}
+
+function middlesWithin(points: readonly Point[], axis: 0 | 1, from: number, step: number) {
+  const along = points.map((point) => (point[axis] - from) / step - 0.5);
+  return {
+    first: Math.max(0, Math.ceil(Math.min(...along) - 1e-9)),
+    last: Math.min(cells - 1, Math.floor(Math.max(...along) + 1e-9)),
+  };
 }
 
 /** Whether a convex polygon holds a point, whichever way it turns. */
