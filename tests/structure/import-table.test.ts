@@ -48,6 +48,23 @@ describe('the import table', () => {
   });
 });
 
+it('is told in DEVELOPERS.md as it is enforced', () => {
+  const page = readFileSync(join(checkout, 'DEVELOPERS.md'), 'utf8');
+  const told = [...page.matchAll(/^\| `src\/([^`]+)` \| .* \| ([^|]+) \|$/gm)].map(
+    ([, room = '', mayImport = '']) => [
+      room,
+      mayImport === 'nothing of ours' ? [] : mayImport.split(', ').map(roomCalled).sort(),
+    ],
+  );
+  const enforced = Object.entries(rooms).map(([room, may]) => [room, [...may].sort()]);
+  expect(Object.fromEntries(told)).toEqual(Object.fromEntries(enforced));
+});
+
+/** The page leaves `server/` away where the table lists what a room may import. */
+function roomCalled(name: string): string {
+  return name in rooms ? name : `server/${name}`;
+}
+
 /** In each the first file is the culprit. */
 const planted: { fault: string; rule: string; files: Record<string, string> }[] = [
   {
