@@ -78,6 +78,7 @@ test('what cannot be is asked back beside the field, and the last shape stays', 
   await expect(
     page.getByText(/The stick does not stand over the liquid space/).first(),
   ).toBeVisible();
+  await expect(page.getByText(/those of the last shape that could be computed/)).toBeVisible();
   await expect(page.getByRole('button', { name: 'Issue A' })).toBeDisabled();
 });
 

@@ -151,6 +151,7 @@ function BenchSheet({ tank, design, etag, role, person }: BenchProps) {
       {problem && (
         <p role="alert" className="fault border-b border-hair px-4 py-3 sm:px-6">
           {problem.message}
+          {preview && ' The figures below are those of the last shape that could be computed.'}
         </p>
       )}
       {preview?.notices.map((notice) => (
