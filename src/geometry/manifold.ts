@@ -4,8 +4,10 @@ import Module, {
   type Vec2 as MutableVec2,
 } from 'manifold-3d';
 import { areaPreservingFactor } from './circle';
+import { distinctRounded } from './distinct-rounded';
 import { exactPoints } from './exact-points';
 import type { Mesh } from './mesh';
+import { placedMesh } from './placed-mesh';
 import { toTank, type Placing } from './placing';
 import { prismMesh } from './prism-mesh';
 import { axisOrder, type Axis, type Shape } from './shape';
@@ -53,6 +55,7 @@ export interface PlacedShape {
 /** The mesh of one shape alone, in the tank's frame moved by −origin. */
 export function meshOf(placed: PlacedShape, origin: Vec3): Mesh {
   const { shape, place } = placed;
+  if (shape.form === 'mesh') return placedMesh(shape.mesh, place, origin);
   const direct = shape.form === 'extrusion' ? prismMesh(shape, place, origin) : null;
   if (direct) return direct;
   const made = make(placed, origin);
@@ -100,6 +103,7 @@ function loadedLibrary(): ManifoldToplevel {
 
 function make({ shape, place }: PlacedShape, origin: Vec3): Manifold {
   const { Manifold } = loadedLibrary();
+  if (shape.form === 'mesh') return ofMesh(placedMesh(shape.mesh, place, origin));
   const prism = shape.form === 'extrusion' ? prismMesh(shape, place, origin) : null;
   if (prism) {
     // a convex prism is the hull of its corners, which keeps their doubles and costs half as much
@@ -124,6 +128,28 @@ function make({ shape, place }: PlacedShape, origin: Vec3): Manifold {
         vertices[i] = x - origin[0];
         vertices[i + 1] = y - origin[1];
         vertices[i + 2] = z - origin[2];
+      }
+    });
+  } finally {
+    raw.delete();
+  }
+}
+
+/**
+ * A closed mesh taken in with its doubles. The library takes 32-bit positions and sorts vertices, so each goes
+ * in under a rounded place of its own and is warped to where it stands. Throws when the mesh is not closed.
+ */
+function ofMesh({ positions, triangles }: Mesh): Manifold {
+  const { Manifold, Mesh: LibraryMesh } = loadedLibrary();
+  const { rounded, vertexAt } = distinctRounded(positions);
+  const raw = Manifold.ofMesh(
+    new LibraryMesh({ numProp: 3, vertProperties: rounded, triVerts: triangles }),
+  );
+  try {
+    return raw.warpBatch((vertices) => {
+      for (let i = 0; i < vertices.length; i += 3) {
+        const vertex = vertexAt(vertices[i]!, vertices[i + 1]!, vertices[i + 2]!);
+        for (let axis = 0; axis < 3; axis += 1) vertices[i + axis] = positions[3 * vertex + axis]!;
       }
     });
   } finally {

@@ -1,3 +1,4 @@
+import type { Mesh } from './mesh';
 import type { Vec3 } from './vec3';
 
 export type Axis = 'x' | 'y' | 'z';
@@ -28,6 +29,11 @@ export type Shape =
       phase: number;
       /** Stretch along own x, y, z after turning; 1, 1, 1 for a body of revolution. */
       stretch: Vec3;
+    }
+  | {
+      form: 'mesh';
+      /** Closed, outward, in the own frame; vertices that are one place are one vertex. */
+      mesh: Mesh;
     };
 
 const order: Record<Axis, readonly [number, number, number]> = {

@@ -93,7 +93,7 @@ for (const design of [...startingPoints.map((one) => one.design), cylinderAndBox
   const ratio = theirsMs / oursMs;
   const whole = enclosedVolume(mesh);
   const gap = Math.max(...build().map((volume, row) => Math.abs(volume - volumes[row]!))) / whole;
-  const limited = solids.length <= 2 && solids.some(({ kind }) => kind.curved);
+  const limited = solids.length <= 2 && solids.some(({ kind, solid }) => kind.curved(solid));
   if (limited && ratio < wantedRatio) missed += 1;
   console.log(
     `  ${design.name}: ${mesh.triangles.length / 3} triangles, ours ${oursMs.toFixed(2)} ms, cut row by row ` +

@@ -26,6 +26,6 @@ export async function sketchDesign(document: TankDocument): Promise<Sketch> {
  * curved solids each is small on paper, and fewer chords keep two hundred balls below 60 000 triangles.
  */
 function facetsFor(solids: readonly PlacedSolid[]): number {
-  const curved = solids.filter(({ kind }) => kind.curved).length;
+  const curved = solids.filter(({ kind, solid }) => kind.curved(solid)).length;
   return curved <= 12 ? 64 : curved <= 48 ? 32 : 16;
 }

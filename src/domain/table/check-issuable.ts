@@ -21,7 +21,7 @@ export async function checkIssuable(document: TankDocument): Promise<string[]> {
   await loadManifold();
   const solids = document.solids.map(placedSolid);
   const space = liquidSpace(solids, publishedFacets(solids));
-  const round = solids.some(({ kind }) => kind.curved);
+  const round = solids.some(({ kind, solid }) => kind.curved(solid));
   const reasons: string[] = [];
 
   const pieces = piecesOf(space.mesh);
@@ -58,7 +58,7 @@ function piecesWhenSwollen(
       .filter(({ solid }) => solid.role === role)
       .map((one) => {
         const { shape, place } = placedShape(one, space.facets);
-        if (!one.kind.curved) return { shape, place };
+        if (!one.kind.curved(one.solid)) return { shape, place };
         const byMm = direction * (thinMm + facetStandOffMm(one, space.facets));
         return { shape: swollen(shape, byMm), place };
       });

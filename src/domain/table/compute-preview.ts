@@ -41,7 +41,7 @@ export async function computePreview(document: TankDocument): Promise<Preview> {
   const capacityL = space.volumeMm3 / 1e6;
 
   let errorL = roundingOfCapacity * capacityL;
-  if (solids.some(({ kind }) => kind.curved)) {
+  if (solids.some(({ kind, solid }) => kind.curved(solid))) {
     const coarse = liquidSpace(solids, previewFacets / 2);
     tableRows(coarse, frame, depths).forEach(({ volumeL }, i) => {
       errorL = Math.max(errorL, Math.abs(rows[i]!.volumeL - volumeL));

@@ -31,7 +31,7 @@ export async function computeTable(
   const { undrainableL, trappedL } = openings(document, solids, fine, frame.up);
 
   let errorL = (roundingOfCapacity * fine.volumeMm3) / 1e6;
-  if (solids.some(({ kind }) => kind.curved)) {
+  if (solids.some(({ kind, solid }) => kind.curved(solid))) {
     const coarse = liquidSpace(solids, facets);
     const between = Array.from({ length: 201 }, (_, i) => (i / 200) * frame.heightMm);
     const checked = [...depths, ...between];

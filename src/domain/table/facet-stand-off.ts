@@ -5,6 +5,7 @@ import type { PlacedSolid } from '../tank/placed-solid';
  * corners of an area-preserving polygon), twice that on a ball; 0 for flat faces.
  */
 export function facetStandOffMm({ solid, kind }: PlacedSolid, facets: number): number {
-  if (!kind.curved) return 0;
-  return ((kind.curved === 'twice' ? 4 : 2) * Math.max(...kind.extent(solid))) / facets ** 2;
+  const curved = kind.curved(solid);
+  if (!curved) return 0;
+  return ((curved === 'twice' ? 4 : 2) * Math.max(...kind.extent(solid))) / facets ** 2;
 }

@@ -5,8 +5,8 @@ import type { PlacedSolid } from '../tank/placed-solid';
  * within a second or so. A ball has as many triangles at 256 as sixty cylinders.
  */
 export function publishedFacets(solids: readonly PlacedSolid[]): 512 | 256 | 128 {
-  const once = solids.filter(({ kind }) => kind.curved === 'once').length;
-  const twice = solids.filter(({ kind }) => kind.curved === 'twice').length;
+  const once = solids.filter(({ kind, solid }) => kind.curved(solid) === 'once').length;
+  const twice = solids.filter(({ kind, solid }) => kind.curved(solid) === 'twice').length;
   if (twice === 0 && once <= 4) return 512;
   return twice <= 2 && once <= 40 ? 256 : 128;
 }

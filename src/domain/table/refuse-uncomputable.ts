@@ -28,7 +28,8 @@ function faultsOf(solid: Solid): readonly { path: readonly string[]; detail: str
   const kind = kindOf(solid);
   const tooSmall = kind
     .sizes(solid)
-    .filter(({ path }) => {
+    .filter(({ path, coordinate }) => {
+      if (coordinate) return false;
       // 0 itself is the schema's to allow: the tip of a cone
       const size = Number(valueAt(solid, path));
       return size > 0 && size < thinMm;

@@ -50,7 +50,7 @@ describe.each(examples.map((solid) => [kindOf(solid).words(solid), solid] as con
       kind.extent(example).forEach((length, axis) => {
         const along = mesh.positions.filter((_, i) => i % 3 === axis);
         const slack =
-          ((kind.curved === 'twice' ? 4 : 2) * Math.max(...kind.extent(example))) / 128 ** 2;
+          ((kind.curved(example) === 'twice' ? 4 : 2) * Math.max(...kind.extent(example))) / 128 ** 2;
         expect(Math.min(...along)).toBeGreaterThan(-slack);
         expect(Math.max(...along)).toBeLessThan(length + slack);
       });

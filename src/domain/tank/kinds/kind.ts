@@ -13,6 +13,8 @@ export interface Size {
   unit: 'mm';
   /** A tip: 0 is a size of it too. */
   mayBeZero?: true;
+  /** A place in the solid's own outline rather than a length: any number, also below 0. */
+  coordinate?: true;
 }
 
 /** The tank's own directions as the solid sees them: unit vectors in the own frame. */
@@ -31,7 +33,7 @@ export interface Kind<S extends SolidFields & { kind: string }> {
   label: string;
   schema: z.ZodType<S>;
   /** Whether its mesh depends on the count of facets; `twice`: its triangles grow with the square of it. */
-  curved: false | 'once' | 'twice';
+  curved(solid: S): false | 'once' | 'twice';
   /** Extent of the upright box along x, y, z, mm. */
   extent(solid: S): Vec3;
   /** Where the kind has an axis: the directions it may take, and the one when none is said. */

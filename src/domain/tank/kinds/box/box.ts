@@ -8,7 +8,7 @@ export const box: Kind<Box> = {
   kind: 'box',
   label: 'box',
   schema: boxSchema,
-  curved: false,
+  curved: () => false,
   extent: ({ length, width, height }) => [length, width, height],
   axes: null,
   sizes: () => [

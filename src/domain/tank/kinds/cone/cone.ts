@@ -10,7 +10,7 @@ export const cone: Kind<Cone> = {
   kind: 'cone',
   label: 'cone',
   schema: coneSchema,
-  curved: 'once',
+  curved: () => 'once',
   extent(solid) {
     const widest = Math.max(solid.start, solid.end);
     const extent: [number, number, number] = [widest, widest, widest];

@@ -11,7 +11,7 @@ export const cylinder: Kind<Cylinder> = {
   kind: 'cylinder',
   label: 'cylinder',
   schema: cylinderSchema,
-  curved: 'once',
+  curved: () => 'once',
   extent: (solid) => alongAxis(axisOf(solid), solid.diameter, solid.length),
   axes: { usual: 'x', choices: ['x', 'y', 'z'] },
   sizes: () => [

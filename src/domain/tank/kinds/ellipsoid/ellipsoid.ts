@@ -8,7 +8,7 @@ export const ellipsoid: Kind<Ellipsoid> = {
   kind: 'ellipsoid',
   label: 'ellipsoid',
   schema: ellipsoidSchema,
-  curved: 'twice',
+  curved: () => 'twice',
   extent: sizesOf,
   axes: null,
   sizes: () => [

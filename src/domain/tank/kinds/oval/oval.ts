@@ -10,7 +10,7 @@ export const oval: Kind<Oval> = {
   kind: 'oval',
   label: 'oval',
   schema: ovalSchema,
-  curved: 'once',
+  curved: () => 'once',
   extent: (solid) =>
     axisOf(solid) === 'x'
       ? [solid.length, solid.width, solid.height]

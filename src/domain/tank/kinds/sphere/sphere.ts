@@ -7,7 +7,7 @@ export const sphere: Kind<Sphere> = {
   kind: 'sphere',
   label: 'sphere',
   schema: sphereSchema,
-  curved: 'twice',
+  curved: () => 'twice',
   extent: ({ diameter }) => [diameter, diameter, diameter],
   axes: null,
   sizes: () => [{ path: ['diameter'], label: 'diameter', unit: 'mm' }],

@@ -10,7 +10,7 @@ export const wedge: Kind<Wedge> = {
   kind: 'wedge',
   label: 'wedge',
   schema: wedgeSchema,
-  curved: false,
+  curved: () => false,
   extent: ({ length, width, height }) => [length, width, height],
   axes: null,
   sizes: () => [
