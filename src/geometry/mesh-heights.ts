@@ -16,6 +16,9 @@ export interface MeshHeights {
   /** By triangle: its first vertex in that order, and its projected area (positive when it faces down), mm². */
   lowest: Uint32Array;
   projected: Float64Array;
+  /** Least and greatest level, mm. */
+  bottom: number;
+  top: number;
   /** Triangles (index of their first corner) round a vertex. */
   trianglesOf(vertex: number): Uint32Array;
 }
@@ -63,6 +66,8 @@ export function meshHeights(mesh: Mesh, up: Vec3): MeshHeights {
     rank,
     lowest,
     projected,
+    bottom: z[order[0]!]!,
+    top: z[order.at(-1)!]!,
     trianglesOf: (vertex) => around.subarray(starts[vertex]!, starts[vertex + 1]!),
   };
 }

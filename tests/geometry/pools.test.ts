@@ -1,13 +1,17 @@
 import { describe, expect, it } from 'vitest';
 import { upVector } from '~/geometry/attitude';
-import { restingVolume } from '~/geometry/pools';
+import type { Mesh } from '~/geometry/mesh';
+import { joiningPools, restingPools } from '~/geometry/pools';
 import type { Vec3 } from '~/geometry/vec3';
 import { boxShape, meshFrom } from './solids';
 
 const up: Vec3 = [0, 0, 1];
 const down: Vec3 = [0, 0, -1];
 
-describe('restingVolume', () => {
+const restingVolume = (mesh: Mesh, up: Vec3, point: Vec3, nearMm: number) =>
+  restingPools(mesh, up, point, nearMm).reduce((sum, { volumeMm3 }) => sum + volumeMm3, 0);
+
+describe('restingPools', () => {
   // 1000 × 400 × 300 with a sill 100 high and 200 wide: a sump of 300 on one side, of 500 on the other
   const sumps = meshFrom([boxShape([1000, 400, 300])], [boxShape([200, 400, 100], [300, 0, 0])]);
 
@@ -103,5 +107,37 @@ describe('restingVolume', () => {
     const h = 100 * u[0];
     const left = ((h / u[0]) * (h / u[1]) * (h / u[2])) / 6;
     expect(restingVolume(mesh, direction, [900, 1000, 0], 0.01)).toBeCloseTo(left, 3);
+  });
+});
+
+describe('joiningPools', () => {
+  it('tells where hollows become one, with what each then holds', () => {
+    const three = meshFrom(
+      [boxShape([1000, 100, 300])],
+      [boxShape([100, 100, 80], [200, 0, 0]), boxShape([100, 100, 120], [600, 0, 0])],
+    );
+    const joins = joiningPools(three, up);
+    expect(joins.map(({ levelMm }) => levelMm)).toEqual([80, 120]);
+    const volumes = joins.map(({ pools }) =>
+      pools.map(({ volumeMm3 }) => volumeMm3).sort((one, other) => one - other),
+    );
+    expect(volumes[0]![0]).toBeCloseTo(200 * 100 * 80, 6);
+    expect(volumes[0]![1]).toBeCloseTo(300 * 100 * 80, 6);
+    expect(volumes[1]![0]).toBeCloseTo(300 * 100 * 120, 6);
+    expect(volumes[1]![1]).toBeCloseTo(600 * 100 * 120 - 100 * 100 * 80, 6);
+  });
+
+  it('knows one hollow where there is one, whatever hangs or stands in it', () => {
+    expect(joiningPools(meshFrom([boxShape([10, 20, 30])]), upVector(12, -7))).toEqual([]);
+    const island = meshFrom(
+      [boxShape([300, 300, 300])],
+      [boxShape([100, 100, 100], [100, 100, 0])],
+    );
+    expect(joiningPools(island, up)).toEqual([]);
+    const hanging = meshFrom(
+      [boxShape([300, 300, 300])],
+      [boxShape([100, 100, 100], [100, 100, 100])],
+    );
+    expect(joiningPools(hanging, upVector(3, 4))).toEqual([]);
   });
 });

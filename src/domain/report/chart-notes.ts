@@ -1,5 +1,6 @@
 import { cautions, cautionsFor, stickCaution } from '../liquid/cautions';
 import { densitySentence } from '../liquid/density-sentence';
+import { stickNoticeSentence } from '../table/stick-notice-sentence';
 import { formatLengthWithUnit } from '../units/format-length';
 import { formatNumber } from '../units/format-number';
 import type { ChartInput } from './chart-input';
@@ -49,6 +50,7 @@ function dipSentences(input: ChartInput, sketch: Sketch | null): string[] {
   }
   sentences.push(
     `Read the wet edge. A reading above ${length(heightMm)} is no depth of this tank.`,
+    ...(sketch?.stickNotices ?? []).map((notice) => stickNoticeSentence(notice, options.length)),
     stickCaution,
     standsSentence(design, sketch?.view ?? 'side'),
   );

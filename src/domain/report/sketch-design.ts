@@ -3,6 +3,7 @@ import { shifted } from '../../geometry/mesh';
 import { liquidSpace } from '../table/liquid-space';
 import { readingFrame } from '../table/reading-frame';
 import { refuseUncomputable } from '../table/refuse-uncomputable';
+import { stickNotices } from '../table/stick-notices';
 import type { TankDocument } from '../tank/document';
 import { placedSolid, type PlacedSolid } from '../tank/placed-solid';
 import { sketchOf, type Sketch } from './sketch';
@@ -18,7 +19,8 @@ export async function sketchDesign(document: TankDocument): Promise<Sketch> {
   const solids = document.solids.map(placedSolid);
   const space = liquidSpace(solids, facetsFor(solids));
   const { mesh, origin } = space;
-  return sketchOf(shifted(mesh, origin), readingFrame(document, solids, space));
+  const frame = readingFrame(document, solids, space);
+  return sketchOf(shifted(mesh, origin), frame, stickNotices(solids, space, frame));
 }
 
 /**

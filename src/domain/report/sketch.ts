@@ -1,4 +1,5 @@
 import type { ReadingFrame, TankMesh } from '../table/preview';
+import type { StickNotice } from '../table/stick-notices';
 import { elevation, type Elevation, type View } from './elevation';
 
 /** An elevation of the tank with its stick, mm: x to the right, y up, origin at the lower left. */
@@ -12,6 +13,8 @@ export interface Sketch {
   stick: { x: number; zeroY: number; roofY: number } | null;
   /** Dip point in words, measured from what the sketch shows; null without a stick. */
   dipPoint: { fromLeftMm: number; fromNearMm: number; zeroAboveLowestMm: number } | null;
+  /** What a dip there does not tell. */
+  stickNotices: readonly StickNotice[];
 }
 
 /**
@@ -19,14 +22,18 @@ export interface Sketch {
  * along −x) the one that says more, which is the one that fills less of its frame.
  * Drawn in the tank's own frame, as if level.
  */
-export function sketchOf(space: TankMesh, frame: ReadingFrame): Sketch {
+export function sketchOf(
+  space: TankMesh,
+  frame: ReadingFrame,
+  stickNotices: readonly StickNotice[] = [],
+): Sketch {
   const side = elevation(space, 'side');
   const end = elevation(space, 'end');
   const chosen = end.filled < side.filled - 0.02 ? end : side;
-  return fromElevation(chosen, frame);
+  return { ...fromElevation(chosen, frame), stickNotices };
 }
 
-function fromElevation(view: Elevation, frame: ReadingFrame): Sketch {
+function fromElevation(view: Elevation, frame: ReadingFrame): Omit<Sketch, 'stickNotices'> {
   const { minX, minY, lines } = view;
   const { stick } = frame;
   const across = stick === null ? 0 : view.view === 'side' ? stick.at[0] : stick.at[1];

@@ -4,12 +4,15 @@ import { roundingOfCapacity } from '../../geometry/tolerance';
 import type { TankDocument } from '../tank/document';
 import { placedShape, placedSolid } from '../tank/placed-solid';
 import { extremes } from './extremes';
+import { levelRows } from './level-rows';
 import { liquidSpace } from './liquid-space';
 import { openings } from './openings';
+import { pieceNotice } from './piece-notice';
 import { piecesOf } from './pieces';
 import type { Preview } from './preview';
 import { readingFrame } from './reading-frame';
 import { refuseUncomputable } from './refuse-uncomputable';
+import { stickNotices } from './stick-notices';
 import { tableRows } from './table-rows';
 
 /** Chords to a full turn in the live view; the bound compares with half as many. */
@@ -37,7 +40,7 @@ export async function computePreview(document: TankDocument): Promise<Preview> {
     { length: previewRows },
     (_, i) => (i / (previewRows - 1)) * frame.heightMm,
   );
-  const rows = tableRows(space, frame, depths);
+  const rows = levelRows(space, frame, depths);
   const capacityL = space.volumeMm3 / 1e6;
 
   let errorL = roundingOfCapacity * capacityL;
@@ -48,8 +51,9 @@ export async function computePreview(document: TankDocument): Promise<Preview> {
     });
   }
   const pieces = piecesOf(space.mesh);
+  const notice = pieces > 1 ? pieceNotice(solids, space) : null;
   const [x, y, z] = axes.map((axis) => extremes(solids, space, axis));
-  const { undrainableL, trappedL } = openings(document, solids, space, frame.up);
+  const { undrainableL, trappedL, standing } = openings(document, solids, space, frame.up);
   return {
     space: shifted(space.mesh, space.origin),
     solids: solids.map((one) => ({
@@ -63,13 +67,10 @@ export async function computePreview(document: TankDocument): Promise<Preview> {
     errorL,
     undrainableL,
     trappedL,
+    standing,
+    stickNotices: stickNotices(solids, space, frame),
     pieces,
     rows,
-    notices:
-      pieces > 1
-        ? [
-            `The liquid space is in ${pieces} pieces, which one stick cannot tell apart: join them, or make each a tank of its own.`,
-          ]
-        : [],
+    notices: notice === null ? [] : [notice],
   };
 }

@@ -1,5 +1,6 @@
 import type { SolidFields, Vec3 } from '../tank/solid';
-import type { TableRow } from './request';
+import type { LevelRow } from './level-rows';
+import type { StickNotice } from './stick-notices';
 
 /** A closed triangle mesh in the tank's frame, mm. Triangles index `positions` in threes, outward. */
 export interface TankMesh {
@@ -26,6 +27,16 @@ export interface ReadingFrame {
   highestLevelMm: number;
 }
 
+/** Liquid that the outlet cannot drain, or air that the vent cannot let out, in one place. */
+export interface Standing {
+  what: 'undrainable' | 'trapped';
+  litres: number;
+  /** Level u·p of its surface, mm: liquid stands below it, air above it. */
+  levelMm: number;
+  /** Its deepest place (of air: its highest) in the tank's frame, mm. */
+  at: Vec3;
+}
+
 /** All that the bench and the front page draw and read from, computed at once in a worker. */
 export interface Preview {
   space: TankMesh;
@@ -38,10 +49,13 @@ export interface Preview {
   errorL: number;
   undrainableL: number;
   trappedL: number;
+  standing: readonly Standing[];
   /** Separate pieces of liquid space; more than 1 cannot be issued. */
   pieces: number;
   /** Evenly spaced over 0…heightMm, fine enough for the eye and the Hermite curve between (about 200). */
-  rows: readonly TableRow[];
+  rows: readonly LevelRow[];
+  /** What the stick cannot tell of this tank as it stands. */
+  stickNotices: readonly StickNotice[];
   /** Plain sentences worth reading: "The liquid space is in 2 pieces." */
   notices: readonly string[];
 }

@@ -1,44 +1,37 @@
 import { horizontalAxes } from '../../geometry/horizontal-axes';
 import { levels, type Mesh } from '../../geometry/mesh';
 import { sweep } from '../../geometry/sweep';
-import { dot, type Vec3 } from '../../geometry/vec3';
+import type { Vec3 } from '../../geometry/vec3';
 import type { LiquidSpace } from './liquid-space';
-import { levelOfReading } from './level';
+import { meshLevels, type MeshLevels } from './mesh-levels';
 import type { ReadingFrame } from './preview';
 import type { TableRow } from './request';
 
-/** The table at the given readings (mm along the stick, any order), in their order; litres, cm², mm. */
+/**
+ * The table at the given readings (mm along the stick, any order, also twice), in their order; litres, cm², mm.
+ * `at`: their levels, where they are known already.
+ */
 export function tableRows(
-  { mesh, origin, volumeMm3 }: LiquidSpace,
+  space: LiquidSpace,
   frame: ReadingFrame,
   readingsMm: readonly number[],
+  at: MeshLevels = meshLevels(space, frame, readingsMm),
 ): TableRow[] {
-  const { up, lowestLevelMm, highestLevelMm } = frame;
-  const shift = dot(up, origin);
-  const [meshLow, meshHigh] = span(levels(mesh, up));
-  const rounding = 1e-12 * (highestLevelMm - lowestLevelMm);
-
-  // empty and brim come from closed form: there the mesh is asked at its own ends
-  const meshLevel = readingsMm.map((readingMm) => {
-    const level = levelOfReading(frame, readingMm);
-    if (level <= lowestLevelMm + rounding) return meshLow;
-    if (level >= highestLevelMm - rounding) return meshHigh;
-    return Math.min(Math.max(level - shift, meshLow), meshHigh);
-  });
-  // the sweep sees its last level from below, so the brim always stands there
-  const ascending = Float64Array.from(new Set([...meshLevel, meshHigh])).sort();
+  const { mesh, origin, volumeMm3 } = space;
+  const { up } = frame;
+  const { ofReadings, ascending, rows, low: meshLow, high: meshHigh } = at;
   const swept = sweep(mesh, up, ascending);
-  const indexOf = new Map(Array.from(ascending, (level, index) => [level, index]));
+  let firstDrop: Vec3 | undefined;
 
   return readingsMm.map((depthMm, i) => {
-    const level = meshLevel[i]!;
-    const row = indexOf.get(level)!;
+    const level = ofReadings[i]!;
+    const row = rows[i]!;
     const inside = Math.min(Math.max(swept.volume[row]!, 0), volumeMm3);
     const mm3 = level === meshLow ? 0 : level === meshHigh ? volumeMm3 : inside;
     const centroid =
       mm3 > 1e-10 * volumeMm3
         ? (swept.moments.map((moment) => moment[row]! / mm3) as unknown as Vec3)
-        : lowestPlace(mesh, up, meshLow);
+        : (firstDrop ??= lowestPlace(mesh, up, meshLow));
     return {
       depthMm,
       volumeL: mm3 / 1e6,
@@ -71,14 +64,4 @@ function lowestPlace({ positions, triangles }: Mesh, up: Vec3, low: number): Vec
   }
   if (sum[3] === 0) z.forEach((_, vertex) => lowest(vertex) && add(1, vertex));
   return [sum[0] / sum[3], sum[1] / sum[3], sum[2] / sum[3]];
-}
-
-function span(values: Float64Array): readonly [number, number] {
-  let low = Infinity;
-  let high = -Infinity;
-  for (const value of values) {
-    if (value < low) low = value;
-    if (value > high) high = value;
-  }
-  return [low, high];
 }

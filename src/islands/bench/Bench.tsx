@@ -15,6 +15,7 @@ import { Conflict } from './Conflict';
 import { Drawing } from './Drawing';
 import { IssuePanel } from './IssuePanel';
 import { liveTable } from './live-table';
+import { noticesOf } from './notices-of';
 import { PartsList } from './PartsList';
 import { TitleBlock } from './TitleBlock';
 import { TopLine } from './TopLine';
@@ -154,7 +155,7 @@ function BenchSheet({ tank, design, etag, role, person }: BenchProps) {
           {preview && ' The figures below are those of the last shape that could be computed.'}
         </p>
       )}
-      {preview?.notices.map((notice) => (
+      {noticesOf(preview, units.length).map((notice) => (
         <p key={notice} role="status" className="fault border-b border-hair px-4 py-2 sm:px-6">
           {notice}
         </p>

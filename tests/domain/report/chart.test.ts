@@ -308,3 +308,18 @@ describe('steps', () => {
     expect(report.rows.map(({ cells }) => cells[0]).slice(0, 3)).toEqual(['25', '50', '75']);
   });
 });
+
+it('warns on paper of pools that one dip does not tell of', () => {
+  const input = cisternInput();
+  const sketch = {
+    ...input.sketch!,
+    stickNotices: [{ what: 'pools', readingMm: 100, pools: 2 } as const],
+  };
+  expect(words(buildChart(input))).not.toContain('pools');
+  expect(words(buildChart({ ...input, sketch }))).toContain(
+    'Below 100\u00a0mm the liquid stands in 2 pools that do not level out',
+  );
+  expect(words(buildChart({ ...input, sketch, options: options({ length: 'in' }) }))).toContain(
+    'Below 3 7/8\u00a0in the liquid',
+  );
+});

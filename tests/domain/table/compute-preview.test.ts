@@ -24,6 +24,28 @@ describe('computePreview', () => {
     },
   );
 
+  it('tells of every row the wetted area and what a millimetre of reading means', async () => {
+    const upright = design([box('body', [900, 500, 300])], {
+      attitude: { pitch: 10, roll: 0 },
+      stick: { at: [450, 250] },
+    });
+    const { rows, frame } = await computePreview(upright);
+    const tilt = (10 * Math.PI) / 180;
+    expect(frame.levelPerReading).toBeCloseTo(Math.cos(tilt), 12);
+    // at half the stick the surface runs from end to end and parts the box in two equal halves
+    const middle = rows[100]!;
+    expect(middle.depthMm).toBeCloseTo(150, 9);
+    expect(middle.volumeL).toBeCloseTo(67.5, 9);
+    expect(middle.surfaceCm2).toBeCloseTo((900 * 500) / Math.cos(tilt) / 100, 6);
+    expect(middle.slopeLPerMm).toBeCloseTo((900 * 500) / 1e6, 9);
+    expect(middle.wettedCm2).toBeCloseTo((900 * 500 + (900 + 500) * 300) / 100, 6);
+    // the slope is that of the litres over the reading
+    for (let i = 70; i <= 130; i += 10) {
+      const chord = (rows[i + 1]!.volumeL - rows[i - 1]!.volumeL) / 3;
+      expect(rows[i]!.slopeLPerMm / chord).toBeCloseTo(1, 9);
+    }
+  });
+
   it('draws the space and each solid in the frame of the tank', async () => {
     const { space, solids, capacityL } = await computePreview(slopedCistern);
     expect(enclosedVolume(space) / 1e6).toBeCloseTo(capacityL, 9);
