@@ -6,6 +6,7 @@ import { computePreview } from '~/domain/table/compute-preview';
 import { computeTable } from '~/domain/table/compute-table';
 import { kinds, type Solid } from '~/domain/tank/kinds/registry';
 import { parseDesign } from '~/domain/tank/parse-design';
+import { valueAt } from '~/domain/tank/value-at';
 import { box, design } from './designs';
 
 /** Sizes from nothing to the limit, often equal ones, so that faces meet. */
@@ -31,14 +32,21 @@ const seldom = <T>(one: fc.Arbitrary<T>) =>
 const solid = fc
   .record({
     kind: fc.constantFrom(...kinds),
-    sizes: fc.array(size, { minLength: 3, maxLength: 3 }),
+    sizes: fc.array(size, { minLength: 5, maxLength: 5 }),
+    // most places in an outline stay as they are, or few outlines would not cross themselves
+    places: fc.array(seldom(place), { minLength: 7, maxLength: 7 }),
     at: three(place),
     turn: three(turn),
     holds: fc.constantFrom(true, true, false),
   })
-  .map(({ kind, sizes, at, turn: turned, holds }): Solid => {
-    const one = structuredClone(kind.blank('it')) as unknown as Record<string, unknown>;
-    kind.sizes(kind.blank('it')).forEach(({ path }, i) => (one[path[0]!] = sizes[i]));
+  .map(({ kind, sizes, places, at, turn: turned, holds }): Solid => {
+    const one = structuredClone(kind.blank('it'));
+    kind.sizes(kind.blank('it')).forEach(({ path, coordinate }, i) => {
+      const value = coordinate ? places[i % places.length] : sizes[i % sizes.length];
+      if (value === undefined) return;
+      const parent = valueAt(one, path.slice(0, -1)) as Record<string, unknown>;
+      parent[path.at(-1)!] = value;
+    });
     return { ...one, at, turn: turned, role: holds ? 'holds' : 'displaces' } as unknown as Solid;
   });
 

@@ -15,8 +15,15 @@ const direction = fc
   .filter(([x, y, z]) => Math.hypot(x, y, z) > 0.1)
   .map(unit);
 
+const it_ = { id: 'it', role: 'holds' } as const;
+
+/** Options that the blanks do not show. */
+const withOptions: readonly Solid[] = [
+  { ...it_, kind: 'taper', bottom: [700, 90], top: [130, 410], height: 333, shift: [-450, 77] },
+];
+
 /** Every kind at odd sizes, along every axis it may have. */
-const examples = kinds.flatMap((kind): Solid[] => {
+const blanks = kinds.flatMap((kind): Solid[] => {
   const blank = kind.blank('it');
   return 'axis' in blank
     ? ['x', 'y', 'z']
@@ -24,6 +31,7 @@ const examples = kinds.flatMap((kind): Solid[] => {
         .filter((one) => kind.schema.safeParse(one).success)
     : [blank];
 });
+const examples = [...blanks, ...withOptions];
 
 describe.each(examples.map((solid) => [kindOf(solid).words(solid), solid] as const))(
   '%s',
@@ -50,7 +58,8 @@ describe.each(examples.map((solid) => [kindOf(solid).words(solid), solid] as con
       kind.extent(example).forEach((length, axis) => {
         const along = mesh.positions.filter((_, i) => i % 3 === axis);
         const slack =
-          ((kind.curved(example) === 'twice' ? 4 : 2) * Math.max(...kind.extent(example))) / 128 ** 2;
+          ((kind.curved(example) === 'twice' ? 4 : 2) * Math.max(...kind.extent(example))) /
+          128 ** 2;
         expect(Math.min(...along)).toBeGreaterThan(-slack);
         expect(Math.max(...along)).toBeLessThan(length + slack);
       });

@@ -12,17 +12,28 @@ import { oval } from './oval/oval';
 import { ovalSchema } from './oval/schema';
 import { sphereSchema } from './sphere/schema';
 import { sphere } from './sphere/sphere';
+import { taperSchema } from './taper/schema';
+import { taper } from './taper/taper';
 import { wedgeSchema } from './wedge/schema';
 import { wedge } from './wedge/wedge';
 
 /** Kinds of the document format that are not computed yet: refused by name. */
-export const kindsToCome = ['taper', 'prism', 'stations', 'mesh'];
+export const kindsToCome = ['prism', 'stations', 'mesh'];
 
-const known = 'box, cylinder, wedge, oval, sphere, ellipsoid or cone';
+const known = 'box, cylinder, wedge, oval, sphere, ellipsoid, cone or taper';
 
 export const solidSchema = z.discriminatedUnion(
   'kind',
-  [boxSchema, cylinderSchema, wedgeSchema, ovalSchema, sphereSchema, ellipsoidSchema, coneSchema],
+  [
+    boxSchema,
+    cylinderSchema,
+    wedgeSchema,
+    ovalSchema,
+    sphereSchema,
+    ellipsoidSchema,
+    coneSchema,
+    taperSchema,
+  ],
   {
     error: (issue) => {
       const kind = (issue.input as { kind?: unknown } | null)?.kind;
@@ -43,6 +54,7 @@ export const kinds: readonly Kind<Solid>[] = [
   erased(sphere),
   erased(ellipsoid),
   erased(cone),
+  erased(taper),
 ];
 
 /** What Dipwright knows about a solid's kind. */
