@@ -5,6 +5,7 @@ import { highestLevel, placedShape, placedSolid } from '~/domain/tank/placed-sol
 import { loadManifold, meshOf } from '~/geometry/manifold';
 import { enclosedVolume, levels } from '~/geometry/mesh';
 import { unit } from '~/geometry/vec3';
+import { cylindersWithEnds } from './cylinders-with-ends';
 
 await loadManifold();
 
@@ -19,6 +20,7 @@ const it_ = { id: 'it', role: 'holds' } as const;
 
 /** Options that the blanks do not show. */
 const withOptions: readonly Solid[] = [
+  ...cylindersWithEnds,
   { ...it_, kind: 'taper', bottom: [700, 90], top: [130, 410], height: 333, shift: [-450, 77] },
 ];
 

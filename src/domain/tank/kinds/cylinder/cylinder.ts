@@ -1,53 +1,82 @@
+import { barrelProfile } from '../../../../geometry/barrel-profile';
 import { circleOutline, facetPhase } from '../../../../geometry/circle';
-import { lineInBarrel } from '../../../../geometry/line';
-import { axisOrder, type Axis } from '../../../../geometry/shape';
-import type { Vec3 } from '../../solid';
-import type { Kind } from '../kind';
+import { headSupport } from '../../../../geometry/head-support';
+import { headVolume } from '../../../../geometry/head-volume';
+import { axisOrder } from '../../../../geometry/shape';
+import type { Kind, Size } from '../kind';
 import { sizeWords } from '../size-words';
-import { cylinderSchema, type Cylinder } from './schema';
+import { barrelOf, flatEnds, headOf } from './barrel';
+import { endFaults } from './end-faults';
+import { endWords } from './end-words';
+import { lineInCylinder } from './line-in-cylinder';
+import { cylinderSchema, type Cylinder, type End } from './schema';
 
-/** Circular cylinder along x, y or z, with flat ends. */
+/** Circular cylinder along x, y or z, each end flat, coned, dished, elliptical or torispherical. */
 export const cylinder: Kind<Cylinder> = {
   kind: 'cylinder',
   label: 'cylinder',
   schema: cylinderSchema,
-  curved: () => 'once',
-  extent: (solid) => alongAxis(axisOf(solid), solid.diameter, solid.length),
+  curved: ({ ends = flatEnds }) =>
+    ends.every(({ form }) => form === 'flat' || form === 'cone') ? 'once' : 'twice',
+  extent(solid) {
+    const { axis, overall } = barrelOf(solid);
+    const extent: [number, number, number] = [solid.diameter, solid.diameter, solid.diameter];
+    extent[axisOrder(axis)[2]] = overall;
+    return extent;
+  },
   axes: { usual: 'x', choices: ['x', 'y', 'z'] },
-  sizes: () => [
+  sizes: ({ ends = flatEnds }) => [
     { path: ['diameter'], label: 'diameter', unit: 'mm' },
     { path: ['length'], label: 'length', unit: 'mm' },
+    ...ends.flatMap((end, i) => endSizes(end, i)),
   ],
-  words: (solid) => `⌀ ${sizeWords(solid.diameter, solid.length)} along ${axisOf(solid)}`,
+  words(solid) {
+    const { axis = 'x', ends = flatEnds } = solid;
+    const barrel = `⌀ ${sizeWords(solid.diameter, solid.length)} along ${axis}`;
+    return [barrel, endWords(ends)].filter((words) => words !== null).join(', ');
+  },
   shape(solid, facets, tank) {
-    const axis = axisOf(solid);
-    const outline = circleOutline(solid.diameter / 2, facets, facetPhase(axis, tank.x, tank.z));
-    return { form: 'extrusion', axis, outline, length: solid.length };
+    const { axis, ends } = barrelOf(solid);
+    const phase = facetPhase(axis, tank.x, tank.z);
+    if (ends.every(({ head }) => head.form === 'flat')) {
+      const outline = circleOutline(solid.diameter / 2, facets, phase);
+      return { form: 'extrusion', axis, outline, length: solid.length };
+    }
+    const profile = barrelProfile(ends[0], ends[1], facets);
+    return { form: 'revolution', axis, profile, facets, phase, stretch: [1, 1, 1] };
   },
   support(solid, up) {
-    const [first, second, third] = axisOrder(axisOf(solid));
+    const { axis, ends } = barrelOf(solid);
+    const [first, second, third] = axisOrder(axis);
     const across = Math.hypot(up[first]!, up[second]!);
-    return (across * solid.diameter + Math.abs(up[third]!) * solid.length) / 2;
+    const along = up[third]!;
+    return Math.max(
+      ...ends.map(
+        ({ head, mouth, towards, inward }) =>
+          // an end turned inward reaches no further than its rim
+          along * mouth +
+          (inward ? across * head.radius : headSupport(head, across, towards * along)),
+      ),
+    );
   },
-  chords(solid, line, slack) {
-    const radius = solid.diameter / 2;
-    const barrel = { axis: axisOf(solid), half: [radius, radius], length: solid.length } as const;
-    const chord = lineInBarrel(line, barrel, slack);
-    return chord ? [chord] : [];
+  chords: (solid, line, slack) => lineInCylinder(line, barrelOf(solid), slack),
+  volume(solid) {
+    const { diameter, length, ends = flatEnds } = solid;
+    return ends.reduce(
+      (sum, end) => sum + (end.inward ? -1 : 1) * headVolume(headOf(end, diameter / 2)),
+      (Math.PI * diameter * diameter * length) / 4,
+    );
   },
-  volume: ({ diameter, length }) => (Math.PI * diameter * diameter * length) / 4,
-  faults: () => [],
+  faults: endFaults,
   blank: (id) => ({ id, role: 'holds', kind: 'cylinder', diameter: 400, length: 800, axis: 'x' }),
 };
 
-function axisOf(solid: Cylinder): Axis {
-  return solid.axis ?? 'x';
-}
-
-function alongAxis(axis: Axis, across: number, along: number): Vec3 {
-  return [
-    axis === 'x' ? along : across,
-    axis === 'y' ? along : across,
-    axis === 'z' ? along : across,
-  ];
+function endSizes(end: End, index: number): Size[] {
+  const keys =
+    end.form === 'flat' ? [] : end.form === 'torisphere' ? ['crown', 'knuckle'] : ['depth'];
+  return keys.map((key) => ({
+    path: ['ends', String(index), key],
+    label: `${index === 0 ? 'low' : 'high'} end ${key}`,
+    unit: 'mm',
+  }));
 }

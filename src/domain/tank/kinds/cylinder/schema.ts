@@ -1,26 +1,36 @@
 import { z } from 'zod/v4';
 import { length, solidFields } from '../../solid';
 
-const notYet = ['cone', 'dish', 'ellipsoid', 'torisphere'];
+const inward = z.boolean('Whether an end is turned inward is true or false.').optional();
 
-/** Flat ends only, for now; another form of end is refused by name. */
-const end = z.strictObject({
-  form: z.literal('flat', {
-    error: (issue) =>
-      typeof issue.input === 'string' && notYet.includes(issue.input)
-        ? `An end of the form "${issue.input}" is not computed yet: only "flat" is.`
-        : 'The form of an end is "flat".',
-  }),
-});
+/**
+ * An end of the barrel. It stands out of the straight part on the side of its depth; turned inward, it stands into
+ * it and takes liquid space away.
+ */
+const end = z.discriminatedUnion(
+  'form',
+  [
+    z.strictObject({ form: z.literal('flat'), inward }),
+    z.strictObject({ form: z.literal('cone'), depth: length, inward }),
+    /** Cap of a sphere, at most half of it. */
+    z.strictObject({ form: z.literal('dish'), depth: length, inward }),
+    /** Half a spheroid. */
+    z.strictObject({ form: z.literal('ellipsoid'), depth: length, inward }),
+    /** Cap of a sphere of radius `crown`, joined to the barrel by a ring of radius `knuckle`. */
+    z.strictObject({ form: z.literal('torisphere'), crown: length, knuckle: length, inward }),
+  ],
+  'The form of an end is "flat", "cone", "dish", "ellipsoid" or "torisphere".',
+);
+export type End = z.infer<typeof end>;
 
 export const cylinderSchema = z.strictObject({
   ...solidFields,
   kind: z.literal('cylinder'),
   diameter: length,
-  /** Straight part, along the axis. */
+  /** Straight part, along the axis; ends stand outside it. */
   length,
   axis: z.enum(['x', 'y', 'z'], 'The axis is "x", "y" or "z".').optional(),
-  /** At the low end of the axis, at the high end. */
+  /** At the low end of the axis, at the high end; both flat when left out. */
   ends: z.tuple([end, end], 'Give two ends: the low one and the high one.').optional(),
 });
 export type Cylinder = z.infer<typeof cylinderSchema>;
