@@ -34,6 +34,33 @@ describe('reference tanks, within 1e-7 of capacity', () => {
     expect(worst).toBeLessThan(table.errorL);
   });
 
+  it('lying cylinder 2000 × 3600, torispherical ends: crown 2000, knuckle 200', async () => {
+    const expected: readonly (readonly [number, number])[] = [
+      [60, 103.66649473238587],
+      [240, 834.4298575336242],
+      [540, 2747.749226231526],
+      [820, 4945.333276465533],
+      [1000, 6446.594737406294],
+      [1320, 9078.507799157167],
+      [1660, 11494.348536589094],
+      [1920, 12733.059722471704],
+    ];
+    const capacityL = 12893.189474812589;
+    const end = { form: 'torisphere', crown: 2000, knuckle: 200 } as const;
+    const tank = design([
+      cylinder('s1', 2000, 3600, { at: [-2187.5484503402904, -1000, 0], ends: [end, end] }),
+    ]);
+    const table = await computeTable(tank, { atMm: expected.map(([depth]) => depth) });
+    expect(table.heightMm).toBe(2000);
+    expect(Math.abs(table.capacityL / capacityL - 1)).toBeLessThan(1e-9);
+    const worst = Math.max(
+      ...table.rows.map(({ volumeL }, i) => Math.abs(volumeL - expected[i]![1])),
+    );
+    expect(worst / capacityL).toBeLessThan(1e-7);
+    // the printed bound covers the true error
+    expect(worst).toBeLessThan(table.errorL);
+  });
+
   it('box 1830 × 910 × 640, turned 15° and tilted about two axes', async () => {
     const expected: readonly (readonly [number, number])[] = [
       [25.941437595217906, 0.43768053977136245],
