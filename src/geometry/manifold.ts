@@ -10,8 +10,9 @@ import type { Mesh } from './mesh';
 import { placedMesh } from './placed-mesh';
 import { toTank, type Placing } from './placing';
 import { prismMesh } from './prism-mesh';
-import { axisOrder, type Axis, type Shape } from './shape';
+import { axisOrder, type Axis, type Shape, type Vec2 } from './shape';
 import type { Vec3 } from './vec3';
+import type { Bounds } from './wall-pieces';
 
 /**
  * The only file that knows manifold-3d. Booleans of closed meshes; everything it hands out is plain
@@ -50,6 +51,27 @@ async function load({ wasmUrl, wasmBinary }: ManifoldSource): Promise<void> {
 export interface PlacedShape {
   shape: Shape;
   place: Placing;
+}
+
+/**
+ * Why the library cannot take a closed mesh in, as a sentence; null when it can. It would lose, when it rounds to 32
+ * bits, detail finer than about 1e-7 of the size; that alone is no reason.
+ */
+export function libraryRefusal(mesh: Mesh): string | null {
+  const { Manifold, Mesh: LibraryMesh } = loadedLibrary();
+  try {
+    const { rounded } = distinctRounded(mesh.positions);
+    const taken = Manifold.ofMesh(
+      new LibraryMesh({ numProp: 3, vertProperties: rounded, triVerts: mesh.triangles }),
+    );
+    const status = String(taken.status());
+    const empty = taken.isEmpty();
+    taken.delete();
+    if (status === 'NoError' && !empty) return null;
+  } catch {
+    // the library's own words name its inner parts; what follows is what a person can act on
+  }
+  return 'The mesh is closed, but cannot be joined with other solids: let the program that wrote it mend or simplify it.';
 }
 
 /** The mesh of one shape alone, in the tank's frame moved by −origin. */
@@ -94,6 +116,91 @@ export function spaceOf(
     const parts = list.map((one) => keep(make(one, origin)));
     return parts.length === 1 ? parts[0]! : keep(Manifold.union(parts));
   }
+}
+
+/** The part of a union of closed meshes inside any of the boxes (everything when there are none), less the hulls of the pieces. */
+export function meshLess(
+  union: readonly Mesh[],
+  boxes: readonly Bounds[],
+  pieces: (whole: Mesh) => readonly (readonly Vec3[])[],
+): Mesh {
+  const { Manifold } = loadedLibrary();
+  const bin: Manifold[] = [];
+  const keep = (one: Manifold) => {
+    bin.push(one);
+    return one;
+  };
+  try {
+    const parts = union.map((mesh) => keep(ofMesh(mesh)));
+    const whole = parts.length === 1 ? parts[0]! : keep(Manifold.union(parts));
+    const taken = pieces(read(whole)).map((points) => keep(Manifold.hull(mutablePoints(points))));
+    let rest = whole;
+    if (boxes.length > 0) {
+      const solids = boxes.map(({ low, high }) => {
+        const cube = keep(Manifold.cube([high[0] - low[0], high[1] - low[1], high[2] - low[2]]));
+        return keep(cube.translate([low[0], low[1], low[2]]));
+      });
+      rest = keep(Manifold.intersection(rest, keep(Manifold.union(solids))));
+    }
+    if (taken.length > 0) rest = keep(Manifold.difference(rest, keep(Manifold.union(taken))));
+    return read(rest);
+  } finally {
+    for (const one of bin) one.delete();
+  }
+}
+
+/**
+ * Inward offset of flat outlines by `mm`: what remains, as outlines against the clock; none when nothing does.
+ * Corners stay corners, re-entrant ones become arcs of `facets` chords to a turn. On the library's grid of 1e-8 mm.
+ * With `turned`, outlines are profiles (radius, place) of a body turned about radius 0: there is no wall there.
+ */
+export function outlinesLess(
+  outlines: readonly (readonly Vec2[])[],
+  mm: number,
+  facets: number,
+  turned: boolean,
+): Vec2[][] {
+  const { CrossSection } = loadedLibrary();
+  const bin: { delete(): void }[] = [];
+  const keep = <T extends { delete(): void }>(one: T) => {
+    bin.push(one);
+    return one;
+  };
+  try {
+    const drawn = keep(new CrossSection(outlines.map(mutable), 'NonZero'));
+    if (!turned) return keep(drawn.offset(-mm, 'Round', 2, facets)).toPolygons();
+    const whole = keep(CrossSection.union(drawn, keep(drawn.mirror([1, 0]))));
+    const left = keep(whole.offset(-mm, 'Round', 2, facets));
+    const { min, max } = left.bounds();
+    if (!(max[0] > 0)) return [];
+    const half = keep(
+      new CrossSection([
+        [
+          [0, min[1] - 1],
+          [max[0] + 1, min[1] - 1],
+          [max[0] + 1, max[1] + 1],
+          [0, max[1] + 1],
+        ],
+      ]),
+    );
+    return keep(CrossSection.intersection(left, half)).toPolygons();
+  } finally {
+    for (const one of bin) one.delete();
+  }
+}
+
+/** The convex hull of points, as a mesh; no triangles when they lie in one plane. */
+export function hullOf(points: readonly Vec3[]): Mesh {
+  const hull = loadedLibrary().Manifold.hull(mutablePoints(points));
+  try {
+    return read(hull);
+  } finally {
+    hull.delete();
+  }
+}
+
+function mutablePoints(points: readonly Vec3[]): [number, number, number][] {
+  return points.map(([x, y, z]) => [x, y, z]);
 }
 
 function loadedLibrary(): ManifoldToplevel {
