@@ -18,6 +18,8 @@ export type Shape =
       outline: readonly Vec2[];
       /** From −length/2 to +length/2 along the axis. */
       length: number;
+      /** By side (from a point to the next): whether it is flat in truth, no chord of something round. None when left out. */
+      flat?: readonly boolean[];
     }
   | {
       form: 'revolution';
@@ -34,6 +36,8 @@ export type Shape =
       form: 'mesh';
       /** Closed, outward, in the own frame; vertices that are one place are one vertex. */
       mesh: Mesh;
+      /** Planes normal·p = offset (unit normals) of faces that are flat in truth, beside others that are round. */
+      flat?: readonly { normal: Vec3; offset: number }[];
     };
 
 const order: Record<Axis, readonly [number, number, number]> = {

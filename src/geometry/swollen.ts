@@ -1,11 +1,15 @@
 import type { Mesh } from './mesh';
-import type { Shape } from './shape';
-import { cross, type Vec3 } from './vec3';
+import type { Shape, Vec2 } from './shape';
+import { cross, dot, type Vec3 } from './vec3';
+
+/** A vertex nearer to a flat face than this lies in it. mm */
+const inFaceMm = 1e-6;
 
 /**
- * A round shape with its radius grown by `mm` (shrunk when negative), flat ends and length unchanged. A flat
- * outline is moved out from its middle, which is right for a circle and near enough for an ellipse. The corners of
- * a mesh move along the mean direction of their faces.
+ * A round shape with its radius grown by `mm` (shrunk when negative), flat faces and length unchanged. A flat
+ * outline is moved out from its middle, which is right for a circle and near enough for an ellipse; where it says
+ * which of its sides are flat, only the corners between chords move, square to the outline. The corners of a mesh
+ * that lie in no flat face move along the mean direction of their faces.
  */
 export function swollen(shape: Shape, mm: number): Shape {
   if (shape.form === 'revolution') {
@@ -14,7 +18,11 @@ export function swollen(shape: Shape, mm: number): Shape {
       profile: shape.profile.map(([radius, place]) => [grown(radius, mm), place]),
     };
   }
-  if (shape.form === 'mesh') return { ...shape, mesh: movedOut(shape.mesh, mm) };
+  if (shape.form === 'mesh') return { ...shape, mesh: movedOut(shape, mm) };
+  const { flat } = shape;
+  // an offset outline has other sides than the one it came from
+  if (flat?.length === shape.outline.length)
+    return { ...shape, outline: roundMovedOut(shape.outline, flat, mm) };
   const outline = shape.outline.map(([a, b]) => {
     const radius = Math.hypot(a, b);
     const factor = grown(radius, mm) / radius;
@@ -27,7 +35,24 @@ function grown(radius: number, mm: number): number {
   return radius === 0 ? 0 : Math.max(radius + mm, radius / 2);
 }
 
-function movedOut({ positions, triangles }: Mesh, mm: number): Mesh {
+function roundMovedOut(
+  outline: readonly Vec2[],
+  flat: readonly boolean[],
+  mm: number,
+): readonly Vec2[] {
+  const n = outline.length;
+  return outline.map((point, i) => {
+    const before = (i + n - 1) % n;
+    if (flat[before] || flat[i]) return point;
+    const [ax, ay] = outline[before]!;
+    const [bx, by] = outline[(i + 1) % n]!;
+    const size = Math.hypot(bx - ax, by - ay);
+    return [point[0] + (mm * (by - ay)) / size, point[1] - (mm * (bx - ax)) / size];
+  });
+}
+
+function movedOut({ mesh, flat = [] }: Extract<Shape, { form: 'mesh' }>, mm: number): Mesh {
+  const { positions, triangles } = mesh;
   const at = (vertex: number): Vec3 => [
     positions[3 * vertex]!,
     positions[3 * vertex + 1]!,
@@ -45,8 +70,12 @@ function movedOut({ positions, triangles }: Mesh, mm: number): Mesh {
       for (let axis = 0; axis < 3; axis += 1) normals[3 * vertex + axis]! += normal[axis]!;
     }
   }
+  const stays = Array.from({ length: positions.length / 3 }, (_, vertex) =>
+    flat.some(({ normal, offset }) => Math.abs(dot(normal, at(vertex)) - offset) < inFaceMm),
+  );
   const moved = positions.map((value, index) => {
     const start = index - (index % 3);
+    if (stays[start / 3]) return value;
     const size = Math.hypot(normals[start]!, normals[start + 1]!, normals[start + 2]!);
     return size === 0 ? value : value + (mm * normals[index]!) / size;
   });

@@ -7,5 +7,6 @@ import type { PlacedSolid } from '../tank/placed-solid';
 export function facetStandOffMm({ solid, kind }: PlacedSolid, facets: number): number {
   const curved = kind.curved(solid);
   if (!curved) return 0;
-  return ((curved === 'twice' ? 4 : 2) * Math.max(...kind.extent(solid))) / facets ** 2;
+  const widest = Math.max(...kind.extent(solid), kind.widestMm?.(solid) ?? 0);
+  return ((curved === 'twice' ? 4 : 2) * widest) / facets ** 2;
 }

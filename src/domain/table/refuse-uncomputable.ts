@@ -12,7 +12,7 @@ export function refuseUncomputable(document: TankDocument): void {
   const faults: FieldFault[] = document.solids.flatMap((solid, index) =>
     faultsOf(solid).map(({ path, detail }) => ({
       pointer: `/solids/${index}/${path.join('/')}`,
-      detail: `Solid "${solid.id}", ${path.join(' ')}: ${detail}`,
+      detail: `Solid "${solid.id}", ${path.map(placeWord).join(', ')}: ${detail}`,
     })),
   );
   if (document.wall?.sizes === 'outside') {
@@ -36,4 +36,9 @@ function faultsOf(solid: Solid): readonly { path: readonly string[]; detail: str
     })
     .map(({ path }) => ({ path, detail: `a size is at least ${thinMm} mm.` }));
   return [...tooSmall, ...kind.faults(solid)];
+}
+
+/** As parseDesign names a place in a list: the first is number 1. */
+function placeWord(key: string): string {
+  return /^\d+$/.test(key) ? `number ${Number(key) + 1}` : key;
 }

@@ -9,10 +9,11 @@ export function tankJsonSchema(): object {
   return {
     ...z.toJSONSchema(tankDocument, {
       io: 'input',
-      override({ jsonSchema }) {
-        // a place has three numbers, not at least three
-        if (!jsonSchema.prefixItems) return;
-        jsonSchema.minItems = jsonSchema.prefixItems.length;
+      override({ zodSchema, jsonSchema }) {
+        // a place has three numbers, not at least three; the radius of a corner may be left out
+        if (zodSchema._zod.def.type !== 'tuple') return;
+        const { items } = zodSchema._zod.def as unknown as z.core.$ZodTupleDef;
+        jsonSchema.minItems = items.filter(({ _zod }) => _zod.optin !== 'optional').length;
         jsonSchema.items = false;
       },
     }),

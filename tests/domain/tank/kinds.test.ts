@@ -5,6 +5,7 @@ import { highestLevel, placedShape, placedSolid } from '~/domain/tank/placed-sol
 import { loadManifold, meshOf } from '~/geometry/manifold';
 import { enclosedVolume, levels } from '~/geometry/mesh';
 import { unit } from '~/geometry/vec3';
+import { flatSolids } from './flat-solids';
 import { cylindersWithEnds } from './cylinders-with-ends';
 
 await loadManifold();
@@ -16,13 +17,8 @@ const direction = fc
   .filter(([x, y, z]) => Math.hypot(x, y, z) > 0.1)
   .map(unit);
 
-const it_ = { id: 'it', role: 'holds' } as const;
-
 /** Options that the blanks do not show. */
-const withOptions: readonly Solid[] = [
-  ...cylindersWithEnds,
-  { ...it_, kind: 'taper', bottom: [700, 90], top: [130, 410], height: 333, shift: [-450, 77] },
-];
+const withOptions: readonly Solid[] = [...cylindersWithEnds, ...flatSolids];
 
 /** Every kind at odd sizes, along every axis it may have. */
 const blanks = kinds.flatMap((kind): Solid[] => {

@@ -34,6 +34,11 @@ export interface Kind<S extends SolidFields & { kind: string }> {
   schema: z.ZodType<S>;
   /** Whether its mesh depends on the count of facets; `twice`: its triangles grow with the square of it. */
   curved(solid: S): false | 'once' | 'twice';
+  /**
+   * Where facets may stand off farther than those of a circle as wide as the extent (a gentle arc of a large
+   * radius): the diameter of the circle whose facets stand off alike, mm.
+   */
+  widestMm?(solid: S): number;
   /** Extent of the upright box along x, y, z, mm. */
   extent(solid: S): Vec3;
   /** Where the kind has an axis: the directions it may take, and the one when none is said. */
@@ -53,6 +58,12 @@ export interface Kind<S extends SolidFields & { kind: string }> {
   chords(solid: S, line: Line, slack: number): readonly Interval[];
   /** Exact volume, mm³. */
   volume(solid: S): number;
+  /**
+   * What is left when `wallMm` is taken off every face, where that is another solid of the kind: it and where the
+   * middle of its box stands in the own frame of the first; null when nothing is left. Closed form. undefined (or
+   * no such function): not of the kind, so it is worked out from `shape`.
+   */
+  eroded?(solid: S, wallMm: number): { solid: S; shift: Vec3 } | null | undefined;
   /** Faults the schema cannot see, by field: options that contradict each other. */
   faults(solid: S): readonly { path: readonly string[]; detail: string }[];
   /** A new one, of a size that suits the bench. */

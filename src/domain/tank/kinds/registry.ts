@@ -10,6 +10,8 @@ import { ellipsoidSchema } from './ellipsoid/schema';
 import type { Kind } from './kind';
 import { oval } from './oval/oval';
 import { ovalSchema } from './oval/schema';
+import { prism } from './prism/prism';
+import { prismSchema } from './prism/schema';
 import { sphereSchema } from './sphere/schema';
 import { sphere } from './sphere/sphere';
 import { taperSchema } from './taper/schema';
@@ -18,9 +20,9 @@ import { wedgeSchema } from './wedge/schema';
 import { wedge } from './wedge/wedge';
 
 /** Kinds of the document format that are not computed yet: refused by name. */
-export const kindsToCome = ['prism', 'stations', 'mesh'];
+export const kindsToCome = ['stations', 'mesh'];
 
-const known = 'box, cylinder, wedge, oval, sphere, ellipsoid, cone or taper';
+const known = 'box, cylinder, wedge, oval, sphere, ellipsoid, cone, taper or prism';
 
 export const solidSchema = z.discriminatedUnion(
   'kind',
@@ -33,6 +35,7 @@ export const solidSchema = z.discriminatedUnion(
     ellipsoidSchema,
     coneSchema,
     taperSchema,
+    prismSchema,
   ],
   {
     error: (issue) => {
@@ -55,6 +58,7 @@ export const kinds: readonly Kind<Solid>[] = [
   erased(ellipsoid),
   erased(cone),
   erased(taper),
+  erased(prism),
 ];
 
 /** What Dipwright knows about a solid's kind. */

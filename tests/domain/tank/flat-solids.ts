@@ -1,0 +1,35 @@
+import type { Solid } from '~/domain/tank/kinds/registry';
+
+const it = { id: 'it', role: 'holds' } as const;
+
+/** Options of the kinds drawn from flat faces and rounded edges that their blanks do not show. */
+export const flatSolids: readonly Solid[] = [
+  { ...it, kind: 'taper', bottom: [700, 90], top: [130, 410], height: 333, shift: [-450, 77] },
+  {
+    ...it,
+    kind: 'prism',
+    profile: [
+      [0, 0, 80],
+      [900, 0, 20],
+      [900, 300, 150],
+      [500, 300, 60],
+      [450, 120, 35],
+      [300, 500],
+      [0, 350],
+    ],
+    width: 250,
+  },
+  {
+    // with the clock, a gentle arc of a radius wider than all of it
+    ...it,
+    kind: 'prism',
+    profile: [
+      [0, 400],
+      [700, 400],
+      [700, 0],
+      [350, -30, 1900],
+      [0, 0],
+    ],
+    width: 600,
+  },
+];
