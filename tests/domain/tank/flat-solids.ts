@@ -32,4 +32,7 @@ export const flatSolids: readonly Solid[] = [
     ],
     width: 600,
   },
+  { ...it, kind: 'box', length: 700, width: 300, height: 420, edges: { y: 130 } },
+  { ...it, kind: 'box', length: 700, width: 300, height: 420, edges: { x: 90, y: 40, z: 40 } },
+  { ...it, kind: 'box', length: 700, width: 300, height: 420, edges: { x: 150, y: 150, z: 150 } },
 ];

@@ -71,9 +71,9 @@ describe('parseDesign', () => {
     ],
     [withBody({ id: '' }), '/solids/0/id', 'Solid 1, id: an id has at least one character.'],
     [
-      withBody({ edges: { z: 20 } }),
+      withBody({ edges: { z: '20' } }),
       '/solids/0/edges/z',
-      /^Solid "body", edges, z: rounded edges of a box are not computed yet/,
+      'Solid "body", edges, z: give the radius of an edge in millimetres.',
     ],
     [
       { ...slopedCistern, solids: [body, body] },

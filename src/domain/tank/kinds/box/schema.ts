@@ -1,12 +1,12 @@
 import { z } from 'zod/v4';
-import { length, solidFields } from '../../solid';
+import { greatestLengthMm, length, solidFields } from '../../solid';
 
-/** Rectangular box. Rounded edges are not computed yet: `edges` may be left out or all 0. */
-const edge = z.literal(
-  0,
-  'Rounded edges of a box are not computed yet: leave edges out or give 0.',
-);
+const radius = z
+  .number('Give the radius of an edge in millimetres.')
+  .min(0, 'A radius is 0 mm or more.')
+  .max(greatestLengthMm, 'A length is at most 100 000 mm.');
 
+/** Rectangular box, its edges sharp or rounded. */
 export const boxSchema = z.strictObject({
   ...solidFields,
   kind: z.literal('box'),
@@ -16,6 +16,12 @@ export const boxSchema = z.strictObject({
   width: length,
   /** Along z. */
   height: length,
-  edges: z.strictObject({ x: edge.optional(), y: edge.optional(), z: edge.optional() }).optional(),
+  /** Radius of the four edges along x, along y, along z. Default 0. */
+  edges: z
+    .strictObject(
+      { x: radius.optional(), y: radius.optional(), z: radius.optional() },
+      'Give the radii of the edges as { "x", "y", "z" }.',
+    )
+    .optional(),
 });
 export type Box = z.infer<typeof boxSchema>;
