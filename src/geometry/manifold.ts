@@ -3,16 +3,16 @@ import Module, {
   type ManifoldToplevel,
   type Vec2 as MutableVec2,
 } from 'manifold-3d';
-import { areaPreservingFactor } from './circle';
 import { distinctRounded } from './distinct-rounded';
 import { exactPoints } from './exact-points';
 import type { Mesh } from './mesh';
 import { placedMesh } from './placed-mesh';
 import { toTank, type Placing } from './placing';
 import { prismMesh } from './prism-mesh';
+import { revolvedMesh } from './revolved-mesh';
 import { axisOrder, type Axis, type Shape, type Vec2 } from './shape';
 import type { Vec3 } from './vec3';
-import type { Bounds } from './wall-pieces';
+import type { Bounds, WallPiece } from './wall-pieces';
 
 /**
  * The only file that knows manifold-3d. Booleans of closed meshes; everything it hands out is plain
@@ -78,7 +78,8 @@ export function libraryRefusal(mesh: Mesh): string | null {
 export function meshOf(placed: PlacedShape, origin: Vec3): Mesh {
   const { shape, place } = placed;
   if (shape.form === 'mesh') return placedMesh(shape.mesh, place, origin);
-  const direct = shape.form === 'extrusion' ? prismMesh(shape, place, origin) : null;
+  if (shape.form === 'revolution') return placedMesh(revolvedMesh(shape), place, origin);
+  const direct = prismMesh(shape, place, origin);
   if (direct) return direct;
   const made = make(placed, origin);
   try {
@@ -118,11 +119,11 @@ export function spaceOf(
   }
 }
 
-/** The part of a union of closed meshes inside any of the boxes (everything when there are none), less the hulls of the pieces. */
+/** The part of a union of closed meshes inside any of the boxes (everything when there are none), less the pieces. */
 export function meshLess(
   union: readonly Mesh[],
   boxes: readonly Bounds[],
-  pieces: (whole: Mesh) => readonly (readonly Vec3[])[],
+  pieces: (whole: Mesh) => readonly WallPiece[],
 ): Mesh {
   const { Manifold } = loadedLibrary();
   const bin: Manifold[] = [];
@@ -133,7 +134,9 @@ export function meshLess(
   try {
     const parts = union.map((mesh) => keep(ofMesh(mesh)));
     const whole = parts.length === 1 ? parts[0]! : keep(Manifold.union(parts));
-    const taken = pieces(read(whole)).map((points) => keep(Manifold.hull(mutablePoints(points))));
+    const taken = pieces(read(whole)).map((piece) =>
+      keep('mesh' in piece ? ofMesh(piece.mesh) : Manifold.hull(mutablePoints(piece.points))),
+    );
     let rest = whole;
     if (boxes.length > 0) {
       const solids = boxes.map(({ low, high }) => {
@@ -211,7 +214,8 @@ function loadedLibrary(): ManifoldToplevel {
 function make({ shape, place }: PlacedShape, origin: Vec3): Manifold {
   const { Manifold } = loadedLibrary();
   if (shape.form === 'mesh') return ofMesh(placedMesh(shape.mesh, place, origin));
-  const prism = shape.form === 'extrusion' ? prismMesh(shape, place, origin) : null;
+  if (shape.form === 'revolution') return ofMesh(placedMesh(revolvedMesh(shape), place, origin));
+  const prism = prismMesh(shape, place, origin);
   if (prism) {
     // a convex prism is the hull of its corners, which keeps their doubles and costs half as much
     const corners = Array.from({ length: prism.positions.length / 3 }, (_, i) =>
@@ -222,12 +226,9 @@ function make({ shape, place }: PlacedShape, origin: Vec3): Manifold {
     // corners so near to flat that the hull left some out
     hull.delete();
   }
-  const raw =
-    shape.form === 'extrusion'
-      ? Manifold.extrude([mutable(shape.outline)], shape.length, 0, 0, [1, 1], true)
-      : Manifold.revolve([mutable(shape.profile)], shape.facets);
+  const raw = Manifold.extrude([mutable(shape.outline)], shape.length, 0, 0, [1, 1], true);
   try {
-    const toOwnFrame = shape.form === 'extrusion' ? extrudedIn(shape) : revolvedIn(shape);
+    const toOwnFrame = extrudedIn(shape);
     return raw.warpBatch((vertices) => {
       for (let i = 0; i < vertices.length; i += 3) {
         const own = toOwnFrame(vertices[i]!, vertices[i + 1]!, vertices[i + 2]!);
@@ -273,27 +274,6 @@ function extrudedIn({ axis, outline, length }: Extract<Shape, { form: 'extrusion
   return (a, b, c) => {
     const [first, second] = exact(a, b);
     return turn(first, second, c < 0 ? -length / 2 : length / 2);
-  };
-}
-
-/** The same for a body turned about z: each vertex back on its meridian and its point of the profile. */
-function revolvedIn({
-  axis,
-  profile,
-  facets,
-  phase,
-  stretch,
-}: Extract<Shape, { form: 'revolution' }>): IntoOwn {
-  const turn = turnedIn(axis);
-  const exact = exactPoints(profile);
-  const factor = areaPreservingFactor(facets);
-  const theta = (2 * Math.PI) / facets;
-  return (a, b, c) => {
-    const [radius, place] = exact(Math.hypot(a, b), c);
-    const angle = phase + Math.round(Math.atan2(b, a) / theta) * theta;
-    const reach = radius * factor;
-    const [x, y, z] = turn(reach * Math.cos(angle), reach * Math.sin(angle), place);
-    return [x * stretch[0], y * stretch[1], z * stretch[2]];
   };
 }
 
