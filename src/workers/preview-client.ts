@@ -1,7 +1,8 @@
 import { DipwrightError } from '~/domain/errors';
 import type { Preview } from '~/domain/table/preview';
+import type { Measured, PlusMinus } from '~/domain/table/uncertainty';
 import type { TankDocument } from '~/domain/tank/document';
-import type { Measured, PreviewReply, PreviewRequest } from './preview-protocol';
+import type { PreviewReply, PreviewRequest } from './preview-protocol';
 
 /** Computes previews off the page's own thread. Latest wins. */
 export interface PreviewClient {
@@ -12,10 +13,10 @@ export interface PreviewClient {
    */
   compute(design: TankDocument): Promise<Preview | null>;
   /**
-   * The ± of each row of a preview of that design, litres (JCGM 100, first order: sizes, dip,
-   * computing); null when a later call took its place. Slower than a preview: one run a size.
+   * The ± of each row of a preview of that design and of its brim, litres (JCGM 100, first order: sizes,
+   * dip, computing); null when a later call took its place. Slower than a preview: one run a size.
    */
-  plusMinus(design: TankDocument, preview: Preview, measured: Measured): Promise<number[] | null>;
+  plusMinus(design: TankDocument, preview: Preview, measured: Measured): Promise<PlusMinus | null>;
   /** Ends the worker; open calls resolve to null. */
   close(): void;
 }
@@ -87,7 +88,7 @@ export function createPreviewClient(
     async plusMinus(design, { rows, frame: { heightMm }, errorL }, measured) {
       const table = { rows: [...rows], heightMm, errorL };
       const reply = await ask({ ask: 'plus-minus', design, table, measured });
-      return reply && 'plusMinusL' in reply ? reply.plusMinusL : null;
+      return reply && 'plusMinus' in reply ? reply.plusMinus : null;
     },
     close() {
       worker.terminate();

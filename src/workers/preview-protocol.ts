@@ -1,11 +1,7 @@
 import type { ErrorCode, FieldFault } from '~/domain/errors';
 import type { Preview } from '~/domain/table/preview';
-import type { TableWithoutPlusMinus } from '~/domain/table/uncertainty';
+import type { Measured, PlusMinus, TableWithoutPlusMinus } from '~/domain/table/uncertainty';
 import type { TankDocument } from '~/domain/tank/document';
-import type { TankSettings } from '~/domain/tank/settings';
-
-/** How sizes and dips were measured: what the ± of a row comes from. */
-export type Measured = Pick<TankSettings, 'sizePlusMinusMm' | 'dipPlusMinusMm'>;
 
 /** Page → worker: compute this design, or the ± of its rows. A later request takes the place of one still waiting. */
 export type PreviewRequest = { number: number; design: TankDocument } & (
@@ -15,6 +11,6 @@ export type PreviewRequest = { number: number; design: TankDocument } & (
 /** Worker → page: one reply a request that was computed; superseded ones are never answered. */
 export type PreviewReply = { number: number } & (
   | { preview: Preview }
-  | { plusMinusL: number[] }
+  | { plusMinus: PlusMinus }
   | { refusal: { code: ErrorCode; message: string; faults: readonly FieldFault[] } }
 );

@@ -1,7 +1,7 @@
 import { DipwrightError } from '~/domain/errors';
 import { computePreview } from '~/domain/table/compute-preview';
 import type { Preview } from '~/domain/table/preview';
-import { plusMinusOfRows } from '~/domain/table/uncertainty';
+import { plusMinusOfTable } from '~/domain/table/uncertainty';
 import { loadManifold } from '~/geometry/manifold';
 import { latestWins } from './latest-wins';
 import type { PreviewReply, PreviewRequest } from './preview-protocol';
@@ -19,8 +19,8 @@ const take = latestWins<PreviewRequest>(async (request) => {
   try {
     await ready;
     if (request.ask === 'plus-minus') {
-      const plusMinusL = await plusMinusOfRows(design, request.measured, request.table);
-      scope.postMessage({ number, plusMinusL });
+      const plusMinus = await plusMinusOfTable(design, request.measured, request.table);
+      scope.postMessage({ number, plusMinus });
       return;
     }
     const preview = await computePreview(design);

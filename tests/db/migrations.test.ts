@@ -55,6 +55,30 @@ describe('migrations', () => {
   });
 });
 
+describe('0003, closer rows', () => {
+  it('lets stand what was issued before, guards and all, and may run again', async () => {
+    fresh = await freshDatabase();
+    const { sequelize } = fresh.database;
+    // the tables as they were before it, with a row that was issued then
+    await sequelize.query('ALTER TABLE strapping_rows DROP COLUMN between_rows');
+    await sequelize.query('ALTER TABLE revisions DROP COLUMN brim_plus_minus_l');
+    await sequelize.query('ALTER TABLE tanks DROP COLUMN own_size_plus_minus');
+    await sequelize.query("DELETE FROM applied_migrations WHERE name = '0003-between-rows'");
+    await sequelize.query('SET FOREIGN_KEY_CHECKS = 0');
+    await sequelize.query(
+      "INSERT INTO strapping_rows VALUES ('00000000-0000-4000-8000-000000000001', 0, 10, 5, 5000, 1)",
+    );
+    await sequelize.query('SET FOREIGN_KEY_CHECKS = 1');
+    expect((await runMigrations(sequelize)).applied).toEqual(['0003-between-rows']);
+    // broken off before it was noted: everything is there already
+    await sequelize.query("DELETE FROM applied_migrations WHERE name = '0003-between-rows'");
+    expect((await runMigrations(sequelize)).applied).toEqual(['0003-between-rows']);
+    expect(await fresh.sql('SELECT depth_mm, volume_l, between_rows FROM strapping_rows')).toEqual([
+      { depth_mm: 10, volume_l: 5, between_rows: 0 },
+    ]);
+  });
+});
+
 describe('the guards of what was issued', () => {
   it('say so where the right to make triggers is missing', async () => {
     for (const errno of [1142, 1044, 1419]) {

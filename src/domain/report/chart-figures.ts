@@ -8,7 +8,7 @@ import { markReading } from './mark-reading';
 
 /** The box at the head: brim, safe fill, unusable, usable, each under its own name and with its ±. */
 export function chartFigures(
-  { settings, options, heightMm }: ChartInput,
+  { settings, options, heightMm, brimPlusMinusL }: ChartInput,
   levels: ChartLevels,
   digits: TableDigits,
 ): ChartFigure[] {
@@ -24,7 +24,7 @@ export function chartFigures(
     unit: volumeUnitSigns[options.volume],
     detail,
   });
-  const atBrim = levels.at(heightMm).plusMinusL;
+  const atBrim = brimPlusMinusL ?? levels.at(heightMm).plusMinusL;
   const atSafeFill = levels.safeFillMm === null ? atBrim : levels.at(levels.safeFillMm).plusMinusL;
   const atOutlet = levels.outletMm === null ? 0 : levels.at(levels.outletMm).plusMinusL;
   const brim = figure('Brim, computed', levels.capacityL, atBrim, weightWhenFull(levels, digits));

@@ -32,6 +32,9 @@ export interface ChartInput {
   levelPerReading: number;
   capacityL: number;
   errorL: number;
+  /** ± of the brim, litres; null, of a revision from before it was frozen: then that of its last row. */
+  brimPlusMinusL: number | null;
+  /** Those between the printed ones too. */
   rows: readonly IssuedRow[];
   /** The elevation that a print shows (sketchOf); null leaves it out. */
   sketch: Sketch | null;

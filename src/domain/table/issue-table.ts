@@ -2,11 +2,16 @@ import { DipwrightError } from '../errors';
 import type { TankDocument } from '../tank/document';
 import type { TankSettings } from '../tank/settings';
 import { checkIssuable } from './check-issuable';
-import { computeTable } from './compute-table';
+import { computeInFull } from './compute-in-full';
 import type { IssuedTable } from './issued-table';
-import { plusMinusOfRows } from './uncertainty';
+import { rowsBetween } from './rows-between';
+import { plusMinusOfTable } from './uncertainty';
 
-/** The table a revision freezes, with the ± of every row. Throws `invalid`, one fault a reason, for a design that may not be issued. */
+/**
+ * The table a revision freezes, with the ± of every row and closer rows where the curve between two of them would
+ * be wrong by more than 1e-6 of capacity. Throws `invalid`, one fault a reason, for a design that may
+ * not be issued.
+ */
 export async function issueTable(
   document: TankDocument,
   settings: TankSettings,
@@ -17,13 +22,18 @@ export async function issueTable(
     const faults = reasons.map((detail) => ({ pointer: '/solids', detail }));
     throw new DipwrightError('invalid', reasons.join(' '), { faults });
   }
-  const table = await computeTable(document, { stepMm });
-  const plusMinus = await plusMinusOfRows(document, settings, table);
-  const rows = table.rows.map(({ depthMm, volumeL, surfaceCm2 }, i) => ({
-    depthMm,
-    volumeL,
-    surfaceCm2,
-    plusMinusL: plusMinus[i]!,
+  const { table, space, frame } = await computeInFull(document, { stepMm });
+  const asked = new Set(table.rows);
+  const all = [...table.rows, ...rowsBetween(space, frame, table.rows)].sort(
+    (one, other) => one.depthMm - other.depthMm,
+  );
+  const { rowsL, brimL } = await plusMinusOfTable(document, settings, { ...table, rows: all });
+  const rows = all.map((row, i) => ({
+    depthMm: row.depthMm,
+    volumeL: row.volumeL,
+    surfaceCm2: row.surfaceCm2,
+    plusMinusL: rowsL[i]!,
+    betweenRows: !asked.has(row),
   }));
-  return { table, rows };
+  return { table, rows, brimPlusMinusL: brimL };
 }

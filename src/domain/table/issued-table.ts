@@ -1,7 +1,10 @@
-import type { ComputedTable, IssuedRow } from './request';
+import type { ComputedTable, KeptRow } from './request';
 
-/** What a revision freezes: the computed table and its rows with their ±. */
+/** What a revision freezes: the computed table, its rows with their ± and the closer ones between them. */
 export interface IssuedTable {
   table: ComputedTable;
-  rows: readonly IssuedRow[];
+  /** Ascending by reading: those of the table, and between them those that only look-ups use. */
+  rows: readonly KeptRow[];
+  /** ± of the whole liquid space, litres: sizes and computing, no dip. */
+  brimPlusMinusL: number;
 }

@@ -10,3 +10,6 @@ export function publishedFacets(solids: readonly PlacedSolid[]): 512 | 256 | 128
   if (twice === 0 && once <= 4) return 512;
   return twice <= 2 && once <= 40 ? 256 : 128;
 }
+
+/** No table is published at more facets to a turn. */
+export const finestFacets = 512;

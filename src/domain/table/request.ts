@@ -65,3 +65,8 @@ export const issuedRow = z.object({
   plusMinusL: z.number(),
 });
 export type IssuedRow = z.infer<typeof issuedRow>;
+
+/** A row as it is kept: asked for and printed, or a closer one that only look-ups and their curve use. */
+export interface KeptRow extends IssuedRow {
+  betweenRows: boolean;
+}

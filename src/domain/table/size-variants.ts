@@ -1,34 +1,49 @@
 import type { TankDocument } from '../tank/document';
 import { placedSolid, type PlacedSolid } from '../tank/placed-solid';
+import type { Kind } from '../tank/kinds/kind';
 import { kindOf, type Solid } from '../tank/kinds/registry';
 import { valueAt } from '../tank/value-at';
 
-/** One size of one solid, and the ways the tank may look when it is `by` mm larger. */
+/** One size of one solid, and the ways the tank may look when it is `byMm` larger. */
 export interface SizeVariant {
   sizeMm: number;
+  byMm: number;
   variants: readonly (readonly PlacedSolid[])[];
 }
 
 /**
- * Every size of the document in turn made larger. A solid that is not turned grows from its lowest corner,
+ * Every size of the document in turn made larger by what `byOf` says of it, mm; a size of which it says 0 is
+ * left out. A solid that is not turned grows from its lowest corner,
  * as the document places it. A turned one may grow from either end, since the document does not say which of
  * its faces meets the next solid: both are given, and the caller takes the one that matters more.
  */
-export function sizeVariants(document: TankDocument, by: number): SizeVariant[] {
+export function sizeVariants(
+  document: TankDocument,
+  byOf: (solidId: string, path: readonly string[]) => number,
+): SizeVariant[] {
   const whole = document.solids.map(placedSolid);
   return document.solids.flatMap((solid, index) =>
-    kindOf(solid)
-      .sizes(solid)
-      .map(({ path }) => {
-        const sizeMm = Number(valueAt(solid, path));
-        const grown = placedSolid(withSize(solid, path, sizeMm + by));
-        const original = whole[index]!;
-        const turned = (solid.turn ?? [0, 0, 0]).some((degrees) => degrees % 360 !== 0);
-        const replacements = turned
-          ? [1, -1].map((end) => grownFrom(original, grown, end))
-          : [grown];
-        return { sizeMm, variants: replacements.map((one) => whole.with(index, one)) };
-      }),
+    measuredOf(solid).flatMap(({ path, sizeMm, grown: grownBy }) => {
+      const byMm = byOf(solid.id, path);
+      if (byMm === 0) return [];
+      const grown = placedSolid(grownBy(byMm));
+      const original = whole[index]!;
+      const turned = (solid.turn ?? [0, 0, 0]).some((degrees) => degrees % 360 !== 0);
+      const replacements = turned ? [1, -1].map((end) => grownFrom(original, grown, end)) : [grown];
+      return [{ sizeMm, byMm, variants: replacements.map((one) => whole.with(index, one)) }];
+    }),
+  );
+}
+
+/** What was measured of a solid, and the solid with one of it larger. */
+function measuredOf(solid: Solid): ReturnType<NonNullable<Kind<Solid>['measured']>> {
+  const kind = kindOf(solid);
+  return (
+    kind.measured?.(solid) ??
+    kind.sizes(solid).map(({ path }) => {
+      const sizeMm = Number(valueAt(solid, path));
+      return { path, sizeMm, grown: (byMm) => withSize(solid, path, sizeMm + byMm) };
+    })
   );
 }
 

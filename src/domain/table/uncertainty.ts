@@ -1,8 +1,10 @@
 import { loadManifold } from '../../geometry/manifold';
 import { DipwrightError } from '../errors';
 import type { TankDocument } from '../tank/document';
-import { placedSolid, type PlacedSolid } from '../tank/placed-solid';
+import type { PlacedSolid } from '../tank/placed-solid';
+import { placedSolids } from '../tank/placed-solids';
 import type { TankSettings } from '../tank/settings';
+import { sizeKey } from '../tank/size-key';
 import { curveFromRows, segmentOf } from './curve';
 import { liquidSpace } from './liquid-space';
 import { readingFrame } from './reading-frame';
@@ -17,52 +19,68 @@ export type TableWithoutPlusMinus = Pick<ComputedTable, 'rows' | 'heightMm' | 'e
 const facets = 48;
 const samples = 100;
 
+/** How sizes and dips were measured: what the ± of a table comes from. */
+export type Measured = Pick<
+  TankSettings,
+  'sizePlusMinusMm' | 'ownSizePlusMinusMm' | 'dipPlusMinusMm'
+>;
+
+/** Half-widths of 95 % intervals, litres. */
+export interface PlusMinus {
+  /** Of the litres at each row, in the order of the rows: sizes, dip and computing. */
+  rowsL: number[];
+  /** Of the whole liquid space: sizes and computing. Nobody dips a brim. */
+  brimL: number;
+}
+
 /**
- * The ± of the litres at each row of a table (half-width of a 95 % interval): first order, independent
- * contributions in quadrature (JCGM 100:2008, 5.1.2, equation 10). They are the ± of every size, turned one at
- * a time through the whole computation at fixed readings; the ± of the dip times dV/dreading; the bound of
- * computing. Places and angles are taken as exact. Litres, in the order of the rows.
+ * The ± of a table, half-widths of 95 % intervals: first order, independent contributions in quadrature (JCGM
+ * 100:2008, 5.1.2, equation 10). They are the ± of every size (its own, or that of all), turned one at a time
+ * through the whole computation at fixed readings; the ± of the dip times dV/dreading; the bound of computing.
+ * The brim is the whole space whatever the stick reaches, without a dip. Places and angles are taken as exact.
  */
-export async function plusMinusOfRows(
+export async function plusMinusOfTable(
   document: TankDocument,
-  settings: Pick<TankSettings, 'sizePlusMinusMm' | 'dipPlusMinusMm'>,
+  measured: Measured,
   { rows, heightMm, errorL }: TableWithoutPlusMinus,
-): Promise<number[]> {
+): Promise<PlusMinus> {
   await loadManifold();
   const depths = Array.from({ length: samples + 1 }, (_, i) => (i / samples) * heightMm);
-  const solids = document.solids.map(placedSolid);
+  const solids = placedSolids(document);
   const nominal = litresAt(document, solids, depths);
-  const sizes = sizesSquared(document, settings.sizePlusMinusMm, depths, nominal.litres);
+  const sizes = sizesSquared(document, measured, depths, nominal.litres);
   const depthOf = Float64Array.from(depths);
 
   const { slopeLPerMm } = curveFromRows(rows, nominal.levelPerReading);
-  return rows.map(({ depthMm }, row) => {
+  const rowsL = rows.map(({ depthMm }, row) => {
     const i = segmentOf(depthOf, depthMm);
     const t = (depthMm - depths[i]!) / (depths[i + 1]! - depths[i]!);
     const bySizes = sizes[i]! + Math.min(Math.max(t, 0), 1) * (sizes[i + 1]! - sizes[i]!);
-    const byDip = settings.dipPlusMinusMm * slopeLPerMm[row]!;
+    const byDip = measured.dipPlusMinusMm * slopeLPerMm[row]!;
     return Math.sqrt(bySizes + byDip ** 2 + errorL ** 2);
   });
+  return { rowsL, brimL: Math.sqrt(sizes[samples + 1]! + errorL ** 2) };
 }
 
-/** Sum of the squares of what each size contributes at each depth, L². */
+/** Sum of the squares of what each size contributes at each depth, and last to the whole space, L². */
 function sizesSquared(
   document: TankDocument,
-  plusMinusMm: number,
+  { sizePlusMinusMm, ownSizePlusMinusMm = {} }: Measured,
   depths: readonly number[],
   nominal: readonly number[],
 ): number[] {
   const sum = nominal.map(() => 0);
-  if (plusMinusMm === 0) return sum;
-  const larger = sizeVariants(document, plusMinusMm);
-  const smaller = sizeVariants(document, -plusMinusMm);
-  larger.forEach(({ sizeMm, variants }, index) => {
+  const plusMinusOf = (id: string, path: readonly string[]) =>
+    ownSizePlusMinusMm[sizeKey(id, path)] ?? sizePlusMinusMm;
+  const larger = sizeVariants(document, plusMinusOf);
+  const smaller = sizeVariants(document, (id, path) => -plusMinusOf(id, path));
+  larger.forEach(({ sizeMm, byMm, variants }, index) => {
     const changes = variants.map(
       (variant, end) =>
         changed(variant) ??
         // a size made larger may leave nothing under the stick: then it is made smaller
-        (sizeMm > plusMinusMm ? changed(smaller[index]!.variants[end]!) : null) ??
-        nominal.map((litres) => (litres * plusMinusMm) / sizeMm),
+        (sizeMm > byMm ? changed(smaller[index]!.variants[end]!) : null) ??
+        nominal.map((litres) => (litres * byMm) / sizeMm),
     );
     sum.forEach((_, i) => (sum[i]! += Math.max(...changes.map((change) => change[i]! ** 2))));
   });
@@ -79,6 +97,7 @@ function sizesSquared(
   }
 }
 
+/** Litres at each depth, and last of the whole space. */
 function litresAt(
   document: TankDocument,
   solids: readonly PlacedSolid[],
@@ -87,5 +106,6 @@ function litresAt(
   const space = liquidSpace(solids, facets);
   const frame = readingFrame(document, solids, space);
   const litres = tableRows(space, frame, depths).map(({ volumeL }) => volumeL);
+  litres.push(space.volumeMm3 / 1e6);
   return { litres, levelPerReading: frame.levelPerReading };
 }

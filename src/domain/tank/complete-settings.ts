@@ -44,6 +44,9 @@ export function changedSettings(
     });
   }
 
+  // none has one spelling: an empty map would make another content of the same
+  if (Object.keys(after.ownSizePlusMinusMm ?? {}).length === 0) delete after.ownSizePlusMinusMm;
+
   if (after.measuredBy !== 'stated') {
     const own = sizePlusMinusByMeans[after.measuredBy];
     if (change.sizePlusMinusMm !== undefined && change.sizePlusMinusMm !== own) {

@@ -31,7 +31,11 @@ export const tankSettings = z.strictObject({
     .nullable(),
   safeFillPercent: percent,
   /** Where the outlet stops drawing; what stands below is unusable. null: not told, nothing is called unusable. */
-  outletMm: z.number('Give the outlet height in millimetres.').min(0, 'An outlet height is 0 mm or more.').max(100_000).nullable(),
+  outletMm: z
+    .number('Give the outlet height in millimetres.')
+    .min(0, 'An outlet height is 0 mm or more.')
+    .max(100_000)
+    .nullable(),
   /** Zero of the stick to the rim of the dip hole; finds a worn or shortened stick. null: not measured. */
   referenceHeightMm: z
     .number('Give the reference height in millimetres.')
@@ -40,9 +44,30 @@ export const tankSettings = z.strictObject({
     .nullable(),
   measuredBy: z.enum(measuredBy, 'Choose tape, drawing or stated.'),
   /** ± of each size, mm: tape 2, drawing 1, stated as given. */
-  sizePlusMinusMm: z.number('Give the ± of a size in millimetres.').min(0, 'A ± is 0 or more.').max(1000),
+  sizePlusMinusMm: z
+    .number('Give the ± of a size in millimetres.')
+    .min(0, 'A ± is 0 or more.')
+    .max(1000),
+  /**
+   * ± of single sizes where it differs from that of all, mm, by their key (sizeKey): `{ "body/length": 0.5 }`. A key
+   * whose solid or size is gone is not looked at. Left out when there is none.
+   */
+  ownSizePlusMinusMm: z
+    .record(
+      z.string().max(200, 'The name of a size has at most 200 characters.'),
+      z
+        .number('Give the ± of a size in millimetres.')
+        .min(0, 'A ± is 0 or more.')
+        .max(1000, 'A ± is at most 1000 mm.'),
+      'Give the ± of single sizes as an object: { "body/length": 0.5 }.',
+    )
+    .refine((own) => Object.keys(own).length <= 400, 'At most 400 sizes may have a ± of their own.')
+    .optional(),
   /** ± of a dip reading, mm. */
-  dipPlusMinusMm: z.number('Give the ± of a dip in millimetres.').min(0, 'A ± is 0 or more.').max(1000),
+  dipPlusMinusMm: z
+    .number('Give the ± of a dip in millimetres.')
+    .min(0, 'A ± is 0 or more.')
+    .max(1000),
 });
 export type TankSettings = z.infer<typeof tankSettings>;
 

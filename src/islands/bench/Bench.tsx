@@ -47,7 +47,7 @@ function BenchSheet({ tank, design, etag, role, person }: BenchProps) {
   const document = scene.history.present;
   const [units] = useUnitsPreference(person);
   const { settings, change, faults, unsaved, saved: settingsSaved } = useSettings(tank);
-  const { preview, plusMinusL, problem } = usePreview(document, settings);
+  const { preview, plusMinus, problem } = usePreview(document, settings);
   const { saving, save, takeTheirs, keepMine } = useDraftSaving(tank.id, document, etag);
   const [depthMm, setDepthMm] = useState<number | null>(null);
   const [issuing, setIssuing] = useState(false);
@@ -56,8 +56,8 @@ function BenchSheet({ tank, design, etag, role, person }: BenchProps) {
   useUndoKeys(dispatch);
 
   const table = useMemo(
-    () => (preview && plusMinusL ? liveTable(preview, plusMinusL, settings) : null),
-    [preview, plusMinusL, settings],
+    () => (preview && plusMinus ? liveTable(preview, plusMinus, settings) : null),
+    [preview, plusMinus, settings],
   );
   const depth = table
     ? Math.min(depthMm ?? Math.round(table.heightMm / 2), table.heightMm)

@@ -1,13 +1,7 @@
 import { useId, type Dispatch, type ReactNode } from 'react';
 import type { FieldFault } from '~/domain/errors';
 import { liquidCodes, liquids, type LiquidCode } from '~/domain/liquid/liquids';
-import {
-  plusMinusAt,
-  safeFillL,
-  safeFillMm,
-  unusableL,
-  type DipTable,
-} from '~/domain/table/answer-at';
+import { plusMinusAt, safeFillL, safeFillMm, unusableL } from '~/domain/table/answer-at';
 import type { TankDocument } from '~/domain/tank/document';
 import { sizePlusMinusByMeans, type TankSettings } from '~/domain/tank/settings';
 import type { TankChange } from '~/domain/tank/tank';
@@ -17,6 +11,7 @@ import type { LengthUnit } from '~/domain/units/length-unit';
 import type { VolumeUnit } from '~/domain/units/volume-unit';
 import { setAttitude, setStick } from '~/scene/commands';
 import type { SceneAction } from '~/scene/scene';
+import type { LiveTable } from './live-table';
 import { NoGas } from '../shared/NoGas';
 import { parseBetween, parseHeight, parsePlace, parseSize } from './parse-typed';
 import { TypedNumber } from './TypedNumber';
@@ -28,7 +23,7 @@ interface TitleBlockProps {
   onSettings(change: TankChange): void;
   settingsFaults: readonly FieldFault[];
   shapeFaults: readonly FieldFault[];
-  table: DipTable | null;
+  table: LiveTable | null;
   /** z of the floor at the stick, where its zero is when none is typed. */
   floorZ: number | null;
   length: LengthUnit;
@@ -40,7 +35,7 @@ interface TitleBlockProps {
 export function TitleBlock(props: TitleBlockProps) {
   const { document, dispatch, settings, onSettings, table, length, volume } = props;
   const format = (mm: number) => formatLength(mm, length);
-  const brimPlusMinus = table ? (table.plusMinusL[table.plusMinusL.length - 1] ?? 0) : 0;
+  const brimPlusMinus = table?.brimPlusMinusL ?? 0;
   const safeMm = table ? safeFillMm(table) : null;
   const fault = (key: keyof TankSettings) =>
     props.settingsFaults.find(({ pointer }) => pointer === `/${key}`)?.detail;

@@ -1,6 +1,7 @@
 import { useEffect, useRef, useState } from 'react';
 import { DipwrightError } from '~/domain/errors';
 import type { Preview } from '~/domain/table/preview';
+import type { PlusMinus } from '~/domain/table/uncertainty';
 import type { TankDocument } from '~/domain/tank/document';
 import type { TankSettings } from '~/domain/tank/settings';
 import { createPreviewClient, type PreviewClient } from '~/workers/preview-client';
@@ -8,8 +9,8 @@ import { createPreviewClient, type PreviewClient } from '~/workers/preview-clien
 export interface LivePreview {
   /** The last shape that could be computed; it stays while the present one cannot. */
   preview: Preview | null;
-  /** ± of its rows, litres. For the moment after an edit it is still that of the shape before. */
-  plusMinusL: readonly number[] | null;
+  /** ± of its rows and of its brim. For the moment after an edit it is still that of the shape before. */
+  plusMinus: PlusMinus | null;
   /** Why the present design cannot be computed. */
   problem: DipwrightError | null;
 }
@@ -19,10 +20,10 @@ const restMs = 120;
 /** Computes the design in a worker as it changes, then the ± of its rows; the newest wins. */
 export function usePreview(
   design: TankDocument,
-  { sizePlusMinusMm, dipPlusMinusMm }: TankSettings,
+  { sizePlusMinusMm, ownSizePlusMinusMm, dipPlusMinusMm }: TankSettings,
 ): LivePreview {
   const client = useRef<PreviewClient | null>(null);
-  const [live, setLive] = useState<LivePreview>({ preview: null, plusMinusL: null, problem: null });
+  const [live, setLive] = useState<LivePreview>({ preview: null, plusMinus: null, problem: null });
 
   useEffect(() => {
     const started = createPreviewClient();
@@ -38,15 +39,16 @@ export function usePreview(
     const follow = async (worker: PreviewClient) => {
       const preview = await worker.compute(design);
       if (!current || !preview) return;
-      setLive(({ plusMinusL }) => ({ preview, plusMinusL, problem: null }));
+      setLive(({ plusMinus }) => ({ preview, plusMinus, problem: null }));
       // one run a size: left until the hand rests, so that the next edit never waits for it
       await new Promise((resolve) => setTimeout(resolve, restMs));
       if (!current) return;
-      const plusMinusL = await worker.plusMinus(design, preview, {
+      const plusMinus = await worker.plusMinus(design, preview, {
         sizePlusMinusMm,
         dipPlusMinusMm,
+        ...(ownSizePlusMinusMm === undefined ? {} : { ownSizePlusMinusMm }),
       });
-      if (current && plusMinusL) setLive({ preview, plusMinusL, problem: null });
+      if (current && plusMinus) setLive({ preview, plusMinus, problem: null });
     };
     if (client.current) {
       follow(client.current).catch((error: unknown) => {
@@ -63,7 +65,7 @@ export function usePreview(
     return () => {
       current = false;
     };
-  }, [design, sizePlusMinusMm, dipPlusMinusMm]);
+  }, [design, sizePlusMinusMm, ownSizePlusMinusMm, dipPlusMinusMm]);
 
   return live;
 }

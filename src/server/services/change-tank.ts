@@ -6,7 +6,7 @@ import { updateTank } from '../database/repositories/tanks';
 import { inTransaction } from '../database/transaction';
 import { readTank } from './read-tank';
 import { scopeOf } from './scope-of';
-import { settingsOf } from './settings-of';
+import { recordOfSettings, settingsOf } from './settings-of';
 import { tankInSight } from './tank-in-sight';
 
 /** Name and settings; what is not named stays. What was issued keeps its own settings. */
@@ -21,7 +21,10 @@ export async function changeTank(
     const scope = scopeOf(context, actor, transaction);
     const tank = await tankInSight(scope, actor, tankId, { lock: true });
     const { name = tank.name, ...change } = input.change;
-    await updateTank(scope, tankId, { name, ...changedSettings(settingsOf(tank), change) });
+    await updateTank(scope, tankId, {
+      name,
+      ...recordOfSettings(changedSettings(settingsOf(tank), change)),
+    });
   });
   return readTank(context, actor, { tankId });
 }

@@ -13,6 +13,7 @@ import { inTransaction } from '../database/transaction';
 import { readTank } from './read-tank';
 import { designHash } from './revision-hash';
 import { scopeOf } from './scope-of';
+import { recordOfSettings } from './settings-of';
 
 /** A new tank and its draft: the design that was sent, or else a plain box to begin from. */
 export async function createTank(context: Context, actor: Actor, input: NewTank): Promise<Tank> {
@@ -36,7 +37,7 @@ export async function createTank(context: Context, actor: Actor, input: NewTank)
       id: tankId,
       installationId,
       name,
-      ...settings,
+      ...recordOfSettings(settings),
       createdBy: actor.userId,
       createdAt: now,
     });

@@ -94,7 +94,7 @@ async function contentOf(
   return { design, settings, contentHash: hash, nextNumber: (latest?.number ?? 0) + 1 };
 }
 
-function freeze({ design, settings }: Content, { table, rows }: IssuedTable) {
+function freeze({ design, settings }: Content, { table, rows, brimPlusMinusL }: IssuedTable) {
   const { heightMm } = table;
   refuseOutletAbove(settings, heightMm);
   return {
@@ -105,7 +105,8 @@ function freeze({ design, settings }: Content, { table, rows }: IssuedTable) {
     capacityL: table.capacityL,
     errorL: table.errorL,
     rowCount: rows.length,
-    hash: revisionHash(design, settings, rows),
+    brimPlusMinusL,
+    hash: revisionHash(design, settings, rows, brimPlusMinusL),
   };
 }
 

@@ -1,11 +1,11 @@
 import { requirePermission } from '~/domain/access/permissions';
 import type { Actor, Context } from '../context';
 import { listRevisionHeads } from '../database/repositories/revisions';
-import { plusMinusAtTop } from '../database/repositories/tank-overviews';
+import { brimsPlusMinus } from '../database/repositories/tank-overviews';
 import { scopeOf } from './scope-of';
 import { tankInSight } from './tank-in-sight';
 
-/** ± of the litres at the top of every revision of a tank, by revision. */
+/** ± of the brim of every revision of a tank, litres, by revision. */
 export async function listBrims(
   context: Context,
   actor: Actor,
@@ -14,5 +14,5 @@ export async function listBrims(
   requirePermission(actor.role, 'revision.read');
   const scope = scopeOf(context, actor);
   await tankInSight(scope, actor, input.tankId);
-  return plusMinusAtTop(scope, await listRevisionHeads(scope, input.tankId));
+  return brimsPlusMinus(scope, await listRevisionHeads(scope, input.tankId));
 }

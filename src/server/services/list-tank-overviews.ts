@@ -3,9 +3,9 @@ import type { TankDocument } from '~/domain/tank/document';
 import type { Actor, Context } from '../context';
 import { currentRevisions } from '../database/repositories/revisions';
 import {
+  brimsPlusMinus,
   draftDesigns,
   handedOverAmong,
-  plusMinusAtTop,
 } from '../database/repositories/tank-overviews';
 import { listTankRecords } from '../database/repositories/tanks';
 import { scopeOf } from './scope-of';
@@ -30,7 +30,7 @@ export async function listTankOverviews(
   const designs = await draftDesigns(scope, ids);
   const handedOver = await handedOverAmong(scope, ids);
   const revisions = await currentRevisions(scope, ids);
-  const plusMinus = await plusMinusAtTop(scope, [...revisions.values()]);
+  const plusMinus = await brimsPlusMinus(scope, [...revisions.values()]);
   return new Map(
     ids.map((id) => {
       const design = designs.get(id);

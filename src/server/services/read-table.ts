@@ -1,4 +1,5 @@
 import { requirePermission } from '~/domain/access/permissions';
+import { printedRows } from '~/domain/table/printed-rows';
 import type { IssuedRow } from '~/domain/table/request';
 import type { RevisionSummary } from '~/domain/tank/tank';
 import type { Actor, Context } from '../context';
@@ -8,7 +9,7 @@ import { summaryOf } from './revision-summary';
 import { scopeOf } from './scope-of';
 import { soundRows } from './sound-rows';
 
-/** The table as issued, its hash checked. */
+/** The table as issued, its hash checked, without the closer rows between. */
 export async function readTable(
   context: Context,
   actor: Actor,
@@ -18,6 +19,6 @@ export async function readTable(
   const scope = scopeOf(context, actor);
   const { revision, tank, current } = await revisionInSight(scope, actor, input.revisionId);
   const names = await namesOfUsers(context.database, [revision.issuedBy]);
-  const rows = await soundRows(scope, revision);
+  const rows = printedRows(await soundRows(scope, revision));
   return { revision: summaryOf(revision, current, names), tankName: tank.name, rows };
 }

@@ -48,6 +48,7 @@ export async function renderChart(
     levelPerReading,
     capacityL,
     errorL,
+    brimPlusMinusL: revision.brimPlusMinusL,
     rows: await soundRows(scope, revision),
     sketch: await context.computePool.sketch(design),
     options: input.options,

@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto';
-import type { IssuedRow } from '~/domain/table/request';
+import type { KeptRow } from '~/domain/table/request';
 import type { TankDocument } from '~/domain/tank/document';
 import type { TankSettings } from '~/domain/tank/settings';
 import { canonicalJson } from './canonical-json';
@@ -16,18 +16,24 @@ export function contentHash(design: string, settings: TankSettings): string {
 
 /**
  * The hash of a revision: SHA-256, hex, over lines of UTF-8 that each end with a line feed:
- * `dipwright-revision 1`, the design and the settings as canonical JSON, then one line a row,
- * `depthMm,volumeL,surfaceCm2,plusMinusL`, each number in the shortest form that reads back the same.
+ * `dipwright-revision 2`, the design and the settings as canonical JSON, the ± of the brim in litres, then one line
+ * a row, `depthMm,volumeL,surfaceCm2,plusMinusL`, followed by `,between` for a row that only look-ups use; each
+ * number in the shortest form that reads back the same. A revision from before has no ± of its brim (null) and no
+ * rows between: its first line says 1 and the line of the brim is not there.
  */
 export function revisionHash(
   design: TankDocument,
   settings: TankSettings,
-  rows: readonly IssuedRow[],
+  rows: readonly KeptRow[],
+  brimPlusMinusL: number | null,
 ): string {
   const hash = createHash('sha256');
-  hash.update(`dipwright-revision 1\n${canonicalJson(design)}\n${canonicalJson(settings)}\n`);
-  for (const { depthMm, volumeL, surfaceCm2, plusMinusL } of rows) {
-    hash.update(`${depthMm},${volumeL},${surfaceCm2},${plusMinusL}\n`);
+  const form = brimPlusMinusL === null ? 1 : 2;
+  hash.update(`dipwright-revision ${form}\n${canonicalJson(design)}\n${canonicalJson(settings)}\n`);
+  if (brimPlusMinusL !== null) hash.update(`${brimPlusMinusL}\n`);
+  for (const { depthMm, volumeL, surfaceCm2, plusMinusL, betweenRows } of rows) {
+    const kind = betweenRows ? ',between' : '';
+    hash.update(`${depthMm},${volumeL},${surfaceCm2},${plusMinusL}${kind}\n`);
   }
   return hash.digest('hex');
 }

@@ -157,6 +157,7 @@ export function cisternInput(changes: Partial<ChartInput> = {}): ChartInput {
     levelPerReading: 1,
     capacityL: 123,
     errorL: 2e-6,
+    brimPlusMinusL: null,
     rows: rowsOf(cistern, 5),
     sketch: sketchOf(
       prismMesh(

@@ -1,6 +1,9 @@
 import { describe, expect, it } from 'vitest';
 import { checkIssuable } from '~/domain/table/check-issuable';
+import { computeTable } from '~/domain/table/compute-table';
 import { issueTable } from '~/domain/table/issue-table';
+import { printedRows } from '~/domain/table/printed-rows';
+import type { Solid } from '~/domain/tank/kinds/registry';
 import type { TankSettings } from '~/domain/tank/settings';
 import { startingPoints } from '~/domain/tank/starting-points';
 import { box, cylinder, design, hull, slopedCistern } from './designs';
@@ -117,12 +120,52 @@ describe('the ± of a row', () => {
     );
   });
 
-  it('adds variances as JCGM 100:2008, 5.1.2, has it: 2 ± 0.1 by 2 ± 0.2 by 2 ± 0.3', async () => {
-    // the product's own rule gives ΔV = 0.4 √14 with one ± a size; with the same ± of 0.2 for each, 0.8 √3.
-    // At the brim the height is not felt at a fixed reading: what remains is 0.8 √2 (in cm³ for cm)
-    const tank = design([box('cube', [20, 20, 20])], { stick: { at: [10, 10] } });
-    const { plusMinusL } = await rowAt(tank, 20, { sizePlusMinusMm: 2, dipPlusMinusMm: 0 });
-    expect(plusMinusL * 1000).toBeCloseTo(0.8 * Math.SQRT2, 6);
+  describe('of 2 ± 0.1 by 2 ± 0.2 by 2 ± 0.3', () => {
+    // worked example, mathematics forum question 4614762: V = 8, ΔV = 0.4 √14 = 1.49666, and not
+    // 2.626, which is the greatest volume less V. The rule is JCGM 100:2008, 5.1.2, equation (10). Here in cm
+    const cube = design([box('cube', [20, 20, 20])], { stick: { at: [10, 10] } });
+    const own = { 'cube/length': 1, 'cube/width': 2, 'cube/height': 3 };
+
+    it('the brim is ± 1.49666, without a dip', async () => {
+      for (const dipPlusMinusMm of [0, 2]) {
+        const measured = { ...settings, ownSizePlusMinusMm: own, dipPlusMinusMm };
+        const { brimPlusMinusL, table } = await issueTable(cube, measured, 5);
+        expect(table.capacityL * 1000).toBeCloseTo(8, 9);
+        expect(brimPlusMinusL * 1000).toBeCloseTo(0.4 * Math.sqrt(14), 6);
+        expect(brimPlusMinusL * 1000).toBeLessThan(2.626);
+      }
+    });
+
+    it('a reading at the top does not feel the height, and feels the dip', async () => {
+      const sizes = Math.hypot(0.1 * 4, 0.2 * 4);
+      const bySizes = await rowAt(cube, 20, { ownSizePlusMinusMm: own, dipPlusMinusMm: 0 });
+      expect(bySizes.plusMinusL * 1000).toBeCloseTo(sizes, 6);
+      const withDip = await rowAt(cube, 20, { ownSizePlusMinusMm: own, dipPlusMinusMm: 1 });
+      expect(withDip.plusMinusL * 1000).toBeCloseTo(Math.hypot(sizes, 0.1 * 4), 6);
+    });
+
+    it('sizes without a ± of their own have that of all; keys of what is gone do not matter', async () => {
+      const some = { 'cube/height': 3, 'gone/length': 50, 'cube/diameter': 50 };
+      const measured = { ...settings, sizePlusMinusMm: 2, ownSizePlusMinusMm: some };
+      const { brimPlusMinusL } = await issueTable(cube, measured, 5);
+      expect(brimPlusMinusL * 1000).toBeCloseTo(Math.hypot(0.2 * 4, 0.2 * 4, 0.3 * 4), 6);
+    });
+
+    it('a size that is exact adds nothing', async () => {
+      const measured = {
+        ...settings,
+        ownSizePlusMinusMm: { ...own, 'cube/width': 0, 'cube/height': 0 },
+      };
+      const { brimPlusMinusL } = await issueTable(cube, measured, 5);
+      expect(brimPlusMinusL * 1000).toBeCloseTo(0.1 * 4, 6);
+    });
+  });
+
+  it('of the brim of a ball is that of its diameter', async () => {
+    const ball = design([{ id: 'ball', role: 'holds', kind: 'sphere', diameter: 600 } as Solid]);
+    const { brimPlusMinusL } = await issueTable(ball, settings, 50);
+    // dV = π D²/2 · dD
+    expect(brimPlusMinusL / ((Math.PI * 600 * 600 * 2) / 2e6)).toBeCloseTo(1, 2);
   });
 
   it('of a lying cylinder: dV/dD by its closed form', async () => {
@@ -147,9 +190,19 @@ describe('the ± of a row', () => {
 
   it('keeps the rows of the computed table', async () => {
     const { table, rows } = await issueTable(slopedCistern, settings, 50);
-    expect(rows.map(({ depthMm, volumeL, surfaceCm2 }) => [depthMm, volumeL, surfaceCm2])).toEqual(
-      table.rows.map(({ depthMm, volumeL, surfaceCm2 }) => [depthMm, volumeL, surfaceCm2]),
+    expect(printedRows(rows)).toEqual(
+      table.rows.map(({ depthMm, volumeL, surfaceCm2 }) => ({
+        depthMm,
+        volumeL,
+        surfaceCm2,
+        plusMinusL: rows.find((row) => row.depthMm === depthMm)!.plusMinusL,
+      })),
     );
+    expect((await computeTable(slopedCistern, { stepMm: 50 })).rows).toEqual(table.rows);
+    // one closer row, where the slope of the floor ends
+    expect(rows.filter(({ betweenRows }) => betweenRows).map(({ depthMm }) => depthMm)).toEqual([
+      60,
+    ]);
     for (const { plusMinusL } of rows) expect(plusMinusL).toBeGreaterThan(0);
   });
 });

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { DipwrightError } from '~/domain/errors';
 import { changedSettings, startingSettings } from '~/domain/tank/complete-settings';
-import type { TankSettings } from '~/domain/tank/settings';
+import { tankSettings, type TankSettings } from '~/domain/tank/settings';
 
 function pointersOf(before: TankSettings, change: Partial<TankSettings>, at = ''): string[] {
   try {
@@ -34,6 +34,32 @@ describe('a change', () => {
       ...diesel,
       outletMm: 40,
     });
+  });
+
+  it('takes the ± of single sizes as a whole, and has one spelling for none', () => {
+    const own = changedSettings(diesel, { ownSizePlusMinusMm: { 'body/length': 0.5 } });
+    expect(own.ownSizePlusMinusMm).toEqual({ 'body/length': 0.5 });
+    expect(changedSettings(own, { outletMm: 40 }).ownSizePlusMinusMm).toEqual({
+      'body/length': 0.5,
+    });
+    expect(
+      changedSettings(own, { ownSizePlusMinusMm: { 'body/width': 1 } }).ownSizePlusMinusMm,
+    ).toEqual({ 'body/width': 1 });
+    expect(changedSettings(own, { ownSizePlusMinusMm: {} })).toEqual(diesel);
+  });
+
+  it.each([
+    [{ 'body/length': -1 }, 'A ± is 0 or more.'],
+    [{ 'body/length': 1001 }, 'A ± is at most 1000 mm.'],
+    [{ 'body/length': '2' }, 'Give the ± of a size in millimetres.'],
+    [
+      Object.fromEntries(Array.from({ length: 401 }, (_, i) => [`s${i}/length`, 1])),
+      'At most 400 sizes may have a ± of their own.',
+    ],
+    [[1], 'Give the ± of single sizes as an object: { "body/length": 0.5 }.'],
+  ])('refuses a ± of single sizes that is none: %o', (own, sentence) => {
+    const read = tankSettings.safeParse({ ...diesel, ownSizePlusMinusMm: own });
+    expect(read.error?.issues.map(({ message }) => message)).toEqual([sentence]);
   });
 
   it('needs a density for "other", and for nothing else', () => {

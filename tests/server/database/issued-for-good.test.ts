@@ -28,7 +28,7 @@ describe('the database itself refuses to change what was issued', () => {
     ['UPDATE strapping_rows SET volume_l = 1 WHERE revision_id = ?'],
     ['DELETE FROM strapping_rows WHERE revision_id = ?'],
     [
-      'REPLACE INTO strapping_rows SELECT revision_id, row_no, 1, 1, 1, 1 FROM strapping_rows WHERE revision_id = ?',
+      'REPLACE INTO strapping_rows SELECT revision_id, row_no, 1, 1, 1, 1, 0 FROM strapping_rows WHERE revision_id = ?',
     ],
   ])('%s', async (statement) => {
     await expect(run(statement, [made.revision.id])).rejects.toThrow(
@@ -41,7 +41,7 @@ describe('the database itself refuses to change what was issued', () => {
       run(
         `INSERT INTO revisions SELECT UUID(), workshop_id, tank_id, number, letter, design, settings, content_hash,
            step_mm, height_mm, level_per_reading, capacity_l, error_l, row_count, hash, note, issued_by,
-           issued_at FROM revisions WHERE id = ?`,
+           issued_at, brim_plus_minus_l FROM revisions WHERE id = ?`,
         [made.revision.id],
       ),
     ).rejects.toMatchObject({ name: 'SequelizeUniqueConstraintError' });

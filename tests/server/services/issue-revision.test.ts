@@ -1,14 +1,20 @@
 import { computePreview } from '~/domain/table/compute-preview';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { DipwrightError } from '~/domain/errors';
+import type { TankDocument } from '~/domain/tank/document';
+import { printedRows } from '~/domain/table/printed-rows';
 import { createComputePool, type ComputePool } from '~/server/jobs/compute-pool';
 import { changeTank } from '~/server/services/change-tank';
 import { issueRevision } from '~/server/services/issue-revision';
 import { levelPerReading } from '~/server/services/level-per-reading';
 import { listRevisions } from '~/server/services/list-revisions';
+import { listBrims } from '~/server/services/list-brims';
+import { lookUpDepth } from '~/server/services/look-up-depth';
 import { lookUpVolume } from '~/server/services/look-up-volume';
 import { readTable } from '~/server/services/read-table';
+import { readTankCard } from '~/server/services/read-tank-card';
 import { readTank } from '~/server/services/read-tank';
+import { revisionHash } from '~/server/services/revision-hash';
 import { saveDraft } from '~/server/services/save-draft';
 import type { Team } from '../../../db/seeds/add-workshop';
 import { addDraft } from '../support/add-tank';
@@ -46,7 +52,8 @@ describe('what is issued', () => {
     const revision = await issue(tank.id, 0.7);
     const table = await readTable(house.context, team.fitter, { revisionId: revision.id });
     const computed = await boxPool().issue(boxDesign(333.3, 77.7, 101.1), tank.settings, 0.7);
-    expect(table.rows).toEqual(computed.rows);
+    expect(table.rows).toEqual(printedRows(computed.rows));
+    expect(Object.keys(table.rows[0]!)).toEqual(['depthMm', 'volumeL', 'surfaceCm2', 'plusMinusL']);
     expect(table.revision).toEqual(revision);
     expect(revision.hash).toMatch(/^[0-9a-f]{64}$/);
   });
@@ -191,6 +198,14 @@ describe('what the database holds is checked before it is given out', () => {
   });
 });
 
+const lyingCylinder: TankDocument = {
+  ...boxDesign(),
+  solids: [{ id: 'barrel', role: 'holds', kind: 'cylinder', diameter: 500, length: 1000 }],
+};
+function segment(r: number, h: number): number {
+  return r * r * Math.acos((r - h) / r) - (r - h) * Math.sqrt(2 * r * h - h * h);
+}
+
 describe('with the real engine', () => {
   const pool = createComputePool({ threads: 1 });
   afterAll(() => pool.close());
@@ -208,6 +223,85 @@ describe('with the real engine', () => {
     const context = { ...house.context, computePool: pool };
     await expect(issue(tank.id, 10, context)).rejects.toMatchObject({ code: 'invalid' });
     expect(await kept(tank.id)).toEqual({ revisions: 0, rows: 0 });
+  });
+
+  it('keeps closer rows where a curve needs them: look-ups use them, tables and files leave them out', async () => {
+    const design = lyingCylinder;
+    const { tank } = await addDraft(house, team, { design });
+    const context = { ...house.context, computePool: pool };
+    const revision = await issue(tank.id, 5, context);
+    const { rows } = await readTable(context, team.fitter, { revisionId: revision.id });
+    expect(rows.map(({ depthMm }) => depthMm)).toEqual(
+      Array.from({ length: 101 }, (_, i) => 5 * i),
+    );
+    const stored = await kept(tank.id);
+    expect(stored.rows).toBeGreaterThan(101);
+    expect(stored.rows).toBeLessThan(101 + 20);
+
+    // the segment of a circle: r² acos((r−h)/r) − (r−h) √(2rh−h²), here in the first 5 mm
+    for (const depthMm of [0.05, 0.7, 2.5, 4.1, 497.5]) {
+      const answer = await lookUpVolume(context, team.fitter, { revisionId: revision.id, depthMm });
+      const exact = (segment(250, depthMm) * 1000) / 1e6;
+      expect(Math.abs(answer.volumeL - exact) / revision.capacityL).toBeLessThan(1e-6);
+      const back = await lookUpDepth(context, team.fitter, {
+        revisionId: revision.id,
+        volumeL: exact,
+      });
+      expect(Math.abs(back.depthMm - depthMm)).toBeLessThan(0.02);
+    }
+    const card = (await readTankCard(context, team.fitter, { tankId: tank.id }))!;
+    expect(card.rows.length).toBe(stored.rows);
+    expect(card.rows.filter(({ betweenRows }) => betweenRows).length).toBe(stored.rows - 101);
+  });
+
+  it('reads a revision from before there were closer rows as it was issued', async () => {
+    const { tank } = await addDraft(house, team, { design: lyingCylinder });
+    const settings = (await readTank(house.context, team.fitter, { tankId: tank.id })).settings;
+    const computed = await pool.issue(lyingCylinder, settings, 5);
+    const rows = computed.rows.filter(({ betweenRows }) => !betweenRows);
+    // as an older program wrote it: no row between, nothing frozen of the brim, the hash of its time
+    const before = withPool({
+      issue: () => Promise.resolve({ ...computed, rows, brimPlusMinusL: null as never }),
+    });
+    const revision = await issue(tank.id, 5, before);
+    expect(revision.hash).toBe(revisionHash(lyingCylinder, settings, rows, null));
+    const read = await readTable(house.context, team.fitter, { revisionId: revision.id });
+    expect(read.rows).toEqual(printedRows(rows));
+    const top = rows.at(-1)!.plusMinusL;
+    const brims = await listBrims(house.context, team.fitter, { tankId: tank.id });
+    expect(brims.get(revision.id)).toBe(top);
+    const card = await readTankCard(house.context, team.fitter, { tankId: tank.id });
+    expect(card?.brimPlusMinusL).toBe(top);
+  });
+
+  it('freezes the ± of the brim and of single sizes', async () => {
+    const own = { 'body/length': 0.5, 'gone/length': 3 };
+    const { tank } = await addDraft(house, team, { settings: { ownSizePlusMinusMm: own } });
+    const context = { ...house.context, computePool: pool };
+    const revision = await issue(tank.id, 10, context);
+    const frozen = await house.sql<{ settings: string; brim: number }>(
+      'SELECT settings, brim_plus_minus_l AS brim FROM revisions WHERE id = ?',
+      [revision.id],
+    );
+    expect(JSON.parse(frozen[0]!.settings).ownSizePlusMinusMm).toEqual(own);
+    // 1000 × 500 × 300 with ± 0.5, 2, 2 mm and no dip
+    const expected = Math.hypot(500 * 300 * 0.5, 1000 * 300 * 2, 1000 * 500 * 2) / 1e6;
+    expect(frozen[0]!.brim).toBeCloseTo(expected, 6);
+    const brims = await listBrims(context, team.fitter, { tankId: tank.id });
+    expect(brims.get(revision.id)).toBe(frozen[0]!.brim);
+
+    const without = await changeTank(context, team.designer, {
+      tankId: tank.id,
+      change: { ownSizePlusMinusMm: {} },
+    });
+    expect(without.settings).not.toHaveProperty('ownSizePlusMinusMm');
+    expect(without.draftDiffers).toBe(true);
+    const again = await changeTank(context, team.designer, {
+      tankId: tank.id,
+      change: { ownSizePlusMinusMm: { 'gone/length': 3, 'body/length': 0.5 } },
+    });
+    expect(again.settings.ownSizePlusMinusMm).toEqual(own);
+    expect(again.draftDiffers).toBe(false);
   });
 
   it('freezes the same share of a tilted stick as the engine computes with', async () => {

@@ -30,34 +30,82 @@ describe('canonicalJson', () => {
 });
 
 describe('revisionHash', () => {
+  const design =
+    '{"format":"dipwright-tank","name":"Box","solids":[{"height":300,"id":"body","kind":"box","length":1000,"role":"holds","width":500}],"version":1}';
+  const frozen =
+    '{"densityKgPerM3":null,"dipPlusMinusMm":2,"liquid":"diesel","measuredBy":"tape","outletMm":40,"referenceHeightMm":null,"safeFillPercent":95,"sizePlusMinusMm":2}';
+  const sha256 = (lines: readonly string[]) =>
+    createHash('sha256').update(lines.join('\n')).digest('hex');
+  const printed = { betweenRows: false };
+
   it('is SHA-256 over the lines that docs/api.md describes', () => {
     const rows = [
-      { depthMm: 0, volumeL: 0, surfaceCm2: 5000, plusMinusL: 1 },
-      { depthMm: 0.1 + 0.2, volumeL: 0.15000000000000002, surfaceCm2: 5000, plusMinusL: 1e-7 },
+      { depthMm: 0, volumeL: 0, surfaceCm2: 5000, plusMinusL: 1, ...printed },
+      { depthMm: 0.125, volumeL: 0.0625, surfaceCm2: 5000, plusMinusL: 1, betweenRows: true },
+      {
+        depthMm: 0.1 + 0.2,
+        volumeL: 0.15000000000000002,
+        surfaceCm2: 5000,
+        plusMinusL: 1e-7,
+        ...printed,
+      },
+    ];
+    const expected = sha256([
+      'dipwright-revision 2',
+      design,
+      frozen,
+      '0.75',
+      '0,0,5000,1',
+      '0.125,0.0625,5000,1,between',
+      '0.30000000000000004,0.15000000000000002,5000,1e-7',
+      '',
+    ]);
+    expect(revisionHash(boxDesign(), settings, rows, 0.75)).toBe(expected);
+  });
+
+  it('of a revision from before the ± of its brim was frozen is as it was', () => {
+    const rows = [
+      { depthMm: 0, volumeL: 0, surfaceCm2: 5000, plusMinusL: 1, ...printed },
+      {
+        depthMm: 0.1 + 0.2,
+        volumeL: 0.15000000000000002,
+        surfaceCm2: 5000,
+        plusMinusL: 1e-7,
+        ...printed,
+      },
     ];
     const lines = [
       'dipwright-revision 1',
-      '{"format":"dipwright-tank","name":"Box","solids":[{"height":300,"id":"body","kind":"box","length":1000,"role":"holds","width":500}],"version":1}',
-      '{"densityKgPerM3":null,"dipPlusMinusMm":2,"liquid":"diesel","measuredBy":"tape","outletMm":40,"referenceHeightMm":null,"safeFillPercent":95,"sizePlusMinusMm":2}',
+      design,
+      frozen,
       '0,0,5000,1',
       '0.30000000000000004,0.15000000000000002,5000,1e-7',
       '',
     ];
-    const expected = createHash('sha256').update(lines.join('\n')).digest('hex');
-    expect(revisionHash(boxDesign(), settings, rows)).toBe(expected);
+    expect(revisionHash(boxDesign(), settings, rows, null)).toBe(sha256(lines));
   });
 
   it('changes with every part', () => {
-    const row = { depthMm: 1, volumeL: 2, surfaceCm2: 3, plusMinusL: 4 };
+    const row = { depthMm: 1, volumeL: 2, surfaceCm2: 3, plusMinusL: 4, ...printed };
+    const ofRows = (...rows: (typeof row)[]) => revisionHash(boxDesign(), settings, rows, 1);
     const hashes = [
-      revisionHash(boxDesign(), settings, [row]),
-      revisionHash(boxDesign(1001), settings, [row]),
-      revisionHash(boxDesign(), { ...settings, outletMm: 41 }, [row]),
-      revisionHash(boxDesign(), settings, [row, row]),
-      revisionHash(boxDesign(), settings, [{ ...row, depthMm: 1.0000000000000002 }]),
-      revisionHash(boxDesign(), settings, [{ ...row, volumeL: 2.0000000000000004 }]),
-      revisionHash(boxDesign(), settings, [{ ...row, surfaceCm2: 5 }]),
-      revisionHash(boxDesign(), settings, [{ ...row, plusMinusL: 5 }]),
+      ofRows(row),
+      revisionHash(boxDesign(1001), settings, [row], 1),
+      revisionHash(boxDesign(), { ...settings, outletMm: 41 }, [row], 1),
+      revisionHash(
+        boxDesign(),
+        { ...settings, ownSizePlusMinusMm: { 'body/length': 1 } },
+        [row],
+        1,
+      ),
+      revisionHash(boxDesign(), settings, [row], 1.0000000000000002),
+      revisionHash(boxDesign(), settings, [row], null),
+      ofRows(row, row),
+      ofRows({ ...row, depthMm: 1.0000000000000002 }),
+      ofRows({ ...row, volumeL: 2.0000000000000004 }),
+      ofRows({ ...row, surfaceCm2: 5 }),
+      ofRows({ ...row, plusMinusL: 5 }),
+      ofRows({ ...row, betweenRows: true }),
     ];
     expect(new Set(hashes).size).toBe(hashes.length);
   });

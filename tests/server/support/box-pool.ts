@@ -1,6 +1,6 @@
 import { invalid } from '~/domain/errors';
 import { sketchOf } from '~/domain/report/sketch';
-import type { IssuedRow, TableRow } from '~/domain/table/request';
+import type { KeptRow, TableRow } from '~/domain/table/request';
 import type { TankDocument } from '~/domain/tank/document';
 import type { ComputePool } from '~/server/jobs/compute-pool';
 
@@ -24,7 +24,7 @@ export function boxPool(): ComputePool {
         ...totals(areaMm2, heightMm),
         rows: stepped(heightMm, stepMm).map((depthMm) => rowAt(areaMm2, depthMm)),
       };
-      return { table, rows: table.rows.map(withPlusMinus) };
+      return { table, rows: table.rows.map(withPlusMinus), brimPlusMinusL: 0.25 };
     },
     async sketch(design) {
       const { length, width, height } = boxOf(design);
@@ -89,6 +89,6 @@ function rowAt(areaMm2: number, depthMm: number): TableRow {
 }
 
 /** The dip's ± of 2 mm alone. */
-function withPlusMinus({ depthMm, volumeL, surfaceCm2 }: TableRow): IssuedRow {
-  return { depthMm, volumeL, surfaceCm2, plusMinusL: 2 * surfaceCm2 * 1e-4 };
+function withPlusMinus({ depthMm, volumeL, surfaceCm2 }: TableRow): KeptRow {
+  return { depthMm, volumeL, surfaceCm2, plusMinusL: 2 * surfaceCm2 * 1e-4, betweenRows: false };
 }

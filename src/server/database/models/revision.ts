@@ -15,7 +15,10 @@ export interface RevisionRecord {
   levelPerReading: number;
   capacityL: number;
   errorL: number;
+  /** Closer rows included. */
   rowCount: number;
+  /** null: issued before it was frozen. */
+  brimPlusMinusL: number | null;
   hash: string;
   note: string | null;
   issuedBy: string;
@@ -40,6 +43,7 @@ export function defineRevision(sequelize: Sequelize): ModelStatic<Model<Revision
       capacityL: { type: DataTypes.DOUBLE, allowNull: false, field: 'capacity_l' },
       errorL: { type: DataTypes.DOUBLE, allowNull: false, field: 'error_l' },
       rowCount: { type: DataTypes.INTEGER, allowNull: false, field: 'row_count' },
+      brimPlusMinusL: { type: DataTypes.DOUBLE, allowNull: true, field: 'brim_plus_minus_l' },
       hash: { type: DataTypes.CHAR(64), allowNull: false },
       note: { type: DataTypes.STRING(500), allowNull: true },
       issuedBy: { type: DataTypes.CHAR(36), allowNull: false, field: 'issued_by' },

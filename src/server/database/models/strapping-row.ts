@@ -7,6 +7,7 @@ export interface StrappingRowRecord {
   volumeL: number;
   surfaceCm2: number;
   plusMinusL: number;
+  betweenRows: boolean;
 }
 
 export function defineStrappingRow(sequelize: Sequelize): ModelStatic<Model<StrappingRowRecord>> {
@@ -19,6 +20,12 @@ export function defineStrappingRow(sequelize: Sequelize): ModelStatic<Model<Stra
       volumeL: { type: DataTypes.DOUBLE, allowNull: false, field: 'volume_l' },
       surfaceCm2: { type: DataTypes.DOUBLE, allowNull: false, field: 'surface_cm2' },
       plusMinusL: { type: DataTypes.DOUBLE, allowNull: false, field: 'plus_minus_l' },
+      betweenRows: {
+        type: DataTypes.BOOLEAN,
+        allowNull: false,
+        defaultValue: false,
+        field: 'between_rows',
+      },
     },
     { tableName: 'strapping_rows' },
   );

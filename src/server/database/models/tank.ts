@@ -15,6 +15,8 @@ export interface TankRecord {
   referenceHeightMm: number | null;
   measuredBy: TankSettings['measuredBy'];
   sizePlusMinusMm: number;
+  /** ± of single sizes as JSON, null: none has its own. */
+  ownSizePlusMinus: string | null;
   dipPlusMinusMm: number;
   createdBy: string;
   createdAt: Date;
@@ -35,6 +37,7 @@ export function defineTank(sequelize: Sequelize): ModelStatic<Model<TankRecord>>
       referenceHeightMm: { type: DataTypes.DOUBLE, allowNull: true, field: 'reference_height_mm' },
       measuredBy: { type: DataTypes.STRING(16), allowNull: false, field: 'measured_by' },
       sizePlusMinusMm: { type: DataTypes.DOUBLE, allowNull: false, field: 'size_plus_minus_mm' },
+      ownSizePlusMinus: { type: DataTypes.TEXT, allowNull: true, field: 'own_size_plus_minus' },
       dipPlusMinusMm: { type: DataTypes.DOUBLE, allowNull: false, field: 'dip_plus_minus_mm' },
       createdBy: { type: DataTypes.CHAR(36), allowNull: false, field: 'created_by' },
       createdAt: { type: DataTypes.DATE(3), allowNull: false, field: 'created_at' },

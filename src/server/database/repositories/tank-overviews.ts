@@ -28,18 +28,28 @@ export async function handedOverAmong(
   return new Set(found.map((handover) => handover.get().tankId));
 }
 
-/** ± of the litres at the last row of each of these revisions, by revision. */
-export async function plusMinusAtTop(
+/**
+ * ± of the brim of each of these revisions, litres, by revision: as frozen with it; of one that was issued before
+ * that was frozen, the ± of its last row.
+ */
+export async function brimsPlusMinus(
   scope: Scope,
   revisions: readonly RevisionHead[],
 ): Promise<Map<string, number>> {
-  if (revisions.length === 0) return new Map();
+  const known = revisions.flatMap(({ id, brimPlusMinusL }) =>
+    brimPlusMinusL === null ? [] : [[id, brimPlusMinusL] as const],
+  );
+  const older = revisions.filter(({ brimPlusMinusL }) => brimPlusMinusL === null);
+  if (older.length === 0) return new Map(known);
   const found = await scope.database.models.strappingRows.findAll({
     where: {
-      [Op.or]: revisions.map(({ id, rowCount }) => ({ revisionId: id, rowNo: rowCount - 1 })),
+      [Op.or]: older.map(({ id, rowCount }) => ({ revisionId: id, rowNo: rowCount - 1 })),
     },
     attributes: ['revisionId', 'plusMinusL'],
     transaction: scope.transaction,
   });
-  return new Map(found.map((row) => [row.get().revisionId, row.get().plusMinusL]));
+  return new Map([
+    ...known,
+    ...found.map((row) => [row.get().revisionId, row.get().plusMinusL] as const),
+  ]);
 }
