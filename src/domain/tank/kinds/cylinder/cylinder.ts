@@ -8,6 +8,7 @@ import { sizeWords } from '../size-words';
 import { barrelOf, flatEnds, headOf } from './barrel';
 import { endFaults } from './end-faults';
 import { endWords } from './end-words';
+import { erodedCylinder } from './eroded';
 import { lineInCylinder } from './line-in-cylinder';
 import { cylinderSchema, type Cylinder, type End } from './schema';
 
@@ -18,6 +19,9 @@ export const cylinder: Kind<Cylinder> = {
   schema: cylinderSchema,
   curved: ({ ends = flatEnds }) =>
     ends.every(({ form }) => form === 'flat' || form === 'cone') ? 'once' : 'twice',
+  // a knuckle of an eighth of the radius has the fewest chords for its size: 1.8 times a ball's at 32 facets, 1.3 at many
+  widestMm: ({ diameter, ends = flatEnds }) =>
+    ends.some(({ form }) => form === 'torisphere') ? 2 * diameter : diameter,
   extent(solid) {
     const { axis, overall } = barrelOf(solid);
     const extent: [number, number, number] = [solid.diameter, solid.diameter, solid.diameter];
@@ -67,6 +71,7 @@ export const cylinder: Kind<Cylinder> = {
       (Math.PI * diameter * diameter * length) / 4,
     );
   },
+  eroded: erodedCylinder,
   faults: endFaults,
   blank: (id) => ({ id, role: 'holds', kind: 'cylinder', diameter: 400, length: 800, axis: 'x' }),
 };
