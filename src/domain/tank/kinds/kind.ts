@@ -45,6 +45,13 @@ export interface Kind<S extends SolidFields & { kind: string }> {
   axes: { usual: Axis; choices: readonly Axis[] } | null;
   /** The sizes that are typed, in drawing order. */
   sizes(solid: S): readonly Size[];
+  /**
+   * What was measured of a solid whose lengths are not typed one by one, and the solid with that length larger: each
+   * has the ± of a size. Left out: the sizes.
+   */
+  measured?(
+    solid: S,
+  ): readonly { path: readonly string[]; sizeMm: number; grown(byMm: number): S }[];
   /** The sizes in one phrase for the list: "900 × 500 × 300". */
   words(solid: S): string;
   /**
