@@ -78,7 +78,7 @@ function sizesSquared(
     const changes = variants.map(
       (variant, end) =>
         changed(variant) ??
-        // a size made larger may leave nothing under the stick: then it is made smaller
+        // a size made larger may contradict another, or leave nothing under the stick: then it is made smaller
         (sizeMm > byMm ? changed(smaller[index]!.variants[end]!) : null) ??
         nominal.map((litres) => (litres * byMm) / sizeMm),
     );
@@ -87,6 +87,7 @@ function sizesSquared(
   return sum;
 
   function changed(variant: readonly PlacedSolid[]): number[] | null {
+    if (variant.some(({ kind, solid }) => kind.faults(solid).length > 0)) return null;
     try {
       const { litres } = litresAt(document, variant, depths);
       return litres.map((value, i) => value - nominal[i]!);
