@@ -1,4 +1,7 @@
 import { describe, expect, it } from 'vitest';
+import type { TankDocument } from '~/domain/tank/document';
+import type { End } from '~/domain/tank/kinds/cylinder/schema';
+import type { Solid } from '~/domain/tank/kinds/registry';
 import { startingPoints } from '~/domain/tank/starting-points';
 import {
   copySolid,
@@ -28,6 +31,31 @@ describe('commands on a design', () => {
     });
     expect(sloped).toEqual(before);
     expect(after.solids[0]).toBe(sloped.solids[0]);
+  });
+
+  it('sets a size of one of two ends, whose list stays a list', () => {
+    const ends: [End, End] = [
+      { form: 'dish', depth: 80 },
+      { form: 'torisphere', crown: 500, knuckle: 50 },
+    ];
+    const vat: Solid = {
+      id: 'vat',
+      role: 'holds',
+      kind: 'cylinder',
+      diameter: 500,
+      length: 1000,
+      ends,
+    };
+    const before: TankDocument = { ...sloped, solids: [vat], stick: { at: [500, 250] } };
+    const deeper = setSize(before, 'vat', ['ends', '0', 'depth'], 120);
+    expect(deeper.solids[0]).toEqual({ ...vat, ends: [{ form: 'dish', depth: 120 }, ends[1]] });
+    const crowned = setSize(before, 'vat', ['ends', '1', 'crown'], 600);
+    expect(crowned.solids[0]).toEqual({
+      ...vat,
+      ends: [ends[0], { form: 'torisphere', crown: 600, knuckle: 50 }],
+    });
+    expect(vat.ends).toBe(ends);
+    expect(ends[0]).toEqual({ form: 'dish', depth: 80 });
   });
 
   it('keeps a stick at the middle of the solid whose size changes, and leaves another where it is', () => {

@@ -1,13 +1,16 @@
 import { cleanup, render, screen, within } from '@testing-library/react';
 import { afterEach, expect, it } from 'vitest';
 import type { TankDocument } from '~/domain/tank/document';
-import { kinds, solidSchema } from '~/domain/tank/kinds/registry';
+import { kinds, solidSchema, type Solid } from '~/domain/tank/kinds/registry';
 import { SolidFields } from '~/islands/bench/SolidFields';
 
 afterEach(cleanup);
 
 function show(kind: (typeof kinds)[number]) {
-  const solid = kind.blank('part');
+  return showSolid(kind.blank('part'));
+}
+
+function showSolid(solid: Solid) {
   const document: TankDocument = {
     format: 'dipwright-tank',
     version: 1,
@@ -35,3 +38,21 @@ it.each(kinds.map((kind) => [kind.label, kind] as const))(
     }
   },
 );
+
+it('offers the sizes of each end of a cylinder, with their values', () => {
+  showSolid({
+    id: 'part',
+    role: 'holds',
+    kind: 'cylinder',
+    diameter: 500,
+    length: 1000,
+    ends: [
+      { form: 'dish', depth: 80 },
+      { form: 'torisphere', crown: 510, knuckle: 50 },
+    ],
+  });
+  const sizes = within(screen.getByRole('group', { name: 'Sizes of part' }));
+  const fields = sizes.getAllByRole<HTMLInputElement>('textbox').map(({ value }) => value);
+  expect(fields).toEqual(['500', '1\u202f000', '80', '510', '50']);
+  expect(sizes.getByLabelText<HTMLInputElement>('high end crown').value).toBe('510');
+});
