@@ -137,9 +137,9 @@ describe('the contract of the command', { timeout: 60_000 }, () => {
       'Solid "body", height: a length is more than 0 mm.',
     ],
     [
-      'a kind to come',
-      { ...slopedCistern, solids: [{ ...slopedCistern.solids[0], kind: 'stations' }] },
-      /^Solid "body", kind: a solid of the kind "stations" is not computed yet/,
+      'a kind that there is none of',
+      { ...slopedCistern, solids: [{ ...slopedCistern.solids[0], kind: 'blob' }] },
+      /^Solid "body", kind: the kind of a solid is box, cylinder/,
     ],
     [
       'an unknown field',

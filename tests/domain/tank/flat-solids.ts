@@ -35,4 +35,41 @@ export const flatSolids: readonly Solid[] = [
   { ...it, kind: 'box', length: 700, width: 300, height: 420, edges: { y: 130 } },
   { ...it, kind: 'box', length: 700, width: 300, height: 420, edges: { x: 90, y: 40, z: 40 } },
   { ...it, kind: 'box', length: 700, width: 300, height: 420, edges: { x: 150, y: 150, z: 150 } },
+  {
+    // with the clock; twisted sides beside flat ones, a section that goes in
+    ...it,
+    kind: 'stations',
+    stations: [
+      {
+        x: -50,
+        profile: [
+          [0, 0],
+          [0, 300],
+          [150, 140],
+          [300, 300],
+          [300, 0],
+        ],
+      },
+      {
+        x: 350,
+        profile: [
+          [0, 0],
+          [-40, 320],
+          [150, 60],
+          [340, 320],
+          [300, 0],
+        ],
+      },
+      {
+        x: 700,
+        profile: [
+          [20, 40],
+          [-40, 320],
+          [150, 60],
+          [340, 320],
+          [260, 10],
+        ],
+      },
+    ],
+  },
 ];

@@ -358,7 +358,7 @@ describe('a profile that cannot be is refused by name', () => {
       'a fourth number',
       [[0, 0, 1, 2], ...square.slice(1)] as unknown as Profile,
       '/solids/0/profile/0',
-      /give a point|too big|at most/i,
+      /^Solid "p", profile, number 1: /,
     ],
     [
       '201 points',

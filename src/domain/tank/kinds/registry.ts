@@ -16,15 +16,14 @@ import { prism } from './prism/prism';
 import { prismSchema } from './prism/schema';
 import { sphereSchema } from './sphere/schema';
 import { sphere } from './sphere/sphere';
+import { stationsSchema } from './stations/schema';
+import { stations } from './stations/stations';
 import { taperSchema } from './taper/schema';
 import { taper } from './taper/taper';
 import { wedgeSchema } from './wedge/schema';
 import { wedge } from './wedge/wedge';
 
-/** Kinds of the document format that are not computed yet: refused by name. */
-export const kindsToCome = ['stations'];
-
-const known = 'box, cylinder, wedge, oval, sphere, ellipsoid, cone, taper, prism or mesh';
+const known = 'box, cylinder, wedge, oval, sphere, ellipsoid, cone, taper, prism, stations or mesh';
 
 export const solidSchema = z.discriminatedUnion(
   'kind',
@@ -38,15 +37,11 @@ export const solidSchema = z.discriminatedUnion(
     coneSchema,
     taperSchema,
     prismSchema,
+    stationsSchema,
     meshSchema,
   ],
   {
-    error: (issue) => {
-      const kind = (issue.input as { kind?: unknown } | null)?.kind;
-      return typeof kind === 'string' && kindsToCome.includes(kind)
-        ? `A solid of the kind "${kind}" is not computed yet: use ${known}.`
-        : `The kind of a solid is ${known}.`;
-    },
+    error: `The kind of a solid is ${known}.`,
   },
 );
 export type Solid = z.infer<typeof solidSchema>;
@@ -62,6 +57,7 @@ export const kinds: readonly Kind<Solid>[] = [
   erased(cone),
   erased(taper),
   erased(prism),
+  erased(stations),
 ];
 
 const everyKind = [...kinds, erased(mesh)];
