@@ -1,3 +1,4 @@
+import { boxNeighbours } from './box-neighbours';
 import type { Mesh } from './mesh';
 import { overlapOf, type FlatTriangle } from './overlap';
 import { cross, dot, unit, type Vec3 } from './vec3';
@@ -18,6 +19,9 @@ interface Face {
   key: number;
 }
 
+/** Up to so many faces the search by direction is quicker. */
+const fewFaces = 4000;
+
 const searchAlong = unit([0.6123, 0.5347, 0.5821]);
 
 /** Cosine of 0.001 rad: a slope steeper than 1 mm in a metre is a taper, not a film. */
@@ -30,20 +34,47 @@ const parallel = Math.cos(0.001);
  */
 export function thinPlace(mesh: Mesh, thinMm: number): ThinPlace | null {
   const faces = facesOf(mesh).sort((one, other) => one.key - other.key);
+  return faces.length <= fewFaces ? byNormal(faces, thinMm) : byPlace(faces, thinMm);
+}
+
+/** Few faces: each is held against those that look the opposite way. */
+function byNormal(faces: readonly Face[], thinMm: number): ThinPlace | null {
   for (const face of faces) {
     // an opposite face has the opposite key, within the 0.001 rad allowed
     for (let i = firstAtLeast(faces, -face.key - 0.002); i < faces.length; i += 1) {
       const other = faces[i]!;
       if (other.key > -face.key + 0.002) break;
-      if (other.key < face.key || dot(face.normal, other.normal) > -parallel) continue;
-      const gap = dot(face.normal, from(face.corners[0], other.corners[0]));
-      const reach = 0.002 * size(face, other);
-      if (Math.abs(gap) > thinMm + reach) continue;
-      const found = closest(face, other, thinMm);
+      if (other.key < face.key) continue;
+      const found = between(face, other, thinMm);
       if (found) return found;
     }
   }
   return null;
+}
+
+/** Many, of which half may look one way and half the other (a wall in fine triangles): against those near them. */
+function byPlace(faces: readonly Face[], thinMm: number): ThinPlace | null {
+  const ends = (side: (...values: number[]) => number, by: number) =>
+    faces.map(({ corners: [a, b, c] }): Vec3 => [
+      side(a[0], b[0], c[0]) + by,
+      side(a[1], b[1], c[1]) + by,
+      side(a[2], b[2], c[2]) + by,
+    ]);
+  const near = boxNeighbours(ends(Math.min, -thinMm), ends(Math.max, thinMm));
+  let found: ThinPlace | null = null;
+  for (let i = 0; i < faces.length && !found; i += 1) {
+    near.of(i, (other) => {
+      found ??= between(faces[i]!, faces[other]!, thinMm);
+    });
+  }
+  return found;
+}
+
+function between(face: Face, other: Face, thinMm: number): ThinPlace | null {
+  if (dot(face.normal, other.normal) > -parallel) return null;
+  const gap = dot(face.normal, from(face.corners[0], other.corners[0]));
+  const reach = 0.002 * size(face, other);
+  return Math.abs(gap) > thinMm + reach ? null : closest(face, other, thinMm);
 }
 
 function closest(face: Face, other: Face, thinMm: number): ThinPlace | null {
