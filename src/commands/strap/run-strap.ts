@@ -4,6 +4,7 @@ import { DipwrightError, invalid } from '~/domain/errors';
 import { computeTable } from '~/domain/table/compute-table';
 import type { ComputedTable, Readings } from '~/domain/table/request';
 import { parseDesign } from '~/domain/tank/parse-design';
+import { loadMeshes } from './load-meshes';
 
 const usage =
   'Give a design file: npm run --silent strap -- FILE [--step MM | --at MM,MM,…] [--csv]';
@@ -22,7 +23,9 @@ export interface StrapOutcome {
 export async function runStrap(args: readonly string[]): Promise<StrapOutcome> {
   try {
     const { file, readings, csv } = readArguments([...args]);
-    const table = await computeTable(parseDesign(await readDesign(file)), readings);
+    const design = parseDesign(await readDesign(file));
+    await loadMeshes(design, file);
+    const table = await computeTable(design, readings);
     const stdout = csv ? asCsv(table) : `${JSON.stringify(table, null, 2)}\n`;
     return { stdout, stderr: '', exitCode: 0 };
   } catch (error) {

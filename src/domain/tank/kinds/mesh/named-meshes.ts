@@ -1,3 +1,4 @@
+import { invalid, type DipwrightError } from '../../../errors';
 import type { TankDocument } from '../../document';
 
 /** A solid of a design that needs a mesh. */
@@ -17,4 +18,12 @@ export function namedMeshes({ solids }: Pick<TankDocument, 'solids'>): NamedMesh
     named.set(upload, { upload, solidId: id, pointer: `/solids/${index}/upload` });
   });
   return [...named.values()];
+}
+
+/** What is said of a design whose meshes have more triangles together than one may name. */
+export function tooManyTriangles(pointer: string): DipwrightError {
+  return invalid(
+    pointer,
+    'The meshes of this design have more than 2 000 000 triangles together: use coarser ones.',
+  );
 }
