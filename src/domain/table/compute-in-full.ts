@@ -5,14 +5,14 @@ import { placedSolids } from '../tank/placed-solids';
 import { liquidSpace, type LiquidSpace } from './liquid-space';
 import { openings } from './openings';
 import type { ReadingFrame } from './preview';
-import { finestFacets, publishedFacets } from './published-facets';
+import { doubledFacets, publishedFacets } from './published-facets';
 import { readingFrame } from './reading-frame';
 import { readingsOf } from './readings';
 import { refuseUncomputable } from './refuse-uncomputable';
 import type { ComputedTable, Readings, TableRow } from './request';
 import { tableRows } from './table-rows';
 
-/** Part of the capacity that the bound should not pass: beyond it the facets are doubled once more. */
+/** Part of the capacity that the bound should not pass: beyond it the facets are doubled once more, where time allows. */
 const wantedBound = 1e-6;
 
 /** A computed table with the space that it came from. */
@@ -37,8 +37,10 @@ export async function computeInFull(
   let errorL = (roundingOfCapacity * found.space.volumeMm3) / 1e6;
   if (curved) {
     errorL = Math.max(errorL, greatestMissL(found, liquidSpace(solids, facets / 2)));
-    if (errorL > (wantedBound * found.space.volumeMm3) / 1e6 && facets < finestFacets) {
-      const finer = at(2 * facets);
+    const doubled = doubledFacets(solids, facets);
+    // the tank decides: one more doubling takes the bound down by eight
+    if (errorL > (wantedBound * found.space.volumeMm3) / 1e6 && doubled !== null) {
+      const finer = at(doubled);
       errorL = greatestMissL(finer, found.space);
       found = finer;
     }

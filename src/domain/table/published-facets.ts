@@ -1,15 +1,39 @@
-import type { PlacedSolid } from '../tank/placed-solid';
+import { placedShape, type PlacedSolid } from '../tank/placed-solid';
+
+/** Facets to a turn that a table may be published at, finest first. */
+const choices = [512, 256, 128] as const;
 
 /**
- * 2N, the facets to a turn that a table is published at: finer where few solids are round, so that time stays
- * within a second or so. A ball has as many triangles at 256 as sixty cylinders.
+ * What joining and cutting may cost at the facets chosen, in triangles that go in (about 5 µs each, so a third of
+ * a second), and what it may cost when the facets are doubled for the sake of the bound.
  */
-export function publishedFacets(solids: readonly PlacedSolid[]): 512 | 256 | 128 {
-  const once = solids.filter(({ kind, solid }) => kind.curved(solid) === 'once').length;
-  const twice = solids.filter(({ kind, solid }) => kind.curved(solid) === 'twice').length;
-  if (twice === 0 && once <= 4) return 512;
-  return twice <= 2 && once <= 40 ? 256 : 128;
+const usualTriangles = 60_000;
+const mostTriangles = 140_000;
+
+/** One solid alone is never joined or cut: its triangles cost a twentieth of that. */
+const aloneTriangles = 100_000;
+
+/**
+ * 2N, the facets to a turn that a table is published at: the finest that takes a fraction of a second. A pair of
+ * formed ends has as many triangles at 256 as sixty plain cylinders.
+ */
+export function publishedFacets(solids: readonly PlacedSolid[]): number {
+  const most = solids.length === 1 ? aloneTriangles : usualTriangles;
+  return choices.find((facets) => cost(solids, facets) <= most) ?? choices.at(-1)!;
 }
 
-/** No table is published at more facets to a turn. */
-export const finestFacets = 512;
+/** Twice as many where that can be had in a second or so; null where it cannot, or where nothing finer is made. */
+export function doubledFacets(solids: readonly PlacedSolid[], facets: number): number | null {
+  const most = solids.length === 1 ? 3 * aloneTriangles : mostTriangles;
+  return facets < choices[0] && cost(solids, 2 * facets) <= most ? 2 * facets : null;
+}
+
+/** Triangles of all solids; those of a prism count twice, since its long thin ones cross more of the others'. */
+function cost(solids: readonly PlacedSolid[], facets: number): number {
+  return solids.reduce((sum, one) => {
+    const { shape } = placedShape(one, facets);
+    if (shape.form === 'mesh') return sum + shape.mesh.triangles.length / 3;
+    if (shape.form === 'extrusion') return sum + 8 * shape.outline.length;
+    return sum + 2 * shape.profile.length * shape.facets;
+  }, 0);
+}
