@@ -3,6 +3,7 @@ import { lineInRoundedBox } from '../../../../geometry/line-in-rounded-box';
 import { roundedBoxSupport, roundedBoxVolume } from '../../../../geometry/rounded-box';
 import { roundedBoxShape } from '../../../../geometry/rounded-box-shape';
 import type { Kind, Size } from '../kind';
+import { measuredSizes, withSizes } from '../measured-sizes';
 import { sizeWords } from '../size-words';
 import { edgeFaults, roundedOf } from './edges';
 import { boxSchema, type Box } from './schema';
@@ -34,6 +35,23 @@ export const box: Kind<Box> = {
         mayBeZero: true,
       })),
   ],
+  measured(solid) {
+    const { edges = {} } = solid;
+    const lengths = box.sizes(solid).filter(({ path }) => path[0] !== 'edges');
+    // equal radii are one length: nobody measures twelve edges apart
+    const radii = [...new Set(axes.map((axis) => edges[axis] ?? 0))].filter((radius) => radius > 0);
+    return [
+      ...measuredSizes(solid, lengths, 0),
+      ...radii.map((radius) => {
+        const paths = axes.filter((axis) => edges[axis] === radius).map((axis) => ['edges', axis]);
+        return {
+          path: paths[0]!,
+          sizeMm: radius,
+          grown: (byMm: number) => withSizes(solid, paths, radius + byMm),
+        };
+      }),
+    ];
+  },
   words({ length, width, height, edges = {} }) {
     const sizes = sizeWords(length, width, height);
     const round = axes.filter((axis) => (edges[axis] ?? 0) > 0);

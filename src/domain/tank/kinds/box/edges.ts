@@ -10,8 +10,8 @@ const sizeNames = ['length', 'width', 'height'] as const;
 
 /**
  * A box as geometry sees it; null with sharp edges. The largest radius is that of the edges along the axis; the
- * other two make its rims. Where they are not alike or do not fit (a size on trial, never a document that is
- * computed) their mean is taken, or what fits.
+ * other two make its rims. Of radii that do not fit (a draft that is looked at, never one that is computed) what fits
+ * is taken.
  */
 export function roundedOf({ length, width, height, edges = {} }: Box): RoundedBox | null {
   const radii = axes.map((axis) => edges[axis] ?? 0);
@@ -22,7 +22,7 @@ export function roundedOf({ length, width, height, edges = {} }: Box): RoundedBo
   const [first, second, third] = axisOrder(axis);
   const size: Vec3 = [sizes[first]!, sizes[second]!, sizes[third]!];
   const fitting = Math.min(corner, size[0] / 2, size[1] / 2);
-  const rim = Math.min((radii[first]! + radii[second]!) / 2, fitting, size[2] / 2);
+  const rim = Math.min(Math.min(radii[first]!, radii[second]!), fitting, size[2] / 2);
   return { axis, size, corner: fitting, rim };
 }
 

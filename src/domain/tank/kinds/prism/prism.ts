@@ -6,6 +6,7 @@ import { outlinePolygon } from '../../../../geometry/outline-polygon';
 import { outlineSupport } from '../../../../geometry/outline-support';
 import { cornerArcs } from '../../../../geometry/rounded-outline';
 import type { Kind, Size } from '../kind';
+import { measuredSizes } from '../measured-sizes';
 import { sizeWords } from '../size-words';
 import { prismFaults } from './faults';
 import { outlineOf } from './outline';
@@ -43,6 +44,7 @@ export const prism: Kind<Prism> = {
     ),
     { path: ['width'], label: 'width', unit: 'mm' },
   ],
+  measured: (solid) => measuredSizes(solid, prism.sizes(solid), Math.max(...prism.extent(solid))),
   words(solid) {
     const { x, z } = outlineOf(solid);
     return `${solid.profile.length} points, ${sizeWords(x, solid.width, z)}`;

@@ -3,6 +3,7 @@ import { loftVolume } from '../../../../geometry/loft';
 import { flatFacesOf } from '../../../../geometry/loft-faces';
 import { isTwisted, loftMesh } from '../../../../geometry/loft-mesh';
 import type { Kind, Size } from '../kind';
+import { measuredSizes } from '../measured-sizes';
 import { sizeWords } from '../size-words';
 import { stationFaults } from './faults';
 import { loftOf } from './loft';
@@ -33,6 +34,8 @@ export const stations: Kind<Stations> = {
         })),
       ),
     ]),
+  measured: (solid) =>
+    measuredSizes(solid, stations.sizes(solid), Math.max(...stations.extent(solid))),
   words: (solid) =>
     `${solid.stations.length} stations of ${solid.stations[0]!.profile.length} points, ${sizeWords(...loftOf(solid).extent)}`,
   shape(solid, facets) {

@@ -2,6 +2,7 @@ import { lineInHalfSpaces } from '../../../../geometry/line';
 import { dot } from '../../../../geometry/vec3';
 import type { Vec3 } from '../../solid';
 import type { Kind } from '../kind';
+import { measuredSizes } from '../measured-sizes';
 import { sizeWords } from '../size-words';
 import { taperSchema, type Taper } from './schema';
 
@@ -29,6 +30,8 @@ export const taper: Kind<Taper> = {
         ] as const)
       : []),
   ],
+  measured: (solid) =>
+    measuredSizes(solid, taper.sizes(solid), Math.max(...taper.extent(solid))),
   words: ({ bottom, top, height }) =>
     `${sizeWords(...bottom)} to ${sizeWords(...top)}, ${sizeWords(height)} high`,
   shape(solid) {
