@@ -51,7 +51,8 @@ function roundMovedOut(
   });
 }
 
-function movedOut({ mesh, flat = [] }: Extract<Shape, { form: 'mesh' }>, mm: number): Mesh {
+/** A mesh with its corners moved out along the mean direction of their faces, in where `mm` is negative. */
+export function movedOut({ mesh, flat = [] }: Extract<Shape, { form: 'mesh' }>, mm: number): Mesh {
   const { positions, triangles } = mesh;
   const at = (vertex: number): Vec3 => [
     positions[3 * vertex]!,

@@ -5,7 +5,8 @@ import { readingFrame } from '../table/reading-frame';
 import { refuseUncomputable } from '../table/refuse-uncomputable';
 import { stickNotices } from '../table/stick-notices';
 import type { TankDocument } from '../tank/document';
-import { placedSolid, type PlacedSolid } from '../tank/placed-solid';
+import type { PlacedSolid } from '../tank/placed-solid';
+import { placedSolids } from '../tank/placed-solids';
 import { sketchOf, type Sketch } from './sketch';
 
 /**
@@ -16,7 +17,7 @@ import { sketchOf, type Sketch } from './sketch';
 export async function sketchDesign(document: TankDocument): Promise<Sketch> {
   refuseUncomputable(document);
   await loadManifold();
-  const solids = document.solids.map(placedSolid);
+  const solids = placedSolids(document);
   const space = liquidSpace(solids, facetsFor(solids));
   const { mesh, origin } = space;
   const frame = readingFrame(document, solids, space);

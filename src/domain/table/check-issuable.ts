@@ -3,7 +3,9 @@ import { swollen } from '../../geometry/swollen';
 import { thinPlace } from '../../geometry/thin-places';
 import { thinMm } from '../../geometry/tolerance';
 import type { TankDocument } from '../tank/document';
-import { placedShape, placedSolid, type PlacedSolid } from '../tank/placed-solid';
+import { placedShape, type PlacedSolid } from '../tank/placed-solid';
+import { placedSolids } from '../tank/placed-solids';
+import { DipwrightError } from '../errors';
 import { facetStandOffMm } from './facet-stand-off';
 import { liquidSpace, type LiquidSpace } from './liquid-space';
 import { piecesOf } from './pieces';
@@ -14,12 +16,13 @@ import { refuseUncomputable } from './refuse-uncomputable';
  * Why a design may not be issued, one sentence a reason; none when it may. Throws `invalid` when it cannot be
  * computed at all. Refused are a liquid space in pieces; one that is thinner than 0.01 mm, or is parted by
  * less than that, between two faces that stand parallel within 0.001 rad; and round solids that only touch:
- * whose count of pieces changes when every radius grows or shrinks by 0.01 mm and what facets stand off.
+ * whose count of pieces changes when every radius grows or shrinks by 0.01 mm and what facets stand off; with
+ * outside sizes, when the wall does.
  */
 export async function checkIssuable(document: TankDocument): Promise<string[]> {
   refuseUncomputable(document);
   await loadManifold();
-  const solids = document.solids.map(placedSolid);
+  const solids = placedSolids(document);
   const space = liquidSpace(solids, publishedFacets(solids));
   const round = solids.some(({ kind, solid }) => kind.curved(solid));
   const reasons: string[] = [];
@@ -40,7 +43,11 @@ export async function checkIssuable(document: TankDocument): Promise<string[]> {
         : `What parts the liquid space is thinner than ${thinMm} mm ${where}: let the solids overlap or part them.`,
     );
   }
-  if (round && [1, -1].some((sign) => piecesWhenSwollen(solids, space, sign) !== pieces)) {
+  const swollenPieces = (sign: number) =>
+    document.wall?.sizes === 'outside'
+      ? piecesWithOtherWall(document, solids, space, sign)
+      : piecesWhenSwollen(solids, space, sign);
+  if (round && [1, -1].some((sign) => swollenPieces(sign) !== pieces)) {
     reasons.push(
       'A round solid only touches another along a line: let them overlap or stand clear of each other.',
     );
@@ -64,4 +71,24 @@ function piecesWhenSwollen(
       });
   const mesh = spaceOf(shapes('holds', sign), shapes('displaces', -sign), space.origin);
   return piecesOf(mesh);
+}
+
+/** With outside sizes: the wall thinner for 1, thicker for −1; at 128 facets, which tells pieces well enough. */
+function piecesWithOtherWall(
+  document: TankDocument,
+  solids: readonly PlacedSolid[],
+  space: LiquidSpace,
+  sign: number,
+): number {
+  const facets = Math.min(space.facets, 128);
+  const byMm = thinMm + Math.max(...solids.map((one) => facetStandOffMm(one, facets)));
+  const drawn = document.wall!.thickness;
+  const thickness = Math.max(drawn - sign * byMm, drawn / 2);
+  try {
+    const other = placedSolids({ ...document, wall: { thickness, sizes: 'outside' } });
+    return piecesOf(liquidSpace(other, facets).mesh);
+  } catch (error) {
+    if (error instanceof DipwrightError) return 0;
+    throw error;
+  }
 }

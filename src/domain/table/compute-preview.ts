@@ -2,7 +2,8 @@ import { loadManifold, meshOf } from '../../geometry/manifold';
 import { shifted } from '../../geometry/mesh';
 import { roundingOfCapacity } from '../../geometry/tolerance';
 import type { TankDocument } from '../tank/document';
-import { placedShape, placedSolid } from '../tank/placed-solid';
+import { placedShape } from '../tank/placed-solid';
+import { placedSolids } from '../tank/placed-solids';
 import { extremes } from './extremes';
 import { levelRows } from './level-rows';
 import { liquidSpace } from './liquid-space';
@@ -33,7 +34,7 @@ const axes = [
 export async function computePreview(document: TankDocument): Promise<Preview> {
   refuseUncomputable(document);
   await loadManifold();
-  const solids = document.solids.map(placedSolid);
+  const solids = placedSolids(document);
   const space = liquidSpace(solids, previewFacets);
   const frame = readingFrame(document, solids, space);
   const depths = Array.from(

@@ -3,9 +3,10 @@ import { enclosedVolume, type Mesh } from '../../geometry/mesh';
 import { dustOfCapacity } from '../../geometry/tolerance';
 import type { Vec3 } from '../../geometry/vec3';
 import { invalid } from '../errors';
+import { nothingInsideWall } from '../tank/placed-solids';
 import { highestLevel, placedShape, type PlacedSolid } from '../tank/placed-solid';
 
-/** Union of all that holds minus all that displaces, as a mesh. */
+/** Union of all that holds minus all that displaces, as a mesh; with outside sizes the wall is off (placedSolids). */
 export interface LiquidSpace {
   /** In the tank's frame moved by −origin, so that a tank far from its origin loses no digits. mm */
   mesh: Mesh;
@@ -28,6 +29,7 @@ export function liquidSpace(solids: readonly PlacedSolid[], facets: number): Liq
   const volumeMm3 = enclosedVolume(mesh);
   const held = holds.reduce((sum, { kind, solid }) => sum + kind.volume(solid), 0);
   if (!(volumeMm3 > dustOfCapacity * held)) {
+    if (displaces.length === 0 && holds.some(({ drawn }) => drawn)) throw nothingInsideWall();
     throw invalid(
       '/solids',
       'The liquid space is empty: what displaces takes away all that holds.',
@@ -38,8 +40,9 @@ export function liquidSpace(solids: readonly PlacedSolid[], facets: number): Liq
 
 function middleOf(holds: readonly PlacedSolid[]): Vec3 {
   const middle = ([x, y, z]: Vec3) => {
-    const high = Math.max(...holds.map((one) => highestLevel(one, [x, y, z])));
-    const low = -Math.max(...holds.map((one) => highestLevel(one, [-x, -y, -z])));
+    const drawn = holds.map((one) => one.drawn ?? one);
+    const high = Math.max(...drawn.map((one) => highestLevel(one, [x, y, z])));
+    const low = -Math.max(...drawn.map((one) => highestLevel(one, [-x, -y, -z])));
     return Math.round((low + high) / 2);
   };
   return [middle([1, 0, 0]), middle([0, 1, 0]), middle([0, 0, 1])];

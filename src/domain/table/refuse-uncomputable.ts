@@ -6,7 +6,7 @@ import { valueAt } from '../tank/value-at';
 
 /**
  * Throws `invalid` for what the document format allows but nobody can compute: sizes that are nothing,
- * options of a kind that contradict each other, outside sizes (not computed yet). Every fault is listed.
+ * options of a kind that contradict each other, a wall of nothing under outside sizes. Every fault is listed.
  */
 export function refuseUncomputable(document: TankDocument): void {
   const faults: FieldFault[] = document.solids.flatMap((solid, index) =>
@@ -16,10 +16,12 @@ export function refuseUncomputable(document: TankDocument): void {
     })),
   );
   if (document.wall?.sizes === 'outside') {
-    faults.push({
-      pointer: '/wall/sizes',
-      detail: 'Wall, sizes: outside sizes are not computed yet: give inside sizes.',
-    });
+    if (document.wall.thickness < thinMm) {
+      faults.push({
+        pointer: '/wall/thickness',
+        detail: `Wall, thickness: with outside sizes a wall is at least ${thinMm} mm thick.`,
+      });
+    }
   }
   if (faults.length > 0) throw new DipwrightError('invalid', faults[0]!.detail, { faults });
 }

@@ -12,6 +12,8 @@ export interface PlacedSolid {
   solid: Solid;
   kind: Kind<Solid>;
   place: Placing;
+  /** The solid as drawn, where this is what is left of it inside the wall. */
+  drawn?: PlacedSolid;
 }
 
 export function placedSolid(solid: Solid): PlacedSolid {

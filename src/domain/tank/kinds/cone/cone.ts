@@ -58,6 +58,31 @@ export const cone: Kind<Cone> = {
   },
   volume: ({ start, end, length }) =>
     (Math.PI * length * (start * start + start * end + end * end)) / 12,
+  eroded(solid, wallMm) {
+    const { start, end, length } = solid;
+    const slope = (end - start) / 2 / length;
+    // measured across the axis, the wall of a slanted side is thicker by 1/cos
+    const across = wallMm * Math.hypot(1, slope);
+    const radiusAt = (place: number) => (start + end) / 4 + slope * place - across;
+    const tip = slope === 0 ? 0 : (across - (start + end) / 4) / slope;
+    let low = wallMm - length / 2;
+    let high = length / 2 - wallMm;
+    if (radiusAt(low) < 0 && slope > 0) low = tip;
+    if (radiusAt(high) < 0 && slope < 0) high = tip;
+    if (!(high > low) || !(radiusAt((low + high) / 2) > 0)) return null;
+    const diameterAt = (place: number) => Math.max(0, 2 * radiusAt(place));
+    const shift: [number, number, number] = [0, 0, 0];
+    shift[axisOrder(axisOf(solid))[2]] = (low + high) / 2;
+    return {
+      solid: {
+        ...solid,
+        start: low === tip && slope > 0 ? 0 : diameterAt(low),
+        end: high === tip && slope < 0 ? 0 : diameterAt(high),
+        length: high - low,
+      },
+      shift,
+    };
+  },
   faults: ({ start, end }) =>
     start === 0 && end === 0
       ? [{ path: ['end'], detail: 'at least one of the two diameters is more than 0 mm.' }]

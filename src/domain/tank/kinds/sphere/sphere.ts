@@ -16,6 +16,10 @@ export const sphere: Kind<Sphere> = {
   support: ({ diameter }, up) => ball.support([diameter, diameter, diameter], up),
   chords: ({ diameter }, line, slack) => ball.chords([diameter, diameter, diameter], line, slack),
   volume: ({ diameter }) => ball.volume([diameter, diameter, diameter]),
+  eroded(solid, wallMm) {
+    const diameter = solid.diameter - 2 * wallMm;
+    return diameter > 0 ? { solid: { ...solid, diameter }, shift: [0, 0, 0] } : null;
+  },
   faults: () => [],
   blank: (id) => ({ id, role: 'holds', kind: 'sphere', diameter: 500 }),
 };

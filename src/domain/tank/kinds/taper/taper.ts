@@ -30,8 +30,7 @@ export const taper: Kind<Taper> = {
         ] as const)
       : []),
   ],
-  measured: (solid) =>
-    measuredSizes(solid, taper.sizes(solid), Math.max(...taper.extent(solid))),
+  measured: (solid) => measuredSizes(solid, taper.sizes(solid), Math.max(...taper.extent(solid))),
   words: ({ bottom, top, height }) =>
     `${sizeWords(...bottom)} to ${sizeWords(...top)}, ${sizeWords(height)} high`,
   shape(solid) {
@@ -66,6 +65,39 @@ export const taper: Kind<Taper> = {
   volume({ bottom: [bx, by], top: [tx, ty], height }) {
     const middle = ((bx + tx) / 2) * ((by + ty) / 2);
     return (height / 6) * (bx * by + 4 * middle + tx * ty);
+  },
+  // every face moves in by the wall, measured square to it; what would close to an edge or a tip is no taper
+  eroded(solid, wallMm) {
+    const height = solid.height - 2 * wallMm;
+    if (!(height > 0)) return null;
+    const spans = ([0, 1] as const).map((axis) => {
+      const { bottom, top } = spanOf(solid, axis);
+      const side = (end: 0 | 1) => {
+        const run = top[end] - bottom[end];
+        const across = (end === 0 ? 1 : -1) * wallMm * Math.hypot(1, run / solid.height);
+        const at = (share: number) => bottom[end] + share * run + across;
+        return [at(wallMm / solid.height), at(1 - wallMm / solid.height)] as const;
+      };
+      const [[bottomFrom, topFrom], [bottomTo, topTo]] = [side(0), side(1)];
+      return {
+        bottom: bottomTo - bottomFrom,
+        top: topTo - topFrom,
+        shift: (topFrom + topTo - bottomFrom - bottomTo) / 2,
+        middle: (Math.min(bottomFrom, topFrom) + Math.max(bottomTo, topTo)) / 2,
+      };
+    });
+    const [x, y] = [spans[0]!, spans[1]!];
+    if (!(Math.min(x.bottom, x.top, y.bottom, y.top) > 0)) return undefined;
+    return {
+      solid: {
+        ...solid,
+        bottom: [x.bottom, y.bottom],
+        top: [x.top, y.top],
+        height,
+        shift: [x.shift, y.shift],
+      },
+      shift: [x.middle, y.middle, 0],
+    };
   },
   faults: () => [],
   blank: (id) => ({

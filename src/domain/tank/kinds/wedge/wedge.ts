@@ -54,6 +54,20 @@ export const wedge: Kind<Wedge> = {
     return chord ? [chord] : [];
   },
   volume: ({ length, width, height }) => (length * width * height) / 2,
+  // the triangle stays similar and shrinks about the middle of the circle that touches its three sides
+  eroded(solid, wallMm) {
+    const touching = (solid.length + solid.height - Math.hypot(solid.length, solid.height)) / 2;
+    const left = 1 - wallMm / touching;
+    const width = solid.width - 2 * wallMm;
+    if (!(left > 0 && width > 0)) return null;
+    const length = left * solid.length;
+    const height = left * solid.height;
+    const moved = (before: number, after: number) => wallMm - (before - after) / 2;
+    return {
+      solid: { ...solid, length, width, height },
+      shift: [moved(solid.length, length), 0, moved(solid.height, height)],
+    };
+  },
   faults: () => [],
   blank: (id) => ({ id, role: 'displaces', kind: 'wedge', length: 600, width: 400, height: 60 }),
 };
