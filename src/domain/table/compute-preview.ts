@@ -2,7 +2,7 @@ import { loadManifold, meshOf } from '../../geometry/manifold';
 import { shifted } from '../../geometry/mesh';
 import { roundingOfCapacity } from '../../geometry/tolerance';
 import type { TankDocument } from '../tank/document';
-import { placedShape } from '../tank/placed-solid';
+import { placedShape, placedSolid } from '../tank/placed-solid';
 import { placedSolids } from '../tank/placed-solids';
 import { extremes } from './extremes';
 import { levelRows } from './level-rows';
@@ -14,6 +14,7 @@ import type { Preview } from './preview';
 import { readingFrame } from './reading-frame';
 import { refuseUncomputable } from './refuse-uncomputable';
 import { stickNotices } from './stick-notices';
+import { wallNotices } from './wall-notices';
 import { tableRows } from './table-rows';
 
 /** Chords to a full turn in the live view; the bound compares with half as many. */
@@ -28,7 +29,8 @@ const axes = [
 ] as const;
 
 /**
- * All that the bench shows of a design, at 64 facets a turn (1e-6 to 5e-5 of capacity). A few solids take
+ * All that the bench shows of a design, at 64 facets a turn (1e-6 to 5e-5 of capacity). Solids are shown as drawn,
+ * the space less the wall where sizes are outside ones. A few solids take
  * some milliseconds once the WebAssembly is warm. Throws `invalid` like computeTable.
  */
 export async function computePreview(document: TankDocument): Promise<Preview> {
@@ -57,7 +59,7 @@ export async function computePreview(document: TankDocument): Promise<Preview> {
   const { undrainableL, trappedL, standing } = openings(document, solids, space, frame.up);
   return {
     space: shifted(space.mesh, space.origin),
-    solids: solids.map((one) => ({
+    solids: document.solids.map(placedSolid).map((one) => ({
       id: one.solid.id,
       role: one.solid.role,
       ...shifted(meshOf(placedShape(one, previewFacets), space.origin), space.origin),
@@ -72,6 +74,6 @@ export async function computePreview(document: TankDocument): Promise<Preview> {
     stickNotices: stickNotices(solids, space, frame),
     pieces,
     rows,
-    notices: notice === null ? [] : [notice],
+    notices: [...(notice === null ? [] : [notice]), ...wallNotices(document, solids)],
   };
 }

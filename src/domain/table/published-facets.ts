@@ -31,7 +31,8 @@ export function doubledFacets(solids: readonly PlacedSolid[], facets: number): n
 /** Triangles of all solids; those of a prism count twice, since its long thin ones cross more of the others'. */
 function cost(solids: readonly PlacedSolid[], facets: number): number {
   return solids.reduce((sum, one) => {
-    const { shape } = placedShape(one, facets);
+    // less its wall a solid has about as many as drawn, and what its joints add is not made to be counted
+    const { shape } = placedShape(one.drawn ?? one, facets);
     if (shape.form === 'mesh') return sum + shape.mesh.triangles.length / 3;
     if (shape.form === 'extrusion') return sum + 8 * shape.outline.length;
     return sum + 2 * shape.profile.length * shape.facets;

@@ -2,7 +2,7 @@ import { loadManifold } from '../../geometry/manifold';
 import { DipwrightError } from '../errors';
 import type { TankDocument } from '../tank/document';
 import type { PlacedSolid } from '../tank/placed-solid';
-import { placedSolids } from '../tank/placed-solids';
+import { insideWall, placedSolids } from '../tank/placed-solids';
 import type { TankSettings } from '../tank/settings';
 import { sizeKey } from '../tank/size-key';
 import { curveFromRows, segmentOf } from './curve';
@@ -18,6 +18,9 @@ export type TableWithoutPlusMinus = Pick<ComputedTable, 'rows' | 'heightMm' | 'e
 /** Facets and readings that sensitivities are taken at: they need two digits, not nine. */
 const facets = 48;
 const samples = 100;
+
+/** The wall under outside sizes is plate, not taped: without a ± of its own it has this part of itself at most. */
+const shareOfWall = 0.1;
 
 /** How sizes and dips were measured: what the ± of a table comes from. */
 export type Measured = Pick<
@@ -70,26 +73,34 @@ function sizesSquared(
   nominal: readonly number[],
 ): number[] {
   const sum = nominal.map(() => 0);
-  const plusMinusOf = (id: string, path: readonly string[]) =>
-    ownSizePlusMinusMm[sizeKey(id, path)] ?? sizePlusMinusMm;
+  const wallMm = document.wall?.thickness ?? 0;
+  const plusMinusOf = (id: string, path: readonly string[]) => {
+    const ofWall = id === 'wall' && path[0] === 'thickness';
+    const usual = ofWall ? Math.min(sizePlusMinusMm, shareOfWall * wallMm) : sizePlusMinusMm;
+    return ownSizePlusMinusMm[sizeKey(id, path)] ?? usual;
+  };
   const larger = sizeVariants(document, plusMinusOf);
   const smaller = sizeVariants(document, (id, path) => -plusMinusOf(id, path));
-  larger.forEach(({ sizeMm, byMm, variants }, index) => {
+  larger.forEach(({ sizeMm, byMm, variants, wallMm: wall }, index) => {
     const changes = variants.map(
       (variant, end) =>
-        changed(variant) ??
+        changed(variant, wall) ??
         // a size made larger may contradict another, or leave nothing under the stick: then it is made smaller
-        (sizeMm > byMm ? changed(smaller[index]!.variants[end]!) : null) ??
+        (sizeMm > byMm ? changed(smaller[index]!.variants[end]!, smaller[index]!.wallMm) : null) ??
         nominal.map((litres) => (litres * byMm) / sizeMm),
     );
     sum.forEach((_, i) => (sum[i]! += Math.max(...changes.map((change) => change[i]! ** 2))));
   });
   return sum;
 
-  function changed(variant: readonly PlacedSolid[]): number[] | null {
+  function changed(variant: readonly PlacedSolid[], wall: number | null): number[] | null {
     if (variant.some(({ kind, solid }) => kind.faults(solid).length > 0)) return null;
     try {
-      const { litres } = litresAt(document, variant, depths);
+      const { litres } = litresAt(
+        document,
+        wall === null ? variant : insideWall(variant, wall),
+        depths,
+      );
       return litres.map((value, i) => value - nominal[i]!);
     } catch (error) {
       if (error instanceof DipwrightError) return null;

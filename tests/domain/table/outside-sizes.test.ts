@@ -4,6 +4,7 @@ import { checkIssuable } from '~/domain/table/check-issuable';
 import { computePreview } from '~/domain/table/compute-preview';
 import { computeTable } from '~/domain/table/compute-table';
 import { liquidSpace } from '~/domain/table/liquid-space';
+import { plusMinusOfTable } from '~/domain/table/uncertainty';
 import type { TankDocument } from '~/domain/tank/document';
 import type { Solid } from '~/domain/tank/kinds/registry';
 import { placedSolids } from '~/domain/tank/placed-solids';
@@ -253,6 +254,46 @@ describe('solids that join', () => {
     expect(Math.abs(mm3 / whole - share)).toBeLessThan(3 * sigma + 0.003);
     expect(await checkIssuable(tank)).toEqual([]);
   }, 60_000);
+});
+
+describe('the ± of outside sizes', () => {
+  it('counts the wall among the sizes: its own, or a tenth of itself', async () => {
+    const tank = design([box('a', [912, 512, 312])], outside(6));
+    const table = await computeTable(tank, { stepMm: 300 });
+    const brim = async (own: Record<string, number>) =>
+      (
+        await plusMinusOfTable(
+          tank,
+          { sizePlusMinusMm: 2, dipPlusMinusMm: 0, ownSizePlusMinusMm: own },
+          table,
+        )
+      ).brimL;
+    const exact = { 'a/length': 0, 'a/width': 0, 'a/height': 0 };
+    const litres = (t: number) => ((912 - 2 * t) * (512 - 2 * t) * (312 - 2 * t)) / 1e6;
+    expect(await brim({ ...exact, 'wall/thickness': 0.25 })).toBeCloseTo(135 - litres(6.25), 6);
+    expect(await brim(exact)).toBeCloseTo(135 - litres(6.6), 6);
+    // sizes 2 mm larger each, inside: 500 · 300 · 2, 900 · 300 · 2, 900 · 500 · 2 mm³
+    expect(await brim({ 'wall/thickness': 0 })).toBeCloseTo(Math.hypot(0.3, 0.54, 0.9), 6);
+  });
+});
+
+describe('the bench', () => {
+  it('draws solids as drawn and says what the wall does to them', async () => {
+    const tank = design(
+      [
+        box('body', [300, 400, 200]),
+        cylinder('pipe', 10, 100, { axis: 'z', at: [100, 100, 150] } as Partial<Solid>),
+      ],
+      outside(6),
+    );
+    const { solids, notices } = await computePreview(tank);
+    expect(solids.map(({ id }) => id)).toEqual(['body', 'pipe']);
+    expect(Math.max(...solids[0]!.positions)).toBe(400);
+    expect(notices).toEqual([
+      'Solid "pipe" is all wall: by itself it has no space inside.',
+      'Wall taken off with a coarse ball where solids join: issued litres are finer.',
+    ]);
+  });
 });
 
 describe('whatever the wall', () => {
