@@ -2,9 +2,13 @@ import { dishSphere, headDepth, knuckleAngle, type Head } from './head';
 import { headVolume } from './head-volume';
 import type { Vec2 } from './shape';
 
-/** An arc of a meridian: centre (off the axis, place), radius, the angles off the axis it runs between. mm, radians */
+/**
+ * An arc of a meridian: its centre off the axis, the place of its highest point (told from there, not from the centre,
+ * a nearly flat one loses no digits), radius, the angles off the axis it runs between. mm, radians
+ */
 interface Arc {
-  centre: Vec2;
+  off: number;
+  top: number;
   radius: number;
   from: number;
   to: number;
@@ -53,17 +57,17 @@ export function headProfile(head: Head, facets: number): Vec2[] {
 
 function arcsOf(head: Exclude<Head, { form: 'flat' | 'cone' }>): Arc[] {
   const { radius } = head;
-  if (head.form === 'ellipsoid') return [{ centre: [0, 0], radius, from: 0, to: Math.PI / 2 }];
+  if (head.form === 'ellipsoid') return [{ off: 0, top: radius, radius, from: 0, to: Math.PI / 2 }];
   if (head.form === 'dish') {
     const sphere = dishSphere(head);
     const to = Math.atan2(radius, sphere - head.depth);
-    return [{ centre: [0, head.depth - sphere], radius: sphere, from: 0, to }];
+    return [{ off: 0, top: head.depth, radius: sphere, from: 0, to }];
   }
   const { crown, knuckle } = head;
   const joint = knuckleAngle(head);
   const both: Arc[] = [
-    { centre: [0, headDepth(head) - crown], radius: crown, from: 0, to: joint },
-    { centre: [radius - knuckle, 0], radius: knuckle, from: joint, to: Math.PI / 2 },
+    { off: 0, top: headDepth(head), radius: crown, from: 0, to: joint },
+    { off: radius - knuckle, top: knuckle, radius: knuckle, from: joint, to: Math.PI / 2 },
   ];
   // a crown of the barrel's own radius leaves no room for a knuckle
   return both.filter((arc) => arc.radius * (arc.to - arc.from) > shortestArcMm);
@@ -77,7 +81,8 @@ const shortestArcMm = 1e-5;
  * turn go as (ρ / barrel's radius)^⅔. Counted for 16 facets, so that counts double exactly when facets do.
  */
 function chordCounts(arcs: readonly Arc[], head: Head, facets: number): number[] {
-  const stretch = head.form === 'ellipsoid' ? Math.cbrt(head.depth / head.radius) : 1;
+  // a needle would ask for millions
+  const stretch = head.form === 'ellipsoid' ? Math.min(Math.cbrt(head.depth / head.radius), 2) : 1;
   return arcs.map(({ radius, from, to }) => {
     const turn = (to - from) / (2 * Math.PI);
     const ofSixteen = Math.ceil(16 * turn * Math.cbrt(radius / head.radius) ** 2 * stretch - 1e-9);
@@ -109,7 +114,7 @@ function feetOf(arcs: readonly Arc[], counts: readonly number[]): Foot[] {
       begins[i + 1] = Math.sqrt((1 + shared / offsets[i + 1]!) / 2);
     }
   }
-  return arcs.flatMap(({ centre, radius, from, to }, i) => {
+  return arcs.flatMap(({ off, top, radius, from, to }, i) => {
     const step = (to - from) / (counts[i]! - 2 + begins[i]! + ends[i]!);
     const count = i === last ? counts[i]! - 1 : counts[i]!;
     return Array.from({ length: count }, (_, j): Foot => {
@@ -117,7 +122,8 @@ function feetOf(arcs: readonly Arc[], counts: readonly number[]): Foot[] {
       const angle = atJoint ? to : from + (begins[i]! + j) * step;
       const out: Vec2 = [Math.sin(angle), Math.cos(angle)];
       const offset = atJoint ? Math.min(offsets[i]!, offsets[i + 1]!) : offsets[i]!;
-      return { on: [centre[0] + radius * out[0], centre[1] + radius * out[1]], out, offset };
+      const on: Vec2 = [off + radius * out[0], top - 2 * radius * Math.sin(angle / 2) ** 2];
+      return { on, out, offset };
     });
   });
 }
