@@ -2,6 +2,7 @@ import { useId, useState, type Dispatch } from 'react';
 import type { FieldFault } from '~/domain/errors';
 import type { TankDocument } from '~/domain/tank/document';
 import { valueAt } from '~/domain/tank/value-at';
+import type { Size } from '~/domain/tank/kinds/kind';
 import { kindOf, type Solid } from '~/domain/tank/kinds/registry';
 import { formatLength } from '~/domain/units/format-length';
 import type { LengthUnit } from '~/domain/units/length-unit';
@@ -58,7 +59,7 @@ export function SolidFields({ solid, document, dispatch, unit, faults }: SolidFi
             key={size.path.join('.')}
             label={size.label}
             value={Number(valueAt(solid, size.path))}
-            parse={size.mayBeZero ? parseHeight(unit) : parseSize(unit)}
+            parse={parserOf(size, unit)}
             format={format}
             step={step}
             fault={faultAt(`/${size.path.join('/')}`)}
@@ -115,6 +116,12 @@ export function SolidFields({ solid, document, dispatch, unit, faults }: SolidFi
       ))}
     </div>
   );
+}
+
+/** What may be typed for a size: a length, one that may be 0, or a place of either sign. */
+function parserOf({ coordinate, mayBeZero }: Size, unit: LengthUnit) {
+  if (coordinate) return parsePlace(unit);
+  return mayBeZero ? parseHeight(unit) : parseSize(unit);
 }
 
 function NameField(props: Pick<SolidFieldsProps, 'solid' | 'document' | 'dispatch'>) {

@@ -1,4 +1,4 @@
-import { cleanup, render, screen, within } from '@testing-library/react';
+import { cleanup, fireEvent, render, screen, within } from '@testing-library/react';
 import { afterEach, expect, it } from 'vitest';
 import type { TankDocument } from '~/domain/tank/document';
 import { kinds, solidSchema, type Solid } from '~/domain/tank/kinds/registry';
@@ -55,4 +55,32 @@ it('offers the sizes of each end of a cylinder, with their values', () => {
   const fields = sizes.getAllByRole<HTMLInputElement>('textbox').map(({ value }) => value);
   expect(fields).toEqual(['500', '1\u202f000', '80', '510', '50']);
   expect(sizes.getByLabelText<HTMLInputElement>('high end crown').value).toBe('510');
+});
+
+it('takes a place of an outline below 0, and a new value where it stands in the lists', () => {
+  const hull = kinds.find(({ kind }) => kind === 'stations')!.blank('part');
+  const typed: TankDocument[] = [];
+  const document: TankDocument = {
+    format: 'dipwright-tank',
+    version: 1,
+    name: 'Tank',
+    solids: [hull],
+  };
+  render(
+    <SolidFields
+      solid={hull}
+      document={document}
+      dispatch={(action) => action.type === 'edit' && typed.push(action.edit(document))}
+      unit="mm"
+      faults={[]}
+    />,
+  );
+  const field = screen.getByLabelText('station 2, 4 y');
+  fireEvent.change(field, { target: { value: '-333' } });
+  fireEvent.keyDown(field, { key: 'Enter' });
+  fireEvent.blur(field);
+  const after = typed.at(-1)!.solids[0]!;
+  if (after.kind !== 'stations') throw new Error('another kind');
+  expect(after.stations[1]!.profile[3]).toEqual([-333, 410]);
+  expect(solidSchema.safeParse(after).success).toBe(true);
 });
