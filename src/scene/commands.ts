@@ -123,6 +123,12 @@ export function setStick(document: TankDocument, stick: TankDocument['stick']): 
   return stick === undefined ? rest : { ...rest, stick };
 }
 
+/** Whether sizes are inside or outside ones, with the wall; undefined: not told. */
+export function setWall(document: TankDocument, wall: TankDocument['wall']): TankDocument {
+  const { wall: _old, ...rest } = document;
+  return wall === undefined ? rest : { ...rest, wall };
+}
+
 /** A name like the wanted one that no solid has yet: "ramp", "ramp 2", "ramp 3" … */
 export function freeId(document: TankDocument, wanted: string): string {
   const taken = new Set(document.solids.map((solid) => solid.id));

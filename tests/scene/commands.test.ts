@@ -13,6 +13,7 @@ import {
   setRole,
   setSize,
   setStick,
+  setWall,
   setTurn,
 } from '~/scene/commands';
 import { newScene, sceneReducer } from '~/scene/scene';
@@ -96,6 +97,14 @@ describe('commands on a design', () => {
     });
     expect('attitude' in setAttitude(sloped, { pitch: 0, roll: 0 })).toBe(false);
     expect('stick' in setStick(sloped, undefined)).toBe(false);
+  });
+
+  it('keeps what sizes are, with the wall, and forgets it whole', () => {
+    const outside = setWall(sloped, { thickness: 6, sizes: 'outside' });
+    expect(outside.wall).toEqual({ thickness: 6, sizes: 'outside' });
+    expect(outside.solids).toBe(sloped.solids);
+    expect(setWall(outside, { sizes: 'inside' }).wall).toEqual({ sizes: 'inside' });
+    expect('wall' in setWall(outside, undefined)).toBe(false);
   });
 
   it('switches what a solid does and removes it', () => {

@@ -82,7 +82,7 @@ function piecesWithOtherWall(
 ): number {
   const facets = Math.min(space.facets, 128);
   const byMm = thinMm + Math.max(...solids.map((one) => facetStandOffMm(one, facets)));
-  const drawn = document.wall!.thickness;
+  const drawn = document.wall?.thickness ?? 0;
   const thickness = Math.max(drawn - sign * byMm, drawn / 2);
   try {
     const other = placedSolids({ ...document, wall: { thickness, sizes: 'outside' } });

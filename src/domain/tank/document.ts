@@ -6,22 +6,33 @@ import { coordinate, greatestLengthMm, length, point } from './solid';
  * The tank design document, version 1: the one description of a tank's shape. Lengths mm,
  * angles degrees; frame as in solid.ts. Unknown keys are an error.
  */
-const tilt = z.number('Give a slope in degrees.').min(-60, 'A slope lies within ± 60°.').max(60, 'A slope lies within ± 60°.');
+const tilt = z
+  .number('Give a slope in degrees.')
+  .min(-60, 'A slope lies within ± 60°.')
+  .max(60, 'A slope lies within ± 60°.');
 
 export const tankDocument = z
   .strictObject({
     format: z.literal('dipwright-tank', 'The format is "dipwright-tank".'),
     version: z.literal(1, 'The version is 1.'),
-    name: z.string('Give the tank a name.').min(1, 'Give the tank a name.').max(120, 'A name has at most 120 characters.'),
+    name: z
+      .string('Give the tank a name.')
+      .min(1, 'Give the tank a name.')
+      .max(120, 'A name has at most 120 characters.'),
     solids: z
       .array(solidSchema, 'Give a list of solids.')
       .min(1, 'A tank needs at least one solid.')
       .max(200, 'A tank has at most 200 solids.'),
     wall: z
-      .strictObject({
-        thickness: length,
-        sizes: z.enum(['inside', 'outside'], 'Sizes are "inside" or "outside".'),
-      })
+      .discriminatedUnion(
+        'sizes',
+        [
+          z.strictObject({ sizes: z.literal('inside'), thickness: length.optional() }),
+          /** The thickness comes off every outer face of what holds. */
+          z.strictObject({ sizes: z.literal('outside'), thickness: length }),
+        ],
+        'Sizes are "inside" or "outside".',
+      )
       .optional(),
     attitude: z
       .strictObject({

@@ -15,6 +15,7 @@ import type { LiveTable } from './live-table';
 import { NoGas } from '../shared/NoGas';
 import { parseBetween, parseHeight, parsePlace, parseSize } from './parse-typed';
 import { TypedNumber } from './TypedNumber';
+import { WallFields } from './WallFields';
 
 interface TitleBlockProps {
   document: TankDocument;
@@ -63,6 +64,12 @@ export function TitleBlock(props: TitleBlockProps) {
         )}
       </Cell>
       <Cell>
+        <WallFields
+          document={document}
+          dispatch={dispatch}
+          length={length}
+          fault={shapeFault('/wall')}
+        />
         <MeasuredField
           settings={settings}
           onSettings={onSettings}
@@ -233,7 +240,7 @@ function MeasuredField(
     <div className="flex flex-wrap gap-x-4">
       <div className="min-w-32 flex-1">
         <label htmlFor={id} className="label">
-          Inside sizes, measured by
+          Sizes measured by
         </label>
         <select
           id={id}
