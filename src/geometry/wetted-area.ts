@@ -2,8 +2,9 @@ import { columns } from './columns';
 import { levels as vertexLevels, type Mesh } from './mesh';
 import type { Vec3 } from './vec3';
 
-/** Spans of more rows than this are carried as polynomials from row to row instead of row by row. */
+/** Spans of more rows than this, and of no small part of the whole height, are carried from row to row, as in the sweep. */
 const carriedFrom = 12;
+const carriedPart = 1e-2;
 
 /**
  * Area of the mesh's own surface that stands below each of the strictly ascending levels (u·p, mm): the walls,
@@ -26,6 +27,7 @@ export function wettedArea(mesh: Mesh, up: Vec3, atLevels: Float64Array): Float6
     if (level > high) high = level;
   }
   const slack = 1e-9 * Math.max(high - low, 0);
+  const carried = carriedPart * (high - low);
   // the running quadratic: what joins it at each row, expanded about that row
   const [area, join0, join1, join2] = columns(4, rows);
 
@@ -55,7 +57,7 @@ export function wettedArea(mesh: Mesh, up: Vec3, atLevels: Float64Array): Float6
 
   /** c·t² on rows from…to−1, t = h − tip kept within least…most. */
   function corner(from: number, to: number, tip: number, least: number, most: number, c: number) {
-    if (to - from > carriedFrom && most - least > 1e3 * slack) {
+    if (to - from > carriedFrom && most - least > carried) {
       for (let end = 0; end < 2; end += 1) {
         const row = end === 0 ? from : to;
         if (row === rows) return;
