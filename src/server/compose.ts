@@ -4,6 +4,7 @@ import type { Context } from './context';
 import { connect } from './database/connect';
 import { createComputePool } from './jobs/compute-pool';
 import { createLog } from './log';
+import { localFiles } from './storage/local-files';
 import { keepTidy } from './services/keep-tidy';
 
 /** Builds the context, once for a process. Nothing is asked of the database before the first request. */
@@ -24,6 +25,7 @@ export async function composeContext(config: Config): Promise<Context> {
     database,
     sessions,
     computePool,
+    storage: localFiles(config.storage.folder),
     clock,
     async close() {
       stopTidying();

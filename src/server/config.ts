@@ -29,6 +29,7 @@ const environment = z.object({
   DIPWRIGHT_DATABASE_POOL: wholeNumber(1, 200).default(10),
   DIPWRIGHT_COMPUTE_WORKERS: wholeNumber(1, 64).default(2),
   DIPWRIGHT_COMPUTE_WORKER_FILE: z.string().min(1).optional(),
+  DIPWRIGHT_STORAGE_FOLDER: z.string().min(1).default('.data/storage'),
   DIPWRIGHT_LOG_LEVEL: z.enum(['debug', 'info', 'warn', 'error']).default('info'),
 });
 
@@ -63,6 +64,8 @@ export interface Config {
     /** The built worker; where it is not given, whoever makes the pool knows the source file. */
     workerFile: string | undefined;
   };
+  /** Folder of files that are too large for the database. */
+  storage: { folder: string };
   log: { level: 'debug' | 'info' | 'warn' | 'error' };
 }
 
@@ -110,6 +113,7 @@ export function readConfig(env: Record<string, string | undefined> = process.env
       workers: at.DIPWRIGHT_COMPUTE_WORKERS,
       workerFile: at.DIPWRIGHT_COMPUTE_WORKER_FILE,
     },
+    storage: { folder: at.DIPWRIGHT_STORAGE_FOLDER },
     log: { level: at.DIPWRIGHT_LOG_LEVEL },
   };
 }

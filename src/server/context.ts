@@ -3,6 +3,7 @@ import type { Config } from './config';
 import type { Database } from './database/connect';
 import type { ComputePool } from './jobs/compute-pool';
 import type { Log } from './log';
+import type { FileStore } from './storage/file-store';
 
 export type { Actor } from '~/domain/access/actor';
 
@@ -13,6 +14,7 @@ export interface Context {
   database: Database;
   sessions: Sessions;
   computePool: ComputePool;
+  storage: FileStore;
   clock: Clock;
   /** Ends the worker pool and the connections. */
   close(): Promise<void>;

@@ -15,6 +15,7 @@ const rooms = {
   layouts: ['domain', 'components', 'styles'],
   'server/database': ['domain', 'server/config', 'server/log'],
   'server/jobs': ['domain', 'geometry', 'server/config', 'server/log'],
+  'server/storage': ['domain', 'server/config', 'server/log'],
   'server/pdf': ['domain'],
   'server/auth': ['domain', 'server/config', 'server/database'],
   'server/services': [

@@ -16,6 +16,8 @@ export const permissions = {
   'tank.change': ['manager', 'designer'],
   'design.read': ['manager', 'designer', 'fitter'],
   'design.save': ['manager', 'designer'],
+  'mesh.upload': ['manager', 'designer'],
+  'mesh.read': ['manager', 'designer', 'fitter'],
   'revision.issue': ['manager', 'designer'],
   'revision.read': ['manager', 'designer', 'fitter', 'owner'],
   'chart.print': ['manager', 'designer', 'fitter', 'owner'],

@@ -2,12 +2,12 @@ import { randomUUID } from 'node:crypto';
 import type { IncomingMessage, ServerResponse } from 'node:http';
 import type { Config } from '../config';
 import type { Log } from '../log';
-import { bodyCap } from './body-caps';
+import { bodyCap, isStreamed } from './body-caps';
 import { clientAddress } from './client-address';
 import { isClosedRoute } from './closed-routes';
 import type { DrainState } from './drain-state';
 import { hostFault } from './host-allow-list';
-import { discardRest, readBody } from './read-body';
+import { discardRest, readBody, streamBody } from './read-body';
 import { refusals, refuse, tooLarge, type Refusal } from './refuse';
 import { requestPath } from './request-path';
 import { securityHeaders } from './security-headers';
@@ -91,14 +91,19 @@ export function createFront({ config, log, state, files, handler }: FrontParts) 
     if (reads && (await files.serve(path, request, response))) return;
     if (!reads) {
       const cap = bodyCap(path);
-      const body = await readBody(request, cap);
+      const body = isStreamed(path) ? streamBody(request, cap) : await readBody(request, cap);
       if (body === 'gone') return void response.destroy();
       if (body === 'too-large') {
         response.setHeader('Connection', 'close');
         say(tooLarge(cap));
         return discardRest(request);
       }
-      handOver(request, body.bytes);
+      Object.assign(request, { body: 'bytes' in body ? onePiece(body.bytes) : body.pieces });
+      if ('pieces' in body) {
+        response.once('finish', () => {
+          if (!request.complete) discardRest(request);
+        });
+      }
     }
 
     const locals = {
@@ -143,12 +148,9 @@ function sayLeaving(response: ServerResponse): void {
   );
 }
 
-/** The framework takes a body that was read already from `request.body`, as an iterable of bytes. */
-function handOver(request: IncomingMessage, bytes: Buffer): void {
-  async function* body() {
-    yield bytes;
-  }
-  Object.assign(request, { body: body() });
+/** The framework takes a body from `request.body`, as an iterable of bytes. */
+async function* onePiece(bytes: Buffer) {
+  yield bytes;
 }
 
 /** Headers that would make the framework believe a stranger about host, scheme, address or route. */

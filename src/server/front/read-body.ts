@@ -29,6 +29,29 @@ export function readBody(request: IncomingMessage, cap: number): Promise<ReadBod
 }
 
 /**
+ * A body of at most `cap` bytes as it comes, for whoever reads it piece by piece. A length announced beyond the cap is
+ * refused before a byte is read; the piece that passes the cap is the last.
+ */
+export function streamBody(
+  request: IncomingMessage,
+  cap: number,
+): { pieces: AsyncIterable<Uint8Array> } | 'too-large' {
+  if (Number(request.headers['content-length'] ?? 0) > cap) return 'too-large';
+  return { pieces: pieces() };
+
+  async function* pieces() {
+    let length = 0;
+    for await (const piece of request.iterator({
+      destroyOnReturn: false,
+    }) as AsyncIterable<Buffer>) {
+      length += piece.length;
+      yield piece;
+      if (length > cap) return;
+    }
+  }
+}
+
+/**
  * Lets the rest of a refused body run into nothing for a moment, so that the client gets to read
  * the answer, then ends the connection.
  */

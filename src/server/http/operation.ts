@@ -30,6 +30,8 @@ export interface Operation<B = unknown, Q = unknown, A extends Access = Access> 
   limit?: LimitName;
   body?: z.ZodType<B>;
   query?: z.ZodType<Q>;
+  /** Media type of a body that is a file, read by the handler piece by piece. */
+  sends?: string;
   /** Header name → what it is for. */
   headers?: Readonly<Record<string, { description: string; required: boolean }>>;
   answers: readonly Answer[];

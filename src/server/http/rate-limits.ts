@@ -7,6 +7,7 @@ export const limits = {
   compute: { burst: 120, perSecond: 2 },
   session: { burst: 60, perSecond: 0.5 },
   workshops: { burst: 20, perSecond: 1 / 30 },
+  meshes: { burst: 20, perSecond: 1 / 10 },
 } as const;
 export type LimitName = keyof typeof limits;
 
@@ -20,6 +21,7 @@ export function checkLimit(context: Context, name: LimitName, clientAddress: str
       compute: createBuckets(limits.compute),
       session: createBuckets(limits.session),
       workshops: createBuckets(limits.workshops),
+      meshes: createBuckets(limits.meshes),
     };
     bucketsOf.set(context, buckets);
   }

@@ -7,17 +7,29 @@ import type { ComputedTable, Readings } from '~/domain/table/request';
 import type { TankDocument } from '~/domain/tank/document';
 import type { TankSettings } from '~/domain/tank/settings';
 import type { ComputeOutcome, ComputeTask } from './compute-task';
+import type { AcceptedMesh, MeshFile } from './mesh-work';
 
 /**
  * Geometry off the event loop. Every call rejects with a DipwrightError: `invalid` with pointers into the
  * design for a bad one, `unavailable` when it takes too long, too many wait, or the pool has closed.
  */
 export interface ComputePool {
-  table(design: TankDocument, readings: Readings): Promise<ComputedTable>;
+  table(
+    design: TankDocument,
+    readings: Readings,
+    meshes?: readonly MeshFile[],
+  ): Promise<ComputedTable>;
   /** Refuses (`invalid`, one fault a reason) what may not be issued: empty, in pieces, thinner than 0.01 mm. */
-  issue(design: TankDocument, settings: TankSettings, stepMm: number): Promise<IssuedTable>;
+  issue(
+    design: TankDocument,
+    settings: TankSettings,
+    stepMm: number,
+    meshes?: readonly MeshFile[],
+  ): Promise<IssuedTable>;
   /** The sketch of a print: hidden edges are found here, not on the event loop. */
-  sketch(design: TankDocument): Promise<Sketch>;
+  sketch(design: TankDocument, meshes?: readonly MeshFile[]): Promise<Sketch>;
+  /** Reads and checks a file that was sent; `invalid`, one fault a sentence, for what is no closed mesh. */
+  mesh(file: string): Promise<AcceptedMesh>;
   /** Waits for running work, then ends the threads. */
   close(): Promise<void>;
 }
@@ -53,9 +65,9 @@ export function createComputePool(options: ComputePoolOptions): ComputePool {
   async function run(
     task: ComputeTask,
     seconds: number,
-  ): Promise<ComputedTable | IssuedTable | Sketch> {
+  ): Promise<ComputedTable | IssuedTable | Sketch | AcceptedMesh> {
     if (closed) throw unavailable('The server is stopping. Try again in a moment.');
-    const product = task.work === 'sketch' ? 'sketch' : 'table';
+    const product = task.work === 'sketch' || task.work === 'mesh' ? task.work : 'table';
     const signal = AbortSignal.timeout(seconds * 1000);
     let outcome: ComputeOutcome;
     try {
@@ -63,7 +75,7 @@ export function createComputePool(options: ComputePoolOptions): ComputePool {
     } catch (error) {
       if (signal.aborted) {
         throw unavailable(
-          `The ${product} was not ready after ${seconds} seconds. Try again, or take a simpler shape${task.work === 'sketch' ? '' : ' or a larger step'}.`,
+          `The ${product} was not ready after ${seconds} seconds. Try again, or take a simpler shape${product === 'table' ? ' or a larger step' : ''}.`,
           error,
         );
       }
@@ -85,15 +97,19 @@ export function createComputePool(options: ComputePoolOptions): ComputePool {
   }
 
   return {
-    table: (design, readings) =>
-      run({ work: 'table', design, readings }, limitSeconds.table ?? 30) as Promise<ComputedTable>,
-    issue: (design, settings, stepMm) =>
+    table: (design, readings, meshes = []) =>
       run(
-        { work: 'issue', design, settings, stepMm },
+        { work: 'table', design, readings, meshes },
+        limitSeconds.table ?? 30,
+      ) as Promise<ComputedTable>,
+    issue: (design, settings, stepMm, meshes = []) =>
+      run(
+        { work: 'issue', design, settings, stepMm, meshes },
         limitSeconds.issue ?? 90,
       ) as Promise<IssuedTable>,
-    sketch: (design) =>
-      run({ work: 'sketch', design }, limitSeconds.table ?? 30) as Promise<Sketch>,
+    sketch: (design, meshes = []) =>
+      run({ work: 'sketch', design, meshes }, limitSeconds.table ?? 30) as Promise<Sketch>,
+    mesh: (file) => run({ work: 'mesh', file }, limitSeconds.table ?? 30) as Promise<AcceptedMesh>,
     async close() {
       closed = true;
       await pool.close();

@@ -6,6 +6,7 @@ import { computeTable } from '~/domain/table/compute-table';
 import { issueTable } from '~/domain/table/issue-table';
 import { loadManifold } from '~/geometry/manifold';
 import type { ComputeOutcome, ComputeTask } from './compute-task';
+import { acceptMesh, loadMeshFiles } from './mesh-work';
 
 // read from the package, so that a bundle finds it as well as the source does
 const wasm = createRequire(import.meta.url).resolve('manifold-3d/manifold.wasm');
@@ -24,6 +25,8 @@ export default async function compute(task: ComputeTask): Promise<ComputeOutcome
 }
 
 async function work(task: ComputeTask) {
+  if (task.work === 'mesh') return acceptMesh(task.file);
+  await loadMeshFiles(task.meshes);
   switch (task.work) {
     case 'table':
       return computeTable(task.design, task.readings);

@@ -72,7 +72,7 @@ export function openApiDocument(origin: string, version: string): Json {
 }
 
 function described(operation: Operation): Json {
-  const { id, tag, summary, access, body, answers } = operation;
+  const { id, tag, summary, access, body, sends, answers } = operation;
   return {
     operationId: id,
     tags: [tag],
@@ -85,6 +85,14 @@ function described(operation: Operation): Json {
           requestBody: {
             required: true,
             content: { 'application/json': { schema: shapeOf(body, 'input') } },
+          },
+        }),
+    ...(sends === undefined
+      ? {}
+      : {
+          requestBody: {
+            required: true,
+            content: { [sends]: { schema: { type: 'string', format: 'binary' } } },
           },
         }),
     responses: {

@@ -1,4 +1,5 @@
 import type { Operation } from '../http/operation';
+import { meshOperations } from './operations/meshes';
 import { readingOperations } from './operations/readings';
 import { revisionOperations } from './operations/revisions';
 import { serviceOperations } from './operations/service';
@@ -11,6 +12,7 @@ export const operations: readonly Operation[] = [
   sessionOperations,
   workshopOperations,
   tankOperations,
+  meshOperations,
   readingOperations,
   revisionOperations,
   serviceOperations,

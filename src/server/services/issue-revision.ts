@@ -14,6 +14,7 @@ import { insertRows } from '../database/repositories/strapping-rows';
 import type { Scope } from '../database/scope';
 import { inTransaction } from '../database/transaction';
 import { levelPerReading } from './level-per-reading';
+import { meshFilesOf } from './mesh-files';
 import { contentHash, designHash, revisionHash } from './revision-hash';
 import { summaryOf } from './revision-summary';
 import { scopeOf } from './scope-of';
@@ -33,7 +34,8 @@ export async function issueRevision(
   requirePermission(actor.role, 'revision.issue');
   const { tankId, stepMm } = input;
   const before = await contentOf(scopeOf(context, actor), actor, tankId, stepMm);
-  const issued = await context.computePool.issue(before.design, before.settings, stepMm);
+  const meshes = await meshFilesOf(context, scopeOf(context, actor), before.design);
+  const issued = await context.computePool.issue(before.design, before.settings, stepMm, meshes);
   const frozen = freeze(before, issued);
 
   const revision = await inTransaction(context.database, async (transaction) => {

@@ -7,6 +7,7 @@ import { findInstallation } from '../database/repositories/installations';
 import { listRevisionHeads } from '../database/repositories/revisions';
 import { namesOfUsers } from '../database/repositories/users';
 import { drawChart } from '../pdf/draw-chart';
+import { meshFilesOf } from './mesh-files';
 import { revisionInSight } from './revision-in-sight';
 import { scopeOf } from './scope-of';
 import { issuedSettings } from './settings-of';
@@ -50,7 +51,7 @@ export async function renderChart(
     errorL,
     brimPlusMinusL: revision.brimPlusMinusL,
     rows: await soundRows(scope, revision),
-    sketch: await context.computePool.sketch(design),
+    sketch: await context.computePool.sketch(design, await meshFilesOf(context, scope, design)),
     options: input.options,
   });
   return { fileName: `${tank.name} ${letter}.pdf`, pdf: await drawChart(report) };

@@ -2,7 +2,9 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { newId } from '~/server/database/new-id';
 import { operations } from '~/server/openapi/operations';
 import { recordReading } from '~/server/services/record-reading';
+import { uploadMesh } from '~/server/services/upload-mesh';
 import type { Team } from '../../../db/seeds/add-workshop';
+import { asBinaryStl, boxMesh } from '../../geometry/mesh-import/mesh-files';
 import { addDraft, addIssuedTank, type Made } from '../support/add-tank';
 import { boxDesign } from '../support/box-design';
 import { callApi, cookieOf, type Sent } from '../support/call-api';
@@ -16,6 +18,7 @@ let cookie: string;
 /** Their manager; our owner, for a tank that was not handed over to them. */
 let ownersCookie: string;
 let unseen: Made['tank'];
+let meshId: string;
 beforeAll(async () => {
   house = await openHouse();
   ours = await addTestWorkshop(house, 'Tarnside Outfitters');
@@ -27,6 +30,12 @@ beforeAll(async () => {
     idempotencyKey: 'one',
     reading: { at: '2026-11-30T08:15:00Z', depthMm: 100, note: 'Secret note' },
   });
+  const sent = (async function* () {
+    yield asBinaryStl(boxMesh([900, 500, 300]));
+  })();
+  meshId = (
+    await uploadMesh(house.context, ours.designer, { unit: 'mm', name: 'Secret shell', sent })
+  ).id;
   cookie = await cookieOf(house, theirs.manager);
   ownersCookie = await cookieOf(house, ours.owner);
 });
@@ -55,6 +64,7 @@ const samples: Record<string, { suffix?: string; sent?: () => Sent }> = {
   lookUpVolume: { suffix: '?depthMm=100' },
   lookUpDepth: { suffix: '?volumeL=10' },
   renderChart: {},
+  readMesh: {},
 };
 const byId = operations.filter(({ path }) => path.includes('{id}'));
 
@@ -66,7 +76,11 @@ describe('a thing of another workshop is not found', () => {
   it.each(byId.map(({ id }) => id))('%s', async (id) => {
     const { method, path } = byId.find((operation) => operation.id === id)!;
     const { suffix = '', sent } = samples[id]!;
-    const whose = path.includes('/revisions/{id}') ? made.revision.id : made.tank.id;
+    const whose = path.includes('/revisions/{id}')
+      ? made.revision.id
+      : path.includes('/meshes/{id}')
+        ? meshId
+        : made.tank.id;
     const ask = (thing: string) =>
       callApi(house, method, path.replace('{id}', thing) + suffix, { ...sent?.(), cookie });
     const response = await ask(whose);

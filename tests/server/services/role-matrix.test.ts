@@ -27,7 +27,10 @@ import { readWorkshop } from '~/server/services/read-workshop';
 import { recordReading } from '~/server/services/record-reading';
 import { renderChart } from '~/server/services/render-chart';
 import { saveDraft } from '~/server/services/save-draft';
+import { readMesh } from '~/server/services/read-mesh';
+import { uploadMesh } from '~/server/services/upload-mesh';
 import type { Team } from '../../../db/seeds/add-workshop';
+import { asBinaryStl, boxMesh } from '../../geometry/mesh-import/mesh-files';
 import { addDraft, addIssuedTank, type Made } from '../support/add-tank';
 import { boxDesign } from '../support/box-design';
 import { addTestWorkshop, openHouse, type House } from '../support/house';
@@ -45,6 +48,10 @@ afterAll(() => house.drop());
 interface Row {
   roles: readonly Role[];
   run(actor: Actor): Promise<unknown>;
+}
+
+async function* sentBox() {
+  yield asBinaryStl(boxMesh([900, 500, 300]));
 }
 
 const everyone: readonly Role[] = ['manager', 'designer', 'fitter', 'owner'];
@@ -96,6 +103,18 @@ const matrix: Record<string, Row> = {
         etags: ['"1"'],
         design: boxDesign(700),
       });
+    },
+  },
+  uploadMesh: {
+    roles: designers,
+    run: (actor) => uploadMesh(context(), actor, { unit: 'mm', name: 'Shell', sent: sentBox() }),
+  },
+  readMesh: {
+    roles: builders,
+    run: async (actor) => {
+      const sent = { unit: 'mm', name: 'Shell', sent: sentBox() } as const;
+      const { id } = await uploadMesh(context(), team.designer, sent);
+      return readMesh(context(), actor, { meshId: id });
     },
   },
   issueRevision: {

@@ -3,6 +3,7 @@ import { sketchOf } from '~/domain/report/sketch';
 import type { KeptRow, TableRow } from '~/domain/table/request';
 import type { TankDocument } from '~/domain/tank/document';
 import type { ComputePool } from '~/server/jobs/compute-pool';
+import { acceptMesh } from '~/server/jobs/mesh-work';
 
 /**
  * Tables of a single upright box by closed form, V = length × width × depth, without threads: for
@@ -44,6 +45,7 @@ export function boxPool(): ComputePool {
       };
       return sketchOf(space, frame);
     },
+    mesh: acceptMesh,
     async close() {},
   };
 }

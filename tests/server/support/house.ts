@@ -1,9 +1,13 @@
+import { mkdtemp, rm } from 'node:fs/promises';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
 import type { Role } from '~/domain/access/roles';
 import { createSessions } from '~/server/auth/sessions';
 import { readConfig } from '~/server/config';
 import type { Context } from '~/server/context';
 import type { ComputePool } from '~/server/jobs/compute-pool';
 import { createLog } from '~/server/log';
+import { localFiles } from '~/server/storage/local-files';
 import { addWorkshop, type Team } from '../../../db/seeds/add-workshop';
 import { freshDatabase, type FreshDatabase } from '../../support/database';
 import { boxPool } from './box-pool';
@@ -14,6 +18,8 @@ export const password = 'true-litres-2026';
 /** A context over a fresh database, and what a test may want to see of it. */
 export interface House extends FreshDatabase {
   context: Context;
+  /** Where uploads are kept; goes with the database. */
+  storageFolder: string;
   /** Lines of the log, as written. */
   logged: string[];
   /** Moves the clock of the context. */
@@ -24,6 +30,7 @@ export async function openHouse(
   options: { computePool?: ComputePool; tls?: boolean } = {},
 ): Promise<House> {
   const fresh = await freshDatabase();
+  const storageFolder = await mkdtemp(join(tmpdir(), 'dipwright-storage-'));
   const logged: string[] = [];
   let aheadMs = 0;
   const config = readConfig({
@@ -42,9 +49,21 @@ export async function openHouse(
     sessions: createSessions(fresh.database, { tls: config.http.tls }),
     computePool: options.computePool ?? boxPool(),
     clock: { now: () => new Date(Date.now() + aheadMs) },
+    storage: localFiles(storageFolder),
     close: () => fresh.drop(),
   };
-  return { ...fresh, context, logged, later: (seconds) => (aheadMs += seconds * 1000) };
+  const drop = async () => {
+    await fresh.drop();
+    await rm(storageFolder, { recursive: true });
+  };
+  return {
+    ...fresh,
+    drop,
+    context,
+    logged,
+    storageFolder,
+    later: (seconds) => (aheadMs += seconds * 1000),
+  };
 }
 
 let workshops = 0;

@@ -3,6 +3,7 @@ import { defineDraft } from './draft';
 import { defineHandover } from './handover';
 import { defineInstallation } from './installation';
 import { defineMembership } from './membership';
+import { defineMesh } from './mesh';
 import { defineReading } from './reading';
 import { defineRevision } from './revision';
 import { defineSession } from './session';
@@ -26,6 +27,7 @@ export function defineModels(sequelize: Sequelize) {
     revisions: defineRevision(sequelize),
     strappingRows: defineStrappingRow(sequelize),
     handovers: defineHandover(sequelize),
+    meshes: defineMesh(sequelize),
     readings: defineReading(sequelize),
   };
 }
