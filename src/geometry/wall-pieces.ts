@@ -149,19 +149,16 @@ function capAt(edges: readonly Vec3[], chordAngle: number): Vec3[] | null {
   const centre = scaled(middle, 1 / size);
   const widest = Math.max(...rays.map((ray) => Math.acos(Math.min(1, dot(ray, centre)))));
   if (widest < chordAngle / 2) return rays;
-  // filled by arcs between every two rays and the middle: the hull takes what stands out
-  const filled = [...rays, centre];
-  for (const one of rays) {
-    for (const other of [...rays, centre]) {
-      const span = Math.acos(Math.max(-1, Math.min(1, dot(one, other))));
-      const parts = Math.ceil(span / chordAngle);
-      for (let i = 1; i < parts; i += 1) {
-        const mixed = along(
-          scaled(one, Math.sin(span - (i * span) / parts)),
-          other,
-          Math.sin((i * span) / parts),
-        );
-        filled.push(scaled(mixed, 1 / Math.hypot(...mixed)));
+  // filled by a grid over each triangle of two rays and the middle: the hull takes what stands out
+  const filled: Vec3[] = [];
+  const parts = Math.ceil((2 * widest) / chordAngle);
+  for (let i = 0; i < rays.length; i += 1) {
+    for (let j = i + 1; j < rays.length; j += 1) {
+      for (let a = 0; a <= parts; a += 1) {
+        for (let b = 0; a + b <= parts; b += 1) {
+          const mixed = along(along(scaled(rays[i]!, a), rays[j]!, b), centre, parts - a - b);
+          filled.push(scaled(mixed, 1 / Math.hypot(...mixed)));
+        }
       }
     }
   }
