@@ -1,6 +1,7 @@
 import { cautions, cautionsFor, stickCaution } from '../liquid/cautions';
 import { densitySentence } from '../liquid/density-sentence';
 import { stickNoticeSentence } from '../table/stick-notice-sentence';
+import { ownSizesWords } from '../tank/own-sizes';
 import { formatLengthWithUnit } from '../units/format-length';
 import { formatNumber } from '../units/format-number';
 import type { ChartInput } from './chart-input';
@@ -84,7 +85,7 @@ function figureSentences(
       : formatLengthWithUnit(mm, options.length);
   const sizes = design.wall?.sizes === 'outside' ? 'outside sizes less the wall' : 'inside sizes';
   return [
-    `Computed from ${sizes} ${means[settings.measuredBy]}, each ±\u00a0${small(settings.sizePlusMinusMm)}; not metered.`,
+    `Computed from ${sizes} ${means[settings.measuredBy]}, each ±\u00a0${small(settings.sizePlusMinusMm)}${ownSizesWords(design, settings)}; not metered.`,
     `± is a 95\u00a0% interval. It covers the litres, usable and room of its row and holds for a dip read to ±\u00a0${small(settings.dipPlusMinusMm)}.`,
     `Computing itself adds less than ${atMost(errorL)}\u00a0L.`,
     densitySentence(settings),

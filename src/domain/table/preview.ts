@@ -1,5 +1,5 @@
 import type { SolidFields, Vec3 } from '../tank/solid';
-import type { LevelRow } from './level-rows';
+import type { LevelRow } from './level-row';
 import type { StickNotice } from './stick-notices';
 
 /** A closed triangle mesh in the tank's frame, mm. Triangles index `positions` in threes, outward. */

@@ -24,6 +24,20 @@ const options = (changes: Partial<ChartInput['options']>): ChartInput['options']
 const words = (report: ChartReport): string =>
   report.notes.flatMap(({ sentences }) => sentences).join(' ');
 
+describe('the ± of the brim in the box at the head', () => {
+  const brim = (changes: Partial<ChartInput>) =>
+    buildChart(cisternInput(changes)).box.find(({ label }) => label === 'Brim, computed')
+      ?.plusMinus;
+
+  it('is that frozen with the revision, and of an older one that of its last row', () => {
+    const older = buildChart(cisternInput());
+    expect(brim({ brimPlusMinusL: null })).toBe(
+      older.rows.at(-1)!.cells[older.columns.findIndex(({ key }) => key === 'plusMinus')],
+    );
+    expect(brim({ brimPlusMinusL: 7.5 })).toBe('7.5');
+  });
+});
+
 describe('rows of the sloped cistern', () => {
   // closed form: 0.05 h + h²/300 up to 60 mm, 15 + 0.45 (h − 60) above
   const report = buildChart(cisternInput());
@@ -175,6 +189,11 @@ describe('words of the print', () => {
     expect(words(report)).toMatch(
       /Computed from inside sizes by tape, each ±\u00a02\u00a0mm; not metered\./,
     );
+    const { settings, design } = vHullInput();
+    const own = { [`${design.solids[0]!.id}/length`]: 1, 'gone/length': 1 };
+    expect(
+      words(buildChart(vHullInput({ settings: { ...settings, ownSizePlusMinusMm: own } }))),
+    ).toMatch(/each ±\u00a02\u00a0mm, 1 with its own; not metered\./);
     expect(words(report)).toMatch(
       /± is a 95\u00a0% interval\. .* holds for a dip read to ±\u00a02\u00a0mm\./,
     );
