@@ -133,6 +133,7 @@ function BenchSheet({ tank, design, etag, role, person }: BenchProps) {
           tankId={tank.id}
           letter={next}
           waitsFor={waitsFor}
+          slow={slowWords(document)}
           onClose={() => setIssuing(false)}
           onIssued={(letter) => {
             setIssuing(false);
@@ -233,6 +234,14 @@ function useUndoKeys(dispatch: (action: { type: 'undo' } | { type: 'redo' }) => 
 }
 
 /** Why a draft could not be issued as it is shown, or null. */
+/** Taking the wall off where several solids join costs seconds. */
+function slowWords({ wall, solids }: TankDocument): string | null {
+  const holds = solids.filter(({ role }) => role === 'holds').length;
+  return wall?.sizes === 'outside' && holds > 1
+    ? 'Working out the inside of the wall where solids join: this may take some seconds.'
+    : null;
+}
+
 function waitsForDraft(saving: Saving): string | null {
   switch (saving.state) {
     case 'saved':

@@ -12,12 +12,15 @@ interface IssuePanelProps {
   letter: string;
   /** Why the server does not have all that is shown yet; null when it has. */
   waitsFor: string | null;
+  /** What takes long in issuing this tank, as a sentence. */
+  slow?: string | null;
   onIssued(letter: string): void;
   onClose(): void;
 }
 
 /** Issues the draft as the next revision: asks for the step and a note, tells reasons against it. */
-export function IssuePanel({ tankId, letter, waitsFor, onIssued, onClose }: IssuePanelProps) {
+export function IssuePanel(props: IssuePanelProps) {
+  const { tankId, letter, waitsFor, slow, onIssued, onClose } = props;
   const heading = useRef<HTMLHeadingElement>(null);
   useEffect(() => heading.current?.focus(), []);
   const form = useForm<z.input<typeof newRevision>, unknown, NewRevision>({
@@ -81,6 +84,11 @@ export function IssuePanel({ tankId, letter, waitsFor, onIssued, onClose }: Issu
           </button>
         </div>
       </form>
+      {slow && issue.isPending && (
+        <p role="status" className="mt-3">
+          {slow}
+        </p>
+      )}
       {waitsFor !== null && !issue.isPending && (
         <p role="status" className="fault mt-3">
           What is saved is what gets issued. {waitsFor}
