@@ -31,14 +31,19 @@ const parallel = Math.cos(0.001);
  * The first place where the liquid space, or what parts it, is thinner than `thinMm`: a pair of faces,
  * parallel within 0.001 rad, that look opposite ways, overlap when seen square on, and lie closer than
  * that somewhere in the overlap. null when there is none. Edges and tips that taper to nothing do not count.
+ * `only`: films or walls alone.
  */
-export function thinPlace(mesh: Mesh, thinMm: number): ThinPlace | null {
+export function thinPlace(mesh: Mesh, thinMm: number, only?: ThinPlace['what']): ThinPlace | null {
   const faces = facesOf(mesh).sort((one, other) => one.key - other.key);
-  return faces.length <= fewFaces ? byNormal(faces, thinMm) : byPlace(faces, thinMm);
+  return faces.length <= fewFaces ? byNormal(faces, thinMm, only) : byPlace(faces, thinMm, only);
 }
 
 /** Few faces: each is held against those that look the opposite way. */
-function byNormal(faces: readonly Face[], thinMm: number): ThinPlace | null {
+function byNormal(
+  faces: readonly Face[],
+  thinMm: number,
+  only?: ThinPlace['what'],
+): ThinPlace | null {
   for (const face of faces) {
     // an opposite face has the opposite key, within the 0.001 rad allowed
     for (let i = firstAtLeast(faces, -face.key - 0.002); i < faces.length; i += 1) {
@@ -46,14 +51,18 @@ function byNormal(faces: readonly Face[], thinMm: number): ThinPlace | null {
       if (other.key > -face.key + 0.002) break;
       if (other.key < face.key) continue;
       const found = between(face, other, thinMm);
-      if (found) return found;
+      if (found && found.what === (only ?? found.what)) return found;
     }
   }
   return null;
 }
 
 /** Many, of which half may look one way and half the other (a wall in fine triangles): against those near them. */
-function byPlace(faces: readonly Face[], thinMm: number): ThinPlace | null {
+function byPlace(
+  faces: readonly Face[],
+  thinMm: number,
+  only?: ThinPlace['what'],
+): ThinPlace | null {
   const ends = (side: (...values: number[]) => number, by: number) =>
     faces.map(({ corners: [a, b, c] }): Vec3 => [
       side(a[0], b[0], c[0]) + by,
@@ -64,7 +73,8 @@ function byPlace(faces: readonly Face[], thinMm: number): ThinPlace | null {
   let found: ThinPlace | null = null;
   for (let i = 0; i < faces.length && !found; i += 1) {
     near.of(i, (other) => {
-      found ??= between(faces[i]!, faces[other]!, thinMm);
+      const place = between(faces[i]!, faces[other]!, thinMm);
+      if (place && place.what === (only ?? place.what)) found ??= place;
     });
   }
   return found;

@@ -1,9 +1,10 @@
 import { loadManifold, spaceOf } from '../../geometry/manifold';
 import { swollen } from '../../geometry/swollen';
-import { thinPlace } from '../../geometry/thin-places';
+import { thinPlace, type ThinPlace } from '../../geometry/thin-places';
 import { thinMm } from '../../geometry/tolerance';
+import { along } from '../../geometry/vec3';
 import type { TankDocument } from '../tank/document';
-import { placedShape, type PlacedSolid } from '../tank/placed-solid';
+import { placedShape, placedSolid, type PlacedSolid } from '../tank/placed-solid';
 import { placedSolids } from '../tank/placed-solids';
 import { DipwrightError } from '../errors';
 import { facetStandOffMm } from './facet-stand-off';
@@ -33,9 +34,10 @@ export async function checkIssuable(document: TankDocument): Promise<string[]> {
       `The liquid space is in ${pieces} pieces that no opening joins: let the solids that hold overlap, or model one tank at a time.`,
     );
   }
-  const thin = thinPlace(space.mesh, thinMm);
+  const thin =
+    document.wall?.sizes === 'outside' ? thinInsideWall(document, solids, space) : thinIn(space);
   if (thin) {
-    const at = thin.at.map((value, axis) => Math.round((value + space.origin[axis]!) * 10) / 10);
+    const at = thin.at.map((value) => Math.round(value * 10) / 10);
     const where = `near x ${at[0]}, y ${at[1]}, z ${at[2]}`;
     reasons.push(
       thin.what === 'film'
@@ -71,6 +73,28 @@ function piecesWhenSwollen(
       });
   const mesh = spaceOf(shapes('holds', sign), shapes('displaces', -sign), space.origin);
   return piecesOf(mesh);
+}
+
+function thinIn({ mesh, origin }: LiquidSpace, only?: ThinPlace['what']): ThinPlace | null {
+  const thin = thinPlace(mesh, thinMm, only);
+  return thin && { ...thin, at: along(thin.at, origin, 1) };
+}
+
+/**
+ * Where balls were taken off, what parts the liquid is nowhere thinner than two walls, but chords leave thin burrs on it
+ * and splinters of liquid beside it. So what is too thin to part liquid is looked for among the solids as drawn, and
+ * a film counts only if it is there with half and with a quarter of the facets too.
+ */
+function thinInsideWall(
+  document: TankDocument,
+  solids: readonly PlacedSolid[],
+  space: LiquidSpace,
+): ThinPlace | null {
+  const film = thinIn(space, 'film');
+  const stays = (part: number) => thinIn(liquidSpace(solids, space.facets / part), 'film') !== null;
+  if (film && stays(2) && stays(4)) return film;
+  const drawn = document.solids.map(placedSolid);
+  return thinIn(liquidSpace(drawn, Math.min(space.facets, 128)), 'wall');
 }
 
 /** With outside sizes: the wall thinner for 1, thicker for −1; at 128 facets, which tells pieces well enough. */

@@ -296,6 +296,23 @@ describe('the bench', () => {
   });
 });
 
+describe('before issue', () => {
+  it('splinters beside a round joint are no reason; a film between two walls is', async () => {
+    const neck = cylinder('neck', 200, 300, { axis: 'z', at: [400, 150, 300] } as Partial<Solid>);
+    for (const wallMm of [2, 6]) {
+      const crossed = design([cylinder('body', 500, 1000), neck], outside(wallMm));
+      expect(await checkIssuable(crossed), String(wallMm)).toEqual([]);
+    }
+    const flat = design(
+      [cylinder('body', 500, 1000), box('duct', [12.005, 300, 300], { at: [500, 100, 400] })],
+      outside(6),
+    );
+    expect(await checkIssuable(flat)).toEqual([
+      expect.stringMatching(/^The liquid space is thinner than 0\.01 mm/),
+    ]);
+  }, 60_000);
+});
+
 describe('whatever the wall', () => {
   it('volume falls as it grows, and two walls one in the other are one of both', async () => {
     await loadManifold();
