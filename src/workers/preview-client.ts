@@ -1,5 +1,6 @@
 import { DipwrightError } from '~/domain/errors';
 import type { Preview } from '~/domain/table/preview';
+import type { NamedMesh } from './preview-protocol';
 import type { Measured, PlusMinus } from '~/domain/table/uncertainty';
 import type { TankDocument } from '~/domain/tank/document';
 import type { PreviewReply, PreviewRequest } from './preview-protocol';
@@ -9,9 +10,9 @@ export interface PreviewClient {
   /**
    * The preview of a design; null when a later call took its place. Rejects with a DipwrightError
    * (`invalid`, JSON pointers into the design) when the design cannot be computed, and with
-   * `unavailable` when the worker cannot run.
+   * `unavailable` when the worker cannot run. `meshes`: those that the worker was not given yet.
    */
-  compute(design: TankDocument): Promise<Preview | null>;
+  compute(design: TankDocument, meshes?: readonly NamedMesh[]): Promise<Preview | null>;
   /**
    * The ± of each row of a preview of that design and of its brim, litres (JCGM 100, first order: sizes,
    * dip, computing); null when a later call took its place. Slower than a preview: one run a size.
@@ -81,8 +82,12 @@ export function createPreviewClient(
   }
 
   return {
-    async compute(design) {
-      const reply = await ask({ ask: 'preview', design });
+    async compute(design, meshes = []) {
+      const reply = await ask({
+        ask: 'preview',
+        design,
+        ...(meshes.length === 0 ? {} : { meshes }),
+      });
       return reply && 'preview' in reply ? reply.preview : null;
     },
     async plusMinus(design, { rows, frame: { heightMm }, errorL }, measured) {

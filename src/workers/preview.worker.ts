@@ -2,6 +2,7 @@ import { DipwrightError } from '~/domain/errors';
 import { computePreview } from '~/domain/table/compute-preview';
 import type { Preview } from '~/domain/table/preview';
 import { plusMinusOfTable } from '~/domain/table/uncertainty';
+import { provideMesh } from '~/domain/tank/kinds/mesh/loaded-meshes';
 import { loadManifold } from '~/geometry/manifold';
 import { latestWins } from './latest-wins';
 import type { PreviewReply, PreviewRequest } from './preview-protocol';
@@ -29,7 +30,10 @@ const take = latestWins<PreviewRequest>(async (request) => {
     scope.postMessage({ number, refusal: refusalOf(error) });
   }
 });
-scope.onmessage = ({ data }) => take(data);
+scope.onmessage = ({ data }) => {
+  for (const { upload, mesh } of data.meshes ?? []) provideMesh(upload, mesh);
+  take(data);
+};
 
 function buffersOf({ space, solids }: Preview): Transferable[] {
   return [space, ...solids].flatMap(({ positions, triangles }) => [

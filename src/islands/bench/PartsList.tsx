@@ -1,12 +1,14 @@
-import type { Dispatch } from 'react';
+import { useState, type Dispatch } from 'react';
 import type { FieldFault } from '~/domain/errors';
 import type { TankDocument } from '~/domain/tank/document';
 import { valueAt } from '~/domain/tank/value-at';
+import { hasMesh } from '~/domain/tank/kinds/mesh/loaded-meshes';
 import { kindOf, kinds, type Solid } from '~/domain/tank/kinds/registry';
 import { formatLength } from '~/domain/units/format-length';
 import type { LengthUnit } from '~/domain/units/length-unit';
 import { addSolid, copySolid, freeId, removeSolid } from '~/scene/commands';
 import type { SceneAction } from '~/scene/scene';
+import { MeshUpload } from './MeshUpload';
 import { SolidFields } from './SolidFields';
 
 interface PartsListProps {
@@ -19,6 +21,7 @@ interface PartsListProps {
 
 /** The parts list: every solid a row; the chosen one opens to be typed in. */
 export function PartsList({ document, selected, dispatch, unit, faults }: PartsListProps) {
+  const [uploading, setUploading] = useState(false);
   return (
     <section aria-labelledby="parts">
       <h2 id="parts" className="sr-only">
@@ -67,7 +70,18 @@ export function PartsList({ document, selected, dispatch, unit, faults }: PartsL
             {kind.label}
           </button>
         ))}
+        <button
+          type="button"
+          className="act-text"
+          aria-expanded={uploading}
+          onClick={() => setUploading(!uploading)}
+        >
+          mesh from a file
+        </button>
       </p>
+      {uploading && (
+        <MeshUpload document={document} dispatch={dispatch} onClose={() => setUploading(false)} />
+      )}
     </section>
   );
 }
@@ -115,7 +129,7 @@ function Rows(props: {
         </td>
         <td>{solid.role}</td>
         <td>{kind.label}</td>
-        <td className="figure whitespace-nowrap">{sizes}</td>
+        <td className="figure whitespace-nowrap">{sizes || lengthsOf(solid, unit)}</td>
         <td className="figure whitespace-nowrap">
           {at.map((value) => formatLength(value, unit)).join(', ')}
         </td>
@@ -178,9 +192,20 @@ function add(
   });
 }
 
+/** Lengths along x, y, z of a solid without sizes of its own, once its mesh is here. */
+function lengthsOf(solid: Solid, unit: LengthUnit): string {
+  if (solid.kind === 'mesh' && !hasMesh(solid.upload)) return '';
+  return kindOf(solid)
+    .extent(solid)
+    .map((length) => formatLength(length, unit))
+    .join(' × ');
+}
+
 function copy(document: TankDocument, dispatch: Dispatch<SceneAction>, solid: Solid) {
   const id = freeId(document, solid.id);
-  const shift = kindOf(solid).extent(solid)[0];
+  // a mesh that is not here has no place of its own yet: the copy stands on it
+  const there = solid.kind !== 'mesh' || hasMesh(solid.upload);
+  const shift = there ? kindOf(solid).extent(solid)[0] : 0;
   dispatch({
     type: 'edit',
     name: `copy ${solid.id}`,

@@ -4,6 +4,7 @@ import type { Preview } from '~/domain/table/preview';
 import type { PlusMinus } from '~/domain/table/uncertainty';
 import type { TankDocument } from '~/domain/tank/document';
 import type { TankSettings } from '~/domain/tank/settings';
+import { fetchMeshes } from './fetch-meshes';
 import { createPreviewClient, type PreviewClient } from '~/workers/preview-client';
 
 export interface LivePreview {
@@ -37,7 +38,9 @@ export function usePreview(
   useEffect(() => {
     let current = true;
     const follow = async (worker: PreviewClient) => {
-      const preview = await worker.compute(design);
+      const meshes = await fetchMeshes(design);
+      if (!current) return;
+      const preview = await worker.compute(design, meshes);
       if (!current || !preview) return;
       setLive(({ plusMinus }) => ({ preview, plusMinus, problem: null }));
       // one run a size: left until the hand rests, so that the next edit never waits for it

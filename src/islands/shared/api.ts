@@ -6,6 +6,7 @@ import { installation, type NewInstallation } from '~/domain/installation/instal
 import { reading, type NewReading } from '~/domain/reading/reading';
 import { depthAnswer } from '~/domain/table/depth-answer';
 import { computedTable, issuedRow } from '~/domain/table/request';
+import { uploadedMesh, type MeshUnit, type UploadedMesh } from '~/domain/tank/kinds/mesh/uploaded';
 import { tankDocument, type TankDocument } from '~/domain/tank/document';
 import {
   lookUp,
@@ -15,7 +16,8 @@ import {
   type NewTank,
   type TankChange,
 } from '~/domain/tank/tank';
-import { call, type Answered } from './call';
+import { call, callBytes, type Answered } from './call';
+import { sendFile } from './send-file';
 
 /** The only caller of `/api/v1` in the browser. Refusals are thrown as `ApiProblem`. */
 
@@ -56,6 +58,18 @@ export const saveDesign = (id: string, body: TankDocument, etag: string) =>
     headers: { 'if-match': etag },
     answer: tankDocument,
   });
+
+/** A mesh as it is kept (mesh-bytes.ts). */
+export const readMesh = async (id: string): Promise<Uint8Array> =>
+  new Uint8Array(await callBytes(`/meshes/${encodeURIComponent(id)}`));
+export const uploadMesh = async (
+  file: File,
+  unit: MeshUnit,
+  onSent: (part: number) => void,
+): Promise<UploadedMesh> => {
+  const query = new URLSearchParams({ unit, name: file.name.slice(0, 120) || 'mesh' });
+  return uploadedMesh.parse(await sendFile(`/meshes?${query}`, file, onSent));
+};
 
 export const issueRevision = (id: string, body: NewRevision) =>
   valueOf(call(`${tankPath(id)}/revisions`, { method: 'POST', body, answer: revisionSummary }));

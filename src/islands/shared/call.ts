@@ -38,6 +38,13 @@ export async function call<T = undefined>(
   return { value: parsed.data, etag };
 }
 
+/** The bytes of an answer that is no JSON; refusals as with `call`. */
+export async function callBytes(path: string): Promise<ArrayBuffer> {
+  const response = await send(path, {});
+  if (!response.ok) throw await problemFrom(response);
+  return response.arrayBuffer();
+}
+
 async function send<T>(
   path: string,
   { method = 'GET', body, headers, signal }: Call<T>,

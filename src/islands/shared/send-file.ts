@@ -17,7 +17,10 @@ export function sendFile(
     request.upload.onprogress = ({ loaded, total }) => onSent(total > 0 ? loaded / total : 0);
     request.onerror = () => reject(unreachable());
     request.onload = () => {
-      const answer = new Response(request.responseText, { status: request.status });
+      const answer = new Response(request.responseText, {
+        status: request.status,
+        headers: { 'content-type': request.getResponseHeader('content-type') ?? '' },
+      });
       const settled = answer.ok
         ? answer.json()
         : problemFrom(answer).then((problem) => Promise.reject(problem));

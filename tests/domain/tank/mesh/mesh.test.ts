@@ -317,6 +317,20 @@ describe('the store of meshes', () => {
   });
 });
 
+it('a preview may be handed to another thread, and the next one is computed all the same', async () => {
+  provideMesh('box', boxMesh([900, 500, 300]));
+  const document = tank([meshSolid('box')]);
+  for (let run = 0; run < 2; run += 1) {
+    const { capacityL, space, solids } = await computePreview(document);
+    expect(capacityL).toBeCloseTo(135, 9);
+    const transfer = [space, ...solids].flatMap(({ positions, triangles }) => [
+      positions.buffer,
+      triangles.buffer,
+    ]);
+    structuredClone(transfer, { transfer });
+  }
+});
+
 describe('half a million triangles', () => {
   const ball = fineBall(500);
   const document = tank([meshSolid('ball')], { stick: { at: [1000, 1000] } });

@@ -47,7 +47,8 @@ export const mesh: Kind<MeshSolid> = {
         positions[i + axis] = (taken.positions[i + axis]! - middle[axis]!) * factors[axis]!;
       }
     }
-    return { form: 'mesh', mesh: { positions, triangles: taken.triangles } };
+    // a copy: what is made of it may be handed to another thread, which takes it from here
+    return { form: 'mesh', mesh: { positions, triangles: taken.triangles.slice() } };
   },
   support(solid, up) {
     const {
