@@ -3,11 +3,14 @@ import Module, {
   type ManifoldToplevel,
   type Vec2 as MutableVec2,
 } from 'manifold-3d';
+import { cutCaps } from './cut-caps';
 import { distinctRounded } from './distinct-rounded';
 import { exactPoints } from './exact-points';
+import { gluedCaps } from './glued-caps';
 import type { Mesh } from './mesh';
 import { placedMesh } from './placed-mesh';
-import { toTank, type Placing } from './placing';
+import type { PlacedShape } from './placed-shape';
+import { toTank } from './placing';
 import { prismMesh } from './prism-mesh';
 import { revolvedMesh } from './revolved-mesh';
 import { axisOrder, type Axis, type Shape, type Vec2 } from './shape';
@@ -45,12 +48,6 @@ async function load({ wasmUrl, wasmBinary }: ManifoldSource): Promise<void> {
   const loaded = await Module(options as Parameters<typeof Module>[0]);
   loaded.setup();
   library = loaded;
-}
-
-/** A shape and where it stands. */
-export interface PlacedShape {
-  shape: Shape;
-  place: Placing;
 }
 
 /**
@@ -99,6 +96,20 @@ export function spaceOf(
   origin: Vec3,
 ): Mesh {
   if (holds.length === 1 && displaces.length === 0) return meshOf(holds[0]!, origin);
+  const cut = cutCaps(holds, displaces);
+  if (cut) {
+    const space = joinedSpace(cut.holds, cut.displaces, origin);
+    const whole = cut.caps.length === 0 ? space : gluedCaps(space, cut.caps, origin);
+    if (whole) return whole;
+  }
+  return joinedSpace(holds, displaces, origin);
+}
+
+function joinedSpace(
+  holds: readonly PlacedShape[],
+  displaces: readonly PlacedShape[],
+  origin: Vec3,
+): Mesh {
   const { Manifold } = loadedLibrary();
   const bin: Manifold[] = [];
   const keep = (one: Manifold) => {

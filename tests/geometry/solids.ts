@@ -1,5 +1,6 @@
 import { circleOutline } from '~/geometry/circle';
-import { loadManifold, spaceOf, type PlacedShape } from '~/geometry/manifold';
+import { loadManifold, spaceOf } from '~/geometry/manifold';
+import type { PlacedShape } from '~/geometry/placed-shape';
 import type { Mesh } from '~/geometry/mesh';
 import { placing } from '~/geometry/placing';
 import type { Axis } from '~/geometry/shape';

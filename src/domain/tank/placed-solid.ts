@@ -1,6 +1,6 @@
 import type { Interval } from '../../geometry/intervals';
 import type { Line } from '../../geometry/line';
-import type { PlacedShape } from '../../geometry/manifold';
+import type { PlacedShape } from '../../geometry/placed-shape';
 import { directionToOwn, placing, toOwn, type Placing } from '../../geometry/placing';
 import { dot } from '../../geometry/vec3';
 import type { Kind } from './kinds/kind';
