@@ -1,5 +1,6 @@
 import type { TankMesh } from '~/domain/table/preview';
 import type { Vec3 } from '~/domain/tank/solid';
+import { creaseCos } from '~/geometry/crease';
 
 /**
  * The lines a draughtsman would draw of a closed mesh: its creases, and from a given side the
@@ -12,8 +13,6 @@ export interface EdgeList {
   normals: Float64Array;
   crease: Uint8Array;
 }
-
-const creaseCos = Math.cos((24 * Math.PI) / 180);
 
 export function edgesOf(mesh: TankMesh): EdgeList {
   const { positions, triangles } = mesh;

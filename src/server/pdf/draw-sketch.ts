@@ -35,18 +35,30 @@ export function drawSketch(pen: Pen, sketch: ChartSketch, frame: SketchFrame): v
     for (const hidden of [true, false]) {
       if (hidden) pen.document.dash(2, { space: 1.6 });
       else pen.document.undash();
-      for (const line of sketch.lines) {
-        if (line.hidden !== hidden) continue;
-        pen.line(
-          ...at(line.x1, line.y1),
-          ...at(line.x2, line.y2),
-          hidden ? 0.45 : 0.8,
-          hidden ? ink.line : ink.full,
-        );
-      }
+      const lines = sketch.lines.filter((line) => line.hidden === hidden);
+      drawRuns(pen, lines, at, hidden ? 0.45 : 0.8, hidden ? ink.line : ink.full);
     }
   });
   if (sketch.stick !== null) drawStickOnSketch(pen, sketch.stick, sketch, at);
+}
+
+/** Lines that run on from one another as one stroke: corners close, and dashes go on round a curve. */
+function drawRuns(
+  pen: Pen,
+  lines: ChartSketch['lines'],
+  at: (x: number, y: number) => [number, number],
+  width: number,
+  color: string,
+): void {
+  if (lines.length === 0) return;
+  const { document } = pen;
+  document.lineWidth(width).strokeColor(color).lineJoin('round').lineCap('butt');
+  lines.forEach((line, i) => {
+    const last = lines[i - 1];
+    if (last?.x2 !== line.x1 || last.y2 !== line.y1) document.moveTo(...at(line.x1, line.y1));
+    document.lineTo(...at(line.x2, line.y2));
+  });
+  document.stroke();
 }
 
 function drawStickOnSketch(
