@@ -40,13 +40,16 @@ export type Shape =
       flat?: readonly { normal: Vec3; offset: number }[];
     };
 
-const order: Record<Axis, readonly [number, number, number]> = {
+/** Index of one of the axes x, y, z. */
+type Index = 0 | 1 | 2;
+
+const order: Record<Axis, readonly [Index, Index, Index]> = {
   x: [1, 2, 0],
   y: [2, 0, 1],
   z: [0, 1, 2],
 };
 
 /** Index of the own axis that the outline's first, second and the extrusion's direction lie along. */
-export function axisOrder(axis: Axis): readonly [number, number, number] {
+export function axisOrder(axis: Axis): readonly [Index, Index, Index] {
   return order[axis];
 }

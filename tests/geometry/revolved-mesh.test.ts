@@ -3,8 +3,9 @@ import { ballProfile } from '~/geometry/ball-profile';
 import { enclosedVolume, levels, type Mesh } from '~/geometry/mesh';
 import { revolvedMesh } from '~/geometry/revolved-mesh';
 import type { Vec2 } from '~/geometry/shape';
+import type { Vec3 } from '~/geometry/vec3';
 
-const turned = (profile: readonly Vec2[], facets = 16, stretch = [1, 1, 1] as const) =>
+const turned = (profile: readonly Vec2[], facets = 16, stretch: Vec3 = [1, 1, 1]) =>
   revolvedMesh({ form: 'revolution', axis: 'z', profile, facets, phase: 0.3, stretch });
 
 /** Every edge is met once in each direction. */
@@ -75,7 +76,7 @@ describe('revolvedMesh', () => {
       const heights = levels(mesh, up);
       expect([Math.min(...heights), Math.max(...heights)]).toEqual([-1, 2]);
       // the second direction of the outline: z for x, x for y, y for z
-      const second = [0, 1, 2].map((i) => (i === (along + 2) % 3 ? 1 : 0)) as [
+      const second = [0, 1, 2].map((i) => (i === (along + 2) % 3 ? 1 : 0)) as unknown as [
         number,
         number,
         number,

@@ -1,5 +1,5 @@
 import type { ReadingFrame, TankMesh } from '../table/preview';
-import type { StickNotice } from '../table/stick-notices';
+import type { StickNotice } from '../table/stick-notice';
 import { elevation, type Elevation, type View } from './elevation';
 
 /** An elevation of the tank with its stick, mm: x to the right, y up, origin at the lower left. */

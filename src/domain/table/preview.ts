@@ -1,6 +1,6 @@
 import type { SolidFields, Vec3 } from '../tank/solid';
 import type { LevelRow } from './level-row';
-import type { StickNotice } from './stick-notices';
+import type { StickNotice } from './stick-notice';
 
 /** A closed triangle mesh in the tank's frame, mm. Triangles index `positions` in threes, outward. */
 export interface TankMesh {

@@ -1,6 +1,6 @@
 import { formatLengthWithUnit } from '../units/format-length';
 import type { LengthUnit } from '../units/length-unit';
-import type { StickNotice } from './stick-notices';
+import type { StickNotice } from './stick-notice';
 
 /** What one stick cannot tell, in a sentence for the person who dips. */
 export function stickNoticeSentence(notice: StickNotice, unit: LengthUnit): string {

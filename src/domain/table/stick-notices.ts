@@ -6,21 +6,7 @@ import { columnAt } from './column';
 import { readingOfLevel } from './level';
 import type { LiquidSpace } from './liquid-space';
 import type { ReadingFrame } from './preview';
-
-/** What one stick cannot tell of this tank as it stands. Readings in mm. */
-export type StickNotice =
-  | {
-      /** Liquid stands in pools that level out only above this reading. */
-      what: 'pools';
-      readingMm: number;
-      pools: number;
-    }
-  | {
-      /** A solid that displaces crosses the stick: it reads up to there, though there is liquid space above. */
-      what: 'crossed';
-      readingMm: number;
-      by: string | null;
-    };
+import type { StickNotice } from './stick-notice';
 
 /** Part of the capacity below which a puddle beside the stick is not worth a word. */
 const worthSaying = 1e-4;

@@ -1,7 +1,7 @@
 import type { TankDocument } from '~/domain/tank/document';
 import { hasMesh, provideMesh } from '~/domain/tank/kinds/mesh/loaded-meshes';
+import { meshFromBytes } from '~/domain/tank/kinds/mesh/mesh-from-bytes';
 import { namedMeshes } from '~/domain/tank/kinds/mesh/named-meshes';
-import { meshOfBytes } from '~/geometry/mesh-import/mesh-bytes';
 import type { NamedMesh } from '~/workers/preview-protocol';
 import { readMesh } from '../shared/api';
 import { ApiProblem } from '../shared/problem';
@@ -15,7 +15,7 @@ export async function fetchMeshes(design: TankDocument): Promise<NamedMesh[]> {
   const found = await Promise.all(
     wanted.map(async ({ upload }) => {
       try {
-        return { upload, mesh: meshOfBytes(await readMesh(upload)) };
+        return { upload, mesh: meshFromBytes(await readMesh(upload)) };
       } catch (error) {
         if (error instanceof ApiProblem) return null;
         throw error;
