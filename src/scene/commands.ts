@@ -44,19 +44,28 @@ export function changeSolid(
 }
 
 /**
- * Sets one size by its path inside the solid's entry, e.g. `['length']`. A stick that stood at the
- * middle of the solid stays at its middle: off it, the zero of a round tank would climb the wall.
+ * Changes what a solid measures. A stick that stood at the middle of the solid stays at its middle: off it, the zero
+ * of a round tank would climb the wall.
  */
+export function resizeSolid(
+  document: TankDocument,
+  id: string,
+  change: (solid: Solid) => Solid,
+): TankDocument {
+  const before = document.solids.find((solid) => solid.id === id);
+  const after = changeSolid(document, id, change);
+  const resized = after.solids.find((solid) => solid.id === id);
+  return before && resized ? keepInTheMiddle(after, before, resized) : after;
+}
+
+/** Sets one size by its path inside the solid's entry, e.g. `['length']`. */
 export function setSize(
   document: TankDocument,
   id: string,
   path: readonly string[],
   valueMm: number,
 ): TankDocument {
-  const before = document.solids.find((solid) => solid.id === id);
-  const after = changeSolid(document, id, (solid) => setPath(solid, path, valueMm) as Solid);
-  const resized = after.solids.find((solid) => solid.id === id);
-  return before && resized ? keepInTheMiddle(after, before, resized) : after;
+  return resizeSolid(document, id, (solid) => setPath(solid, path, valueMm) as Solid);
 }
 
 function keepInTheMiddle(document: TankDocument, before: Solid, after: Solid): TankDocument {
@@ -65,7 +74,10 @@ function keepInTheMiddle(document: TankDocument, before: Solid, after: Solid): T
   if (!stick || turned || before.role !== 'holds') return document;
   const at: [number, number] = [...stick.at];
   for (const axis of [0, 1] as const) {
-    if (Math.abs(at[axis] - middleOf(before, axis)) < 1e-6) at[axis] = middleOf(after, axis);
+    const middle = middleOf(after, axis);
+    // an outline that is half typed may have no middle
+    if (!Number.isFinite(middle)) continue;
+    if (Math.abs(at[axis] - middleOf(before, axis)) < 1e-6) at[axis] = middle;
   }
   const moved = at[0] !== stick.at[0] || at[1] !== stick.at[1];
   return moved ? setStick(document, { ...stick, at }) : document;
