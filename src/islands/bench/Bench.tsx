@@ -20,6 +20,7 @@ import { PartsList } from './PartsList';
 import { TitleBlock } from './TitleBlock';
 import { TopLine } from './TopLine';
 import { unseenWords } from './unseen';
+import { useCarriedPlusMinus } from './use-carried-plus-minus';
 import { useDraftSaving, type Saving } from './use-draft-saving';
 import { usePreview } from './use-preview';
 import { useSettings } from './use-settings';
@@ -47,6 +48,7 @@ function BenchSheet({ tank, design, etag, role, person }: BenchProps) {
   const document = scene.history.present;
   const [units] = useUnitsPreference(person);
   const { settings, change, faults, unsaved, saved: settingsSaved } = useSettings(tank);
+  useCarriedPlusMinus(document, settings, change);
   const { preview, plusMinus, problem } = usePreview(document, settings);
   const { saving, save, takeTheirs, keepMine } = useDraftSaving(tank.id, document, etag);
   const [depthMm, setDepthMm] = useState<number | null>(null);
@@ -187,6 +189,8 @@ function BenchSheet({ tank, design, etag, role, person }: BenchProps) {
             selected={scene.selected}
             dispatch={dispatch}
             unit={units.length}
+            settings={settings}
+            onSettings={change}
             faults={problem?.faults ?? []}
           />
         </div>

@@ -1,14 +1,16 @@
 import { useState, type Dispatch } from 'react';
 import type { FieldFault } from '~/domain/errors';
 import type { TankDocument } from '~/domain/tank/document';
-import { valueAt } from '~/domain/tank/value-at';
 import { hasMesh } from '~/domain/tank/kinds/mesh/loaded-meshes';
 import { kindOf, kinds, type Solid } from '~/domain/tank/kinds/registry';
+import type { TankSettings } from '~/domain/tank/settings';
+import type { TankChange } from '~/domain/tank/tank';
 import { formatLength } from '~/domain/units/format-length';
 import type { LengthUnit } from '~/domain/units/length-unit';
 import { addSolid, copySolid, freeId, removeSolid } from '~/scene/commands';
 import type { SceneAction } from '~/scene/scene';
 import { MeshUpload } from './MeshUpload';
+import { sizesInTheList } from './sizes-in-the-list';
 import { SolidFields } from './SolidFields';
 
 interface PartsListProps {
@@ -16,22 +18,25 @@ interface PartsListProps {
   selected: string | null;
   dispatch: Dispatch<SceneAction>;
   unit: LengthUnit;
+  settings: TankSettings;
+  onSettings(change: TankChange): void;
   faults: readonly FieldFault[];
 }
 
 /** The parts list: every solid a row; the chosen one opens to be typed in. */
-export function PartsList({ document, selected, dispatch, unit, faults }: PartsListProps) {
+export function PartsList(props: PartsListProps) {
+  const { document, selected, dispatch, unit, settings, onSettings, faults } = props;
   const [uploading, setUploading] = useState(false);
   return (
     <section aria-labelledby="parts">
       <h2 id="parts" className="sr-only">
         Parts list
       </h2>
-      <div className="overflow-x-auto">
+      <div className="@container overflow-x-auto">
         <table className="drawn-table">
           <thead>
             <tr>
-              <th className="w-10">
+              <th className="sticky left-0 z-1 w-10 bg-sheet">
                 <span className="sr-only">number</span>
               </th>
               <th>solid</th>
@@ -52,6 +57,8 @@ export function PartsList({ document, selected, dispatch, unit, faults }: PartsL
                 document={document}
                 dispatch={dispatch}
                 unit={unit}
+                settings={settings}
+                onSettings={onSettings}
                 faults={faultsOf(faults, index)}
               />
             ))}
@@ -93,21 +100,19 @@ function Rows(props: {
   document: TankDocument;
   dispatch: Dispatch<SceneAction>;
   unit: LengthUnit;
+  settings: TankSettings;
+  onSettings(change: TankChange): void;
   faults: readonly FieldFault[];
 }) {
-  const { solid, number, open, document, dispatch, unit, faults } = props;
+  const { solid, number, open, document, dispatch, unit, settings, onSettings, faults } = props;
   const kind = kindOf(solid);
   const at = solid.at ?? [0, 0, 0];
   const turn = solid.turn ?? [0, 0, 0];
-  const sizes = kind
-    .sizes(solid)
-    .map((size) => formatLength(Number(valueAt(solid, size.path)), unit))
-    .join(' × ');
   const choose = () => dispatch({ type: 'select', id: open ? null : solid.id });
   return (
     <>
       <tr className={open ? 'bg-wash' : undefined}>
-        <td>
+        <td className={`sticky left-0 z-1 ${open ? 'bg-wash' : 'bg-sheet'}`}>
           <span
             aria-hidden="true"
             className="grid size-6 place-items-center rounded-full border border-ink text-note font-semibold"
@@ -129,7 +134,7 @@ function Rows(props: {
         </td>
         <td>{solid.role}</td>
         <td>{kind.label}</td>
-        <td className="figure whitespace-nowrap">{sizes || lengthsOf(solid, unit)}</td>
+        <td className="figure min-w-36">{sizesInTheList(solid, unit)}</td>
         <td className="figure whitespace-nowrap">
           {at.map((value) => formatLength(value, unit)).join(', ')}
         </td>
@@ -138,39 +143,44 @@ function Rows(props: {
       {open && (
         <tr>
           <td colSpan={7} className="bg-film">
-            <SolidFields
-              solid={solid}
-              document={document}
-              dispatch={dispatch}
-              unit={unit}
-              faults={faults}
-            />
-            <p className="flex flex-wrap gap-x-4 pt-3">
-              <button
-                type="button"
-                className="act-text"
-                onClick={() => copy(document, dispatch, solid)}
-              >
-                Copy {solid.id}
-              </button>
-              <button
-                type="button"
-                className="act-text"
-                disabled={document.solids.length === 1}
-                onClick={() =>
-                  dispatch({
-                    type: 'edit',
-                    name: `remove ${solid.id}`,
-                    edit: (now) => removeSolid(now, solid.id),
-                  })
-                }
-              >
-                Remove {solid.id}
-              </button>
-              {document.solids.length === 1 && (
-                <span className="label">The last solid stays: a tank needs one.</span>
-              )}
-            </p>
+            {/* as wide as what is seen of the table, and staying there when it is scrolled */}
+            <div className="sticky left-[0.6rem] w-[calc(100cqw-1.2rem)]">
+              <SolidFields
+                solid={solid}
+                document={document}
+                dispatch={dispatch}
+                unit={unit}
+                settings={settings}
+                onSettings={onSettings}
+                faults={faults}
+              />
+              <p className="flex flex-wrap gap-x-4 pt-3">
+                <button
+                  type="button"
+                  className="act-text"
+                  onClick={() => copy(document, dispatch, solid)}
+                >
+                  Copy {solid.id}
+                </button>
+                <button
+                  type="button"
+                  className="act-text"
+                  disabled={document.solids.length === 1}
+                  onClick={() =>
+                    dispatch({
+                      type: 'edit',
+                      name: `remove ${solid.id}`,
+                      edit: (now) => removeSolid(now, solid.id),
+                    })
+                  }
+                >
+                  Remove {solid.id}
+                </button>
+                {document.solids.length === 1 && (
+                  <span className="label">The last solid stays: a tank needs one.</span>
+                )}
+              </p>
+            </div>
           </td>
         </tr>
       )}
@@ -190,15 +200,6 @@ function add(
     select: id,
     edit: (now) => addSolid(now, kind.blank(id)),
   });
-}
-
-/** Lengths along x, y, z of a solid without sizes of its own, once its mesh is here. */
-function lengthsOf(solid: Solid, unit: LengthUnit): string {
-  if (solid.kind === 'mesh' && !hasMesh(solid.upload)) return '';
-  return kindOf(solid)
-    .extent(solid)
-    .map((length) => formatLength(length, unit))
-    .join(' × ');
 }
 
 function copy(document: TankDocument, dispatch: Dispatch<SceneAction>, solid: Solid) {

@@ -1,14 +1,23 @@
 import { useId, useState, type Dispatch } from 'react';
 import type { FieldFault } from '~/domain/errors';
 import type { TankDocument } from '~/domain/tank/document';
-import { valueAt } from '~/domain/tank/value-at';
-import type { Size } from '~/domain/tank/kinds/kind';
 import { kindOf, type Solid } from '~/domain/tank/kinds/registry';
+import type { TankSettings } from '~/domain/tank/settings';
+import type { TankChange } from '~/domain/tank/tank';
 import { formatLength } from '~/domain/units/format-length';
 import type { LengthUnit } from '~/domain/units/length-unit';
-import { changeSolid, renameSolid, setPlace, setRole, setSize, setTurn } from '~/scene/commands';
+import { changeSolid, renameSolid, setPlace, setRole, setTurn } from '~/scene/commands';
 import type { SceneAction } from '~/scene/scene';
-import { parseBetween, parseHeight, parsePlace, parseSize } from './parse-typed';
+import { EdgeFields } from './EdgeFields';
+import { EndFields } from './EndFields';
+import { OwnPlusMinus } from './OwnPlusMinus';
+import { parseBetween, parsePlace } from './parse-typed';
+import { faultAtOf } from './part-faults';
+import { ProfileFields } from './ProfileFields';
+import { ShiftFields } from './ShiftFields';
+import { SizeField } from './SizeField';
+import { StationFields } from './StationFields';
+import { stepOf } from './step-of';
 import { TypedNumber } from './TypedNumber';
 
 interface SolidFieldsProps {
@@ -16,6 +25,8 @@ interface SolidFieldsProps {
   document: TankDocument;
   dispatch: Dispatch<SceneAction>;
   unit: LengthUnit;
+  settings: TankSettings;
+  onSettings(change: TankChange): void;
   /** Pointers relative to the solid: `/height`. */
   faults: readonly FieldFault[];
 }
@@ -23,18 +34,19 @@ interface SolidFieldsProps {
 const axes = ['x', 'y', 'z'] as const;
 
 /** Everything of one solid, typed: name, what it does, sizes, place and turn. */
-export function SolidFields({ solid, document, dispatch, unit, faults }: SolidFieldsProps) {
+export function SolidFields(props: SolidFieldsProps) {
+  const { solid, document, dispatch, unit, settings, onSettings, faults } = props;
   const kind = kindOf(solid);
   const format = (mm: number) => formatLength(mm, unit);
-  const step = unit === 'in' ? 25.4 / 8 : unit === 'cm' ? 10 : 1;
-  const faultAt = (pointer: string) => faults.find((fault) => fault.pointer === pointer)?.detail;
+  const step = stepOf(unit);
+  const faultAt = faultAtOf(faults);
   const whole = faults.filter(({ pointer }) => pointer === '');
   const edit = (name: string, change: (now: TankDocument) => TankDocument) =>
     dispatch({ type: 'edit', name, edit: change });
 
   return (
     <div className="flex flex-wrap items-start gap-x-7 gap-y-3 pt-1">
-      <div className="flex items-start gap-x-4">
+      <div className="flex flex-wrap items-start gap-x-4 gap-y-2">
         <NameField solid={solid} document={document} dispatch={dispatch} />
         <RoleField
           solid={solid}
@@ -52,25 +64,7 @@ export function SolidFields({ solid, document, dispatch, unit, faults }: SolidFi
           />
         )}
       </div>
-      <fieldset className="flex items-start gap-x-3">
-        <legend className="sr-only">Sizes of {solid.id}</legend>
-        {kind.sizes(solid).map((size) => (
-          <TypedNumber
-            key={size.path.join('.')}
-            label={size.label}
-            value={Number(valueAt(solid, size.path))}
-            parse={parserOf(size, unit)}
-            format={format}
-            step={step}
-            fault={faultAt(`/${size.path.join('/')}`)}
-            onValue={(value) =>
-              edit(`${size.label} of ${solid.id}`, (now) =>
-                setSize(now, solid.id, size.path, value),
-              )
-            }
-          />
-        ))}
-      </fieldset>
+      <SizesOf solid={solid} dispatch={dispatch} unit={unit} faultAt={faultAt} />
       <fieldset className="flex items-start gap-x-3">
         <legend className="sr-only">Place of {solid.id}: its lowest corner before turning</legend>
         {axes.map((axis, index) => (
@@ -109,6 +103,7 @@ export function SolidFields({ solid, document, dispatch, unit, faults }: SolidFi
           />
         ))}
       </fieldset>
+      <OwnPlusMinus solid={solid} settings={settings} onSettings={onSettings} unit={unit} />
       {whole.map(({ detail }) => (
         <p key={detail} className="fault basis-full" role="alert">
           {detail}
@@ -118,11 +113,35 @@ export function SolidFields({ solid, document, dispatch, unit, faults }: SolidFi
   );
 }
 
-/** What may be typed for a size: a length, one that may be 0, or a place of either sign. */
-function parserOf({ coordinate, mayBeZero }: Size, unit: LengthUnit) {
-  if (coordinate) return parsePlace(unit);
-  return mayBeZero ? parseHeight(unit) : parseSize(unit);
+/** The sizes that a kind has one by one, and what it is otherwise made of: ends, edges, points. */
+function SizesOf({ solid, ...rest }: Omit<Parameters<typeof SizeField>[0], 'size' | 'label'>) {
+  const sizes = kindOf(solid).sizes(solid);
+  const plain = sizes.filter(({ path }) => !(elsewhere[solid.kind] ?? []).includes(path[0]!));
+  return (
+    <fieldset className="flex min-w-0 flex-wrap items-start gap-x-7 gap-y-3">
+      <legend className="sr-only">Sizes of {solid.id}</legend>
+      <div className="flex flex-wrap items-start gap-x-3 gap-y-2">
+        {plain.map((size) => (
+          <SizeField key={size.path.join('/')} solid={solid} size={size} {...rest} />
+        ))}
+      </div>
+      {solid.kind === 'box' && <EdgeFields solid={solid} {...rest} />}
+      {solid.kind === 'cylinder' && <EndFields solid={solid} {...rest} />}
+      {solid.kind === 'taper' && <ShiftFields solid={solid} {...rest} />}
+      {solid.kind === 'prism' && <ProfileFields solid={solid} {...rest} />}
+      {solid.kind === 'stations' && <StationFields solid={solid} {...rest} />}
+    </fieldset>
+  );
 }
+
+/** Where sizes of a kind are typed in fields of their own, by where they stand in its entry. */
+const elsewhere: Partial<Record<Solid['kind'], readonly string[]>> = {
+  box: ['edges'],
+  cylinder: ['ends'],
+  taper: ['shift'],
+  prism: ['profile'],
+  stations: ['stations'],
+};
 
 function NameField(props: Pick<SolidFieldsProps, 'solid' | 'document' | 'dispatch'>) {
   const { solid, document, dispatch } = props;

@@ -4,6 +4,8 @@ import type { LengthUnit } from '~/domain/units/length-unit';
 import { parseLength } from '~/domain/units/parse-length';
 import type { Parsed } from './TypedNumber';
 
+const greatestPlusMinusMm = 1000;
+
 /** A size: a length above nothing, in mm. */
 export function parseSize(unit: LengthUnit) {
   return (text: string): Parsed => {
@@ -33,6 +35,18 @@ export function parseHeight(unit: LengthUnit) {
     const parsed = parseLength(text, unit);
     if ('refused' in parsed) return parsed;
     return parsed.mm >= 0 ? { value: parsed.mm } : { refused: 'A height is 0 or more.' };
+  };
+}
+
+/** The ± of a size, in mm. */
+export function parsePlusMinus(unit: LengthUnit) {
+  return (text: string): Parsed => {
+    const parsed = parseLength(text.replace(/^\s*±\s*/, ''), unit);
+    if ('refused' in parsed) return parsed;
+    if (parsed.mm < 0) return { refused: 'A ± is 0 or more.' };
+    return parsed.mm <= greatestPlusMinusMm
+      ? { value: parsed.mm }
+      : { refused: `A ± is at most ${formatLengthWithUnit(greatestPlusMinusMm, unit)}.` };
   };
 }
 

@@ -1,7 +1,10 @@
 import { cleanup, fireEvent, render, screen, within } from '@testing-library/react';
 import { afterEach, expect, it } from 'vitest';
 import type { TankDocument } from '~/domain/tank/document';
+import { startingSettings } from '~/domain/tank/complete-settings';
 import { kinds, solidSchema, type Solid } from '~/domain/tank/kinds/registry';
+import { valueAt } from '~/domain/tank/value-at';
+import { formatLength } from '~/domain/units/format-length';
 import { SolidFields } from '~/islands/bench/SolidFields';
 
 afterEach(cleanup);
@@ -18,7 +21,15 @@ function showSolid(solid: Solid) {
     solids: [solid],
   };
   render(
-    <SolidFields solid={solid} document={document} dispatch={() => {}} unit="mm" faults={[]} />,
+    <SolidFields
+      solid={solid}
+      document={document}
+      dispatch={() => {}}
+      unit="mm"
+      settings={startingSettings('diesel')}
+      onSettings={() => {}}
+      faults={[]}
+    />,
   );
   return solid;
 }
@@ -28,7 +39,12 @@ it.each(kinds.map((kind) => [kind.label, kind] as const))(
   (_label, kind) => {
     const solid = show(kind);
     const sizes = within(screen.getByRole('group', { name: 'Sizes of part' }));
-    expect(sizes.getAllByRole('textbox')).toHaveLength(kind.sizes(solid).length);
+    const values = sizes.getAllByRole<HTMLInputElement>('textbox').map(({ value }) => value);
+    const wanted = kind
+      .sizes(solid)
+      .map(({ path }) => formatLength(Number(valueAt(solid, path)), 'mm'));
+    // fields of options that are not set stand empty
+    expect(values.filter((value) => value !== '').sort()).toEqual(wanted.sort());
     const axis = screen.queryByLabelText('axis');
     expect(axis !== null).toBe(kind.axes !== null);
     if (axis === null) return;
@@ -54,7 +70,8 @@ it('offers the sizes of each end of a cylinder, with their values', () => {
   const sizes = within(screen.getByRole('group', { name: 'Sizes of part' }));
   const fields = sizes.getAllByRole<HTMLInputElement>('textbox').map(({ value }) => value);
   expect(fields).toEqual(['500', '1\u202f000', '80', '510', '50']);
-  expect(sizes.getByLabelText<HTMLInputElement>('high end crown').value).toBe('510');
+  const right = within(sizes.getByRole('group', { name: 'right end (high x)' }));
+  expect(right.getByLabelText<HTMLInputElement>('crown').value).toBe('510');
 });
 
 it('takes a place of an outline below 0, and a new value where it stands in the lists', () => {
@@ -72,10 +89,12 @@ it('takes a place of an outline below 0, and a new value where it stands in the 
       document={document}
       dispatch={(action) => action.type === 'edit' && typed.push(action.edit(document))}
       unit="mm"
+      settings={startingSettings('diesel')}
+      onSettings={() => {}}
       faults={[]}
     />,
   );
-  const field = screen.getByLabelText('station 2, 4 y');
+  const field = screen.getByLabelText('station 2, point 4, y');
   fireEvent.change(field, { target: { value: '-333' } });
   fireEvent.keyDown(field, { key: 'Enter' });
   fireEvent.blur(field);
