@@ -13,6 +13,9 @@ import { piecesOf } from './pieces';
 import { publishedFacets } from './published-facets';
 import { refuseUncomputable } from './refuse-uncomputable';
 
+/** Pieces and thin places are told well enough at this fineness, whatever the table is published at. */
+const mostFacets = 256;
+
 /**
  * Why a design may not be issued, one sentence a reason; none when it may. Throws `invalid` when it cannot be
  * computed at all. Refused are a liquid space in pieces; one that is thinner than 0.01 mm, or is parted by
@@ -24,8 +27,8 @@ export async function checkIssuable(document: TankDocument): Promise<string[]> {
   refuseUncomputable(document);
   await loadManifold();
   const solids = placedSolids(document);
-  const space = liquidSpace(solids, publishedFacets(solids));
-  const round = solids.some(({ kind, solid }) => kind.curved(solid));
+  const space = liquidSpace(solids, Math.min(publishedFacets(solids), mostFacets));
+  const round = solids.length > 1 && solids.some(({ kind, solid }) => kind.curved(solid));
   const reasons: string[] = [];
 
   const pieces = piecesOf(space.mesh);

@@ -1,38 +1,58 @@
+import { cutCaps } from '../../geometry/cut-caps';
+import type { PlacedShape } from '../../geometry/placed-shape';
 import { placedShape, type PlacedSolid } from '../tank/placed-solid';
 
-/** Facets to a turn that a table may be published at, finest first. */
-const choices = [512, 256, 128] as const;
+/** Facets to a turn that a table may be published at, finest first; half of each is a multiple of 16 too. */
+const choices = [512, 384, 256, 192, 128] as const;
 
 /**
  * What joining and cutting may cost at the facets chosen, in triangles that go in (about 5 µs each, so a third of
  * a second), and what it may cost when the facets are doubled for the sake of the bound.
  */
 const usualTriangles = 60_000;
-const mostTriangles = 140_000;
+const mostTriangles = 260_000;
 
-/** One solid alone is never joined or cut: its triangles cost a twentieth of that. */
-const aloneTriangles = 100_000;
+/** Beyond this even the coarsest of them would take many seconds (dozens of balls): then coarser still, and the bound says so. */
+const heavyTriangles = 400_000;
+const coarser = [64, 32] as const;
+
+/** A triangle that nothing is joined to or cut from is only swept: it costs a quarter of the others. */
+const sweptShare = 0.25;
 
 /**
  * 2N, the facets to a turn that a table is published at: the finest that takes a fraction of a second. A pair of
- * formed ends has as many triangles at 256 as sixty plain cylinders.
+ * formed ends has as many triangles at 256 as sixty plain cylinders, but counts little where nothing comes near.
  */
 export function publishedFacets(solids: readonly PlacedSolid[]): number {
-  const most = solids.length === 1 ? aloneTriangles : usualTriangles;
-  return choices.find((facets) => cost(solids, facets) <= most) ?? choices.at(-1)!;
+  const usual = choices.find((facets) => cost(solids, facets) <= usualTriangles);
+  if (usual !== undefined) return usual;
+  const last = choices.at(-1)!;
+  if (cost(solids, last) <= heavyTriangles) return last;
+  return coarser.find((facets) => cost(solids, facets) <= heavyTriangles) ?? coarser.at(-1)!;
 }
 
 /** Twice as many where that can be had in a second or so; null where it cannot, or where nothing finer is made. */
 export function doubledFacets(solids: readonly PlacedSolid[], facets: number): number | null {
-  const most = solids.length === 1 ? 3 * aloneTriangles : mostTriangles;
-  return facets < choices[0] && cost(solids, 2 * facets) <= most ? 2 * facets : null;
+  return facets < choices[0] && cost(solids, 2 * facets) <= mostTriangles ? 2 * facets : null;
 }
 
-/** Triangles of all solids; those of a prism count twice, since its long thin ones cross more of the others'. */
 function cost(solids: readonly PlacedSolid[], facets: number): number {
-  return solids.reduce((sum, one) => {
-    // less its wall a solid has about as many as drawn, and what its joints add is not made to be counted
-    const { shape } = placedShape(one.drawn ?? one, facets);
+  // less its wall a solid has about as many as drawn, and what its joints add is not made to be counted
+  const shapes = (role: 'holds' | 'displaces') =>
+    solids
+      .filter(({ solid }) => solid.role === role)
+      .map((one) => placedShape(one.drawn ?? one, facets));
+  const holds = shapes('holds');
+  const displaces = shapes('displaces');
+  const swept = sweptShare * (trianglesOf(holds) + trianglesOf(displaces));
+  if (holds.length === 1 && displaces.length === 0) return swept;
+  const joined = cutCaps(holds, displaces) ?? { holds, displaces };
+  return swept + trianglesOf(joined.holds) + trianglesOf(joined.displaces);
+}
+
+/** Triangles of all shapes; those of a prism count twice, since its long thin ones cross more of the others'. */
+function trianglesOf(shapes: readonly PlacedShape[]): number {
+  return shapes.reduce((sum, { shape }) => {
     if (shape.form === 'mesh') return sum + shape.mesh.triangles.length / 3;
     if (shape.form === 'extrusion') return sum + 8 * shape.outline.length;
     return sum + 2 * shape.profile.length * shape.facets;
