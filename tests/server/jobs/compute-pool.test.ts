@@ -1,4 +1,5 @@
 import { afterAll, describe, expect, it } from 'vitest';
+import type { KeptRow } from '~/domain/table/request';
 import { createComputePool } from '~/server/jobs/compute-pool';
 import { box, cylinder, design, slopedCistern } from '../../domain/table/designs';
 
@@ -15,6 +16,11 @@ const settings = {
   sizePlusMinusMm: 2,
   dipPlusMinusMm: 2,
 } as const;
+
+/** Readings of the rows that were asked for, without those that only look-ups use. */
+function askedFor(rows: readonly KeptRow[]): number[] {
+  return rows.filter(({ betweenRows }) => !betweenRows).map(({ depthMm }) => depthMm);
+}
 
 describe('the compute pool', { timeout: 60_000 }, () => {
   it('computes in a thread while the event loop stays free', async () => {
@@ -38,7 +44,10 @@ describe('the compute pool', { timeout: 60_000 }, () => {
 
   it('issues, and refuses as data that keeps code and pointers', async () => {
     const { rows } = await pool.issue(slopedCistern, settings, 50);
-    expect(rows).toHaveLength(7);
+    expect(askedFor(rows)).toEqual([0, 50, 100, 150, 200, 250, 300]);
+    // the closer row for look-ups stands where the sloped floor ends
+    const closer = rows.filter(({ betweenRows }) => betweenRows);
+    expect(closer.map(({ depthMm }) => depthMm)).toEqual([60]);
     const apart = design([
       box('a', [100, 100, 100]),
       box('b', [100, 100, 100], { at: [300, 0, 0] }),
@@ -99,7 +108,7 @@ describe('the compute pool', { timeout: 60_000 }, () => {
       message: expect.stringMatching(/not ready after 0.005 seconds/),
     });
     const { rows } = await hasty.issue(slopedCistern, settings, 100);
-    expect(rows).toHaveLength(4);
+    expect(askedFor(rows)).toEqual([0, 100, 200, 300]);
     await hasty.close();
     await expect(hasty.table(slopedCistern, { stepMm: 1 })).rejects.toMatchObject({
       code: 'unavailable',
