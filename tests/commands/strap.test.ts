@@ -1,10 +1,10 @@
-import { execFile } from 'node:child_process';
 import { mkdtemp, rm, writeFile } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { ComputedTable } from '~/domain/table/request';
-import { cylinder, design, hull, slopedCistern } from '../domain/table/designs';
+import { slopedCistern } from '../domain/table/designs';
+import { child, type ChildOutcome } from '../support/strap-child';
 
 let folder: string;
 beforeAll(async () => {
@@ -12,77 +12,16 @@ beforeAll(async () => {
 });
 afterAll(() => rm(folder, { recursive: true }));
 
-interface Outcome {
-  exit: number;
-  out: string;
-  err: string;
-}
-
 /** The command as a user runs it, in a process of its own. */
-async function strap(content: unknown, ...options: string[]): Promise<Outcome> {
+async function strap(content: unknown, ...options: string[]): Promise<ChildOutcome> {
   const file = join(folder, 'design.json');
   await writeFile(file, typeof content === 'string' ? content : JSON.stringify(content));
   return run(file, ...options);
 }
 
-function run(...args: string[]): Promise<Outcome> {
+function run(...args: string[]): Promise<ChildOutcome> {
   return child(process.execPath, '--import', 'tsx', 'src/commands/strap.ts', ...args);
 }
-
-function child(program: string, ...args: string[]): Promise<Outcome> {
-  return new Promise((resolve) => {
-    execFile(program, args, (error, out, err) => {
-      resolve({ exit: error ? Number(error.code) : 0, out, err });
-    });
-  });
-}
-
-async function litresAt(content: unknown, ...depths: number[]): Promise<number[]> {
-  const { exit, out, err } = await strap(content, '--at', depths.join(','));
-  expect({ exit, err }).toEqual({ exit: 0, err: '' });
-  return (JSON.parse(out) as ComputedTable).rows.map(({ volumeL }) => volumeL);
-}
-
-describe('worked answers through the command', { timeout: 60_000 }, () => {
-  it('sloped water tank: 4.5, 15.0, 55.5 and 123.0 L', async () => {
-    // by hand: 0.05 h + h²/300 up to 60 mm, then 15 + 0.45 (h − 60)
-    const litres = await litresAt(slopedCistern, 30, 60, 150, 300);
-    expect(litres.map((value) => Math.round(value * 1e6) / 1e6)).toEqual([4.5, 15, 55.5, 123]);
-    // the same shape seen between the stops of a float, 30 and 270 mm: 4.5 L hidden below, 13.5 L above
-    const [low, high, brim] = await litresAt(slopedCistern, 30, 270, 300);
-    expect(low).toBeCloseTo(4.5, 6);
-    expect(brim! - high!).toBeCloseTo(13.5, 6);
-  });
-
-  it('V hull: 0.00072 h² litres', async () => {
-    const depths = [40, 250, 353.6, 372.7, 487.3, 500];
-    const litres = await litresAt(hull, ...depths);
-    depths.forEach((h, i) => expect(litres[i]).toBeCloseTo(0.00072 * h * h, 6));
-    expect(litres[0]).toBeCloseTo(1.15, 2);
-    expect(litres[1]).toBeCloseTo(45, 6);
-    expect(litres[2]).toBeCloseTo(90, 1);
-    expect(litres[3]).toBeCloseTo(100, 1);
-    expect(litres[4]).toBeCloseTo(171, 1);
-    expect(litres[5]).toBeCloseTo(180, 6);
-  });
-
-  it('heating oil, lying cylinder 1200 × 2000: 703 L at 16 4/8 in, limit 2194.1 L at 1117 mm', async () => {
-    const oil = design([cylinder('tank', 1200, 2000)], { stick: { at: [1000, 600] } });
-    const [dip, wrong, limit, reserve, full] = await litresAt(
-      oil,
-      16.5 * 25.4,
-      16.4 * 25.4,
-      1117,
-      141.6,
-      1200,
-    );
-    expect(Math.abs(dip! - 703.5)).toBeLessThan(0.1);
-    expect(Math.abs(wrong! - 697.7)).toBeLessThan(0.1);
-    expect(Math.abs(limit! - 2194.1)).toBeLessThan(1);
-    expect(Math.abs(reserve! - 150)).toBeLessThan(0.1);
-    expect(full).toBeCloseTo(2261.9467, 4);
-  });
-});
 
 describe('the contract of the command', { timeout: 60_000 }, () => {
   it('prints every field, rows from 0 to the top at the step', async () => {
