@@ -36,17 +36,18 @@ export function gluedCaps(mesh: Mesh, caps: readonly CapToGlue[], origin: Vec3):
     mesh.triangles.length + found.reduce((sum, { cap }) => sum + cap.triangles.length, 0),
   );
   let filled = 0;
-  for (let n = 0; n < mesh.triangles.length; n += 1) {
-    if (dropped[(n - (n % 3)) / 3]) continue;
-    triangles[filled] = mesh.triangles[n]!;
-    filled += 1;
+  for (let n = 0; n < mesh.triangles.length; n += 3) {
+    if (dropped[n / 3]) continue;
+    for (let k = 0; k < 3; k += 1) triangles[filled + k] = mesh.triangles[n + k]!;
+    filled += 3;
   }
   let start = mesh.positions.length;
   for (const { cap, shared } of found) {
     positions.set(cap.positions, start);
-    for (const vertex of cap.triangles) {
-      triangles[filled] = shared.get(vertex) ?? start / 3 + vertex;
-      filled += 1;
+    const own = start / 3;
+    for (let n = 0; n < cap.triangles.length; n += 1, filled += 1) {
+      const vertex = cap.triangles[n]!;
+      triangles[filled] = shared[vertex]! < 0 ? own + vertex : shared[vertex]!;
     }
     start += cap.positions.length;
   }
@@ -55,8 +56,8 @@ export function gluedCaps(mesh: Mesh, caps: readonly CapToGlue[], origin: Vec3):
 
 interface Rim {
   cap: Mesh;
-  /** Vertex of the cap → vertex of the mesh, for those that both have. */
-  shared: ReadonlyMap<number, number>;
+  /** By vertex of the cap: the mesh's own vertex where both have it, else −1. */
+  shared: Int32Array;
   /** Triangles of the flat end. */
   end: readonly number[];
 }
@@ -80,11 +81,11 @@ function rimOf(mesh: Mesh, { shape, profile, place }: CapToGlue, origin: Vec3): 
     isOn[vertex] = 1;
     byPlace.set(keyOf(positions, vertex), vertex);
   }
-  const shared = new Map<number, number>();
+  const shared = new Int32Array(cap.positions.length / 3).fill(-1);
   for (let i = first; i < first + shape.facets; i += 1) {
     const vertex = byPlace.get(keyOf(cap.positions, i));
     if (vertex === undefined) return null;
-    shared.set(i, vertex);
+    shared[i] = vertex;
   }
 
   const end: number[] = [];
@@ -106,14 +107,18 @@ function withoutUnused(positions: Float64Array, triangles: Uint32Array): Mesh {
   const place = new Int32Array(positions.length / 3).fill(-1);
   const used = new Float64Array(positions.length);
   let count = 0;
-  const renamed = triangles.map((vertex) => {
+  const renamed = new Uint32Array(triangles.length);
+  for (let n = 0; n < triangles.length; n += 1) {
+    const vertex = triangles[n]!;
     if (place[vertex]! < 0) {
       place[vertex] = count;
-      for (let k = 0; k < 3; k += 1) used[3 * count + k] = positions[3 * vertex + k]!;
+      used[3 * count] = positions[3 * vertex]!;
+      used[3 * count + 1] = positions[3 * vertex + 1]!;
+      used[3 * count + 2] = positions[3 * vertex + 2]!;
       count += 1;
     }
-    return place[vertex]!;
-  });
+    renamed[n] = place[vertex]!;
+  }
   return { positions: used.slice(0, 3 * count), triangles: renamed };
 }
 

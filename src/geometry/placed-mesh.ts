@@ -1,13 +1,19 @@
 import type { Mesh } from './mesh';
-import { toTank, type Placing } from './placing';
+import type { Placing } from './placing';
+import { snap } from './tolerance';
 import type { Vec3 } from './vec3';
 
-/** A mesh of a solid's own frame in the tank's frame moved by −origin, mm. */
+/** A mesh of a solid's own frame in the tank's frame moved by −origin, mm; see toTank, here for many points. */
 export function placedMesh({ positions, triangles }: Mesh, place: Placing, origin: Vec3): Mesh {
   const placed = new Float64Array(positions.length);
-  for (let i = 0; i < placed.length; i += 3) {
-    const point = toTank(place, [positions[i]!, positions[i + 1]!, positions[i + 2]!]);
-    for (let axis = 0; axis < 3; axis += 1) placed[i + axis] = point[axis]! - origin[axis]!;
+  for (let axis = 0; axis < 3; axis += 1) {
+    const [rx, ry, rz] = place.rows[axis]!;
+    const centre = place.centre[axis]!;
+    const from = origin[axis]!;
+    for (let i = 0; i < placed.length; i += 3) {
+      const value = centre + rx * positions[i]! + ry * positions[i + 1]! + rz * positions[i + 2]!;
+      placed[i + axis] = (place.aligned ? snap(value) : value) - from;
+    }
   }
   return { positions: placed, triangles };
 }

@@ -9,7 +9,7 @@ const choices = [512, 384, 256, 192, 128] as const;
  * What joining and cutting may cost at the facets chosen, in triangles that go in (about 5 µs each, so a third of
  * a second), and what it may cost when the facets are doubled for the sake of the bound.
  */
-const usualTriangles = 60_000;
+const usualTriangles = 70_000;
 const mostTriangles = 260_000;
 
 /** Beyond this even the coarsest of them would take many seconds (dozens of balls): then coarser still, and the bound says so. */
