@@ -1,5 +1,7 @@
 import type { TankDocument } from '~/domain/tank/document';
 import type { Solid } from '~/domain/tank/kinds/registry';
+import { solidOutline } from '~/domain/report/solid-outline';
+import { hasMesh } from '~/domain/tank/kinds/mesh/loaded-meshes';
 import { highestLevel, placedSolid } from '~/domain/tank/placed-solid';
 import type { Vec3 } from '~/domain/tank/solid';
 
@@ -16,7 +18,7 @@ export interface SilhouetteDrawing {
 type Point = readonly [number, number];
 interface Outline {
   role: Solid['role'];
-  points: readonly Point[];
+  loops: readonly (readonly Point[])[];
   /** Lowest and highest coordinate along the line of sight. */
   sight: readonly [number, number];
 }
@@ -24,13 +26,14 @@ interface Outline {
 const cells = 24;
 
 /**
- * The small picture of a tank: every solid's outline, from the kinds' support functions (all of them
- * convex). Of a dozen solids or fewer exact for flat faces at whole degrees and within a thousandth of its
- * size otherwise; of more, each small in the picture, within a hundredth.
+ * The small picture of a tank: every solid's true outline. Exact where faces are flat; of a dozen solids or fewer
+ * round ones are within a thousandth of their size, of more, each small in the picture, within a hundredth.
  * Of side and end the one that fills less of its frame, which is the one that tells more; only what
  * is cut right through along the line of sight counts as not filled.
+ * null where a mesh is named that this process has not loaded: a part of a tank would be a false picture.
  */
-export function silhouetteOf(design: TankDocument): SilhouetteDrawing {
+export function silhouetteOf(design: TankDocument): SilhouetteDrawing | null {
+  if (design.solids.some((solid) => solid.kind === 'mesh' && !hasMesh(solid.upload))) return null;
   const key = JSON.stringify(design.solids);
   const known = drawn.get(key);
   if (known) return known;
@@ -51,7 +54,7 @@ function draw(design: TankDocument): SilhouetteDrawing {
   const size = Math.max(frame.width, frame.height);
   const pad = size * 0.03;
   const paths = (role: Solid['role']) =>
-    outlines.filter((o) => o.role === role).map((o) => pathOf(o.points));
+    outlines.filter((o) => o.role === role).map((o) => pathOf(o.loops));
   return {
     viewBox: [frame.minX - pad, frame.minY - pad, frame.width + 2 * pad, frame.height + 2 * pad]
       .map(short)
@@ -76,9 +79,9 @@ interface View {
 
 /** `across`: the axis that runs to the right, 0 = x (from the side), 1 = y (from the end). */
 function view(solids: readonly Solid[], across: 0 | 1): View {
-  const felt = feelers(directionsFor(solids.length), across);
-  const outlines = solids.map((solid) => outlineOf(solid, across, felt));
-  const all = outlines.filter(({ role }) => role === 'holds').flatMap(({ points }) => points);
+  const fineness = finenessFor(solids.length);
+  const outlines = solids.map((solid) => outlineOf(solid, across, fineness));
+  const all = outlines.filter(({ role }) => role === 'holds').flatMap(({ loops }) => loops.flat());
   const xs = all.map(([x]) => x);
   const ys = all.map(([, y]) => y);
   const [minX, minY] = [Math.min(...xs), Math.min(...ys)];
@@ -86,49 +89,20 @@ function view(solids: readonly Solid[], across: 0 | 1): View {
   return { outlines, frame, filled: filledShare(outlines, frame) };
 }
 
-/**
- * Directions in which each solid is felt: right angles and 45° among them, so that boxes stay sharp. Of two
- * hundred solids a picture must still be drawn, and sent, in no time.
- */
-function directionsFor(solids: number): number {
-  return solids <= 12 ? 360 : solids <= 60 ? 72 : 24;
+/** Of two hundred solids a picture must still be drawn, and sent, in no time. */
+function finenessFor(solids: number): { directions: number; facets: number } {
+  if (solids <= 12) return { directions: 360, facets: 64 };
+  return solids <= 60 ? { directions: 72, facets: 32 } : { directions: 24, facets: 16 };
 }
 
-interface Feeler {
-  c: number;
-  s: number;
-  up: Vec3;
-}
-
-function feelers(count: number, across: 0 | 1): Feeler[] {
-  return Array.from({ length: count }, (_, i) => {
-    const angle = (2 * Math.PI * i) / count;
-    const [c, s] = [Math.cos(angle), Math.sin(angle)];
-    return { c, s, up: across === 0 ? [c, 0, s] : [0, c, s] };
-  });
-}
-
-/** Where neighbouring tangents meet: the corners, each once. */
-function outlineOf(solid: Solid, across: 0 | 1, felt: readonly Feeler[]): Outline {
+function outlineOf(solid: Solid, across: 0 | 1, fineness: ReturnType<typeof finenessFor>): Outline {
   const placed = placedSolid(solid);
-  const reaches = felt.map(({ up }) => highestLevel(placed, up));
-  const points: Point[] = [];
-  felt.forEach((a, i) => {
-    const next = (i + 1) % felt.length;
-    const b = felt[next]!;
-    const [reachA, reachB] = [reaches[i]!, reaches[next]!];
-    const det = a.c * b.s - a.s * b.c;
-    const x = (reachA * b.s - reachB * a.s) / det;
-    const z = (a.c * reachB - b.c * reachA) / det;
-    const last = points.at(-1);
-    // y runs down on the drawing
-    if (last === undefined || Math.hypot(last[0] - x, last[1] + z) > 1e-6) points.push([x, -z]);
-  });
   const away: Vec3 = across === 0 ? [0, 1, 0] : [1, 0, 0];
   const towards: Vec3 = across === 0 ? [0, -1, 0] : [-1, 0, 0];
   return {
     role: solid.role,
-    points,
+    // y runs down on the drawing
+    loops: solidOutline(placed, across, fineness).map((loop) => loop.map(([x, y]) => [x, -y])),
     sight: [-highestLevel(placed, towards), highestLevel(placed, away)],
   };
 }
@@ -150,13 +124,14 @@ function filledShare(outlines: readonly Outline[], frame: Frame): number {
 function covered(some: readonly Outline[], { minX, minY, width, height }: Frame): boolean[] {
   const inside = Array.from({ length: cells * cells }, () => false);
   const [stepX, stepY] = [width / cells, height / cells];
-  for (const { points } of some) {
+  for (const { loops } of some) {
+    const points = loops.flat();
     const columns = middlesWithin(points, 0, minX, stepX);
     const rows = middlesWithin(points, 1, minY, stepY);
     for (let row = rows.first; row <= rows.last; row += 1) {
       for (let column = columns.first; column <= columns.last; column += 1) {
         const i = row * cells + column;
-        inside[i] ||= contains(points, [minX + (column + 0.5) * stepX, minY + (row + 0.5) * stepY]);
+        inside[i] ||= contains(loops, [minX + (column + 0.5) * stepX, minY + (row + 0.5) * stepY]);
       }
     }
   }
@@ -171,22 +146,22 @@ function middlesWithin(points: readonly Point[], axis: 0 | 1, from: number, step
   };
 }
 
-/** Whether a convex polygon holds a point, whichever way it turns. */
-function contains(polygon: readonly Point[], [x, y]: Point): boolean {
-  let sign = 0;
-  return polygon.every(([ax, ay], i) => {
-    const [bx, by] = polygon[(i + 1) % polygon.length]!;
-    const turn = Math.sign((bx - ax) * (y - ay) - (by - ay) * (x - ax));
-    if (turn === 0 || sign === 0) {
-      sign ||= turn;
-      return true;
-    }
-    return turn === sign;
-  });
+/** Whether loops that do not cross hold a point: a ray to the right meets them an odd number of times. */
+function contains(loops: readonly (readonly Point[])[], [x, y]: Point): boolean {
+  let inside = false;
+  for (const loop of loops) {
+    loop.forEach(([ax, ay], i) => {
+      const [bx, by] = loop[(i + 1) % loop.length]!;
+      if (ay > y !== by > y && x < ax + ((y - ay) / (by - ay)) * (bx - ax)) inside = !inside;
+    });
+  }
+  return inside;
 }
 
-function pathOf(points: readonly Point[]): string {
-  return `M${points.map(([x, y]) => `${short(x)} ${short(y)}`).join('L')}Z`;
+function pathOf(loops: readonly (readonly Point[])[]): string {
+  const path = (points: readonly Point[]) =>
+    `M${points.map(([x, y]) => `${short(x)} ${short(y)}`).join('L')}Z`;
+  return loops.map(path).join('');
 }
 
 function short(value: number): string {

@@ -13,10 +13,12 @@ export function Silhouette({
   drawing,
   className,
 }: {
-  drawing: SilhouetteDrawing;
+  /** null: the tank is not drawn here, its place stays empty. */
+  drawing: SilhouetteDrawing | null;
   className?: string;
 }) {
   const id = useId();
+  if (drawing === null) return <span className={className} />;
   const { hatchMm: h } = drawing;
   return (
     <svg

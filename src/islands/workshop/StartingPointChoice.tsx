@@ -7,7 +7,7 @@ export interface Shape {
   code: string;
   label: string;
   words: string;
-  drawing: SilhouetteDrawing;
+  drawing: SilhouetteDrawing | null;
 }
 
 /** The shapes to begin from, each drawn from the side. */

@@ -1,10 +1,11 @@
 import { expect, it } from 'vitest';
 import { silhouetteOf } from '~/components/silhouette';
 import type { TankDocument } from '~/domain/tank/document';
+import type { Solid } from '~/domain/tank/kinds/registry';
 import { startingPoints } from '~/domain/tank/starting-points';
 
 const drawn = (code: string) =>
-  silhouetteOf(startingPoints.find((point) => point.code === code)!.design);
+  silhouetteOf(startingPoints.find((point) => point.code === code)!.design)!;
 const corners = (path: string) => path.slice(1, -1).split('L');
 
 it('draws a box from the side by its four corners', () => {
@@ -64,9 +65,95 @@ it('draws two hundred solids in no time and a few kilobytes', () => {
   });
   console.log(`200 solids: ${times.map((ms) => ms.toFixed(1)).join(', ')} ms`);
   expect(Math.min(...times)).toBeLessThan(20);
-  const { holds, viewBox } = silhouetteOf(balls(100));
+  const { holds, viewBox } = silhouetteOf(balls(100))!;
   expect(holds.join('').length).toBeLessThan(100_000);
   // 9 steps of 80 mm, or 18 of 90 mm, and a ball; 3 % of paper on either side
   const [, , width] = viewBox.split(' ').map(Number);
   expect([820, 1720].some((mm) => Math.abs(width! / 1.06 - mm) < 0.01 * mm)).toBe(true);
+});
+
+const tankOf = (...solids: Solid[]): TankDocument => ({
+  format: 'dipwright-tank',
+  version: 1,
+  name: 'Tank',
+  solids,
+});
+
+const uShape: [number, number][] = [
+  [0, 0],
+  [900, 0],
+  [900, 600],
+  [650, 600],
+  [650, 200],
+  [250, 200],
+  [250, 450],
+  [0, 450],
+];
+
+const u = (rest: Partial<Solid> = {}): Solid =>
+  ({ id: 'u', role: 'holds', kind: 'prism', width: 400, profile: uShape, ...rest }) as Solid;
+
+it('draws a U as a U: its eight corners and nothing between the legs', () => {
+  const { holds } = silhouetteOf(tankOf(u()))!;
+  expect(holds).toHaveLength(1);
+  const drawnCorners = corners(holds[0]!).map((p) => p.split(' ').map(Number));
+  expect(drawnCorners).toHaveLength(8);
+  for (const [x, z] of uShape) expect(drawnCorners).toContainEqual([x, -z + 0]);
+});
+
+it('draws a U from its side, which tells more than its end', () => {
+  const [, , width] = silhouetteOf(tankOf(u()))!.viewBox.split(' ').map(Number);
+  expect(width! / 1.06).toBeCloseTo(900, -1);
+  // its end is a full rectangle, also of a U that is as wide as it is long
+  const [, , wide] = silhouetteOf(tankOf(u({ width: 2000 })))!
+    .viewBox.split(' ')
+    .map(Number);
+  expect(wide! / 1.06).toBeCloseTo(900, -1);
+});
+
+it('draws a turned U with the gap that one can see through, and nothing more', () => {
+  // 30° turned, seen from the side: of the gap 400·cos 30° wide, 400·sin 30° are behind the near leg
+  const { holds } = silhouetteOf(tankOf(u({ turn: [0, 0, 30] })))!;
+  const bottom = corners(holds[0]!)
+    .map((p) => p.split(' ').map(Number) as [number, number])
+    .filter(([, y]) => Math.abs(y + 200) < 0.11)
+    .map(([x]) => x)
+    .sort((a, b) => a - b);
+  expect(bottom).toHaveLength(2);
+  expect(bottom[1]! - bottom[0]!).toBeCloseTo(400 * Math.cos(Math.PI / 6) - 200, 0);
+});
+
+it('draws a U that displaces as a U', () => {
+  const body: Solid = {
+    id: 'b',
+    role: 'holds',
+    kind: 'box',
+    length: 1200,
+    width: 400,
+    height: 800,
+  };
+  const { displaces } = silhouetteOf(
+    tankOf(body, u({ role: 'displaces', at: [100, 0, 0] } as Partial<Solid>)),
+  )!;
+  expect(corners(displaces[0]!)).toHaveLength(8);
+});
+
+it('draws nothing of a tank whose mesh is not loaded here', () => {
+  const mesh: Solid = { id: 'm', role: 'holds', kind: 'mesh', upload: 'not-here', scale: 1 };
+  expect(silhouetteOf(tankOf(mesh))).toBeNull();
+});
+
+it('draws two hundred U profiles in no time', () => {
+  // others use the processor too: the best of more shapes never drawn before
+  const times = Array.from({ length: 20 }, (_, k) => 400 + k).map((width) => {
+    const solids = Array.from({ length: 200 }, (_, i) =>
+      u({ id: `u${i}`, width, at: [90 * (i % 20), 0, 80 * Math.floor(i / 20)], turn: [0, 0, i] }),
+    );
+    const design = tankOf(...solids);
+    const start = performance.now();
+    silhouetteOf(design);
+    return performance.now() - start;
+  });
+  console.log(`200 U profiles: ${times.map((ms) => ms.toFixed(1)).join(', ')} ms`);
+  expect(Math.min(...times)).toBeLessThan(50);
 });
