@@ -1,6 +1,8 @@
 import type { TankDocument } from '~/domain/tank/document';
 import { kindOf, type Solid } from '~/domain/tank/kinds/registry';
 
+type Stick = NonNullable<TankDocument['stick']>;
+
 /**
  * What can be done to a design, as pure functions document → document. None of them validates:
  * the bench keeps a document that cannot be computed and says why.
@@ -76,11 +78,19 @@ function keepInTheMiddle(document: TankDocument, before: Solid, after: Solid): T
   for (const axis of [0, 1] as const) {
     const middle = middleOf(after, axis);
     // an outline that is half typed may have no middle
-    if (!Number.isFinite(middle)) continue;
-    if (Math.abs(at[axis] - middleOf(before, axis)) < 1e-6) at[axis] = middle;
+    if (!Number.isFinite(middle) || !standsInTheMiddle(stick, before, axis)) continue;
+    // in the middle of another one as well: which of them it stands for is not known
+    const others = document.solids.filter(({ id, role }) => id !== before.id && role === 'holds');
+    if (others.some((other) => standsInTheMiddle(stick, other, axis))) continue;
+    at[axis] = middle;
   }
   const moved = at[0] !== stick.at[0] || at[1] !== stick.at[1];
   return moved ? setStick(document, { ...stick, at }) : document;
+}
+
+function standsInTheMiddle({ at }: Stick, solid: Solid, axis: 0 | 1): boolean {
+  // a mesh is not resized, and may not be here
+  return solid.kind !== 'mesh' && Math.abs(at[axis] - middleOf(solid, axis)) < 1e-6;
 }
 
 function middleOf(solid: Solid, axis: 0 | 1): number {

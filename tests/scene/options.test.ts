@@ -110,6 +110,12 @@ describe('ends of a cylinder', () => {
     const before = tankOf(blank('cylinder'), { at: [400, 200] });
     // 800 long; a dish of 400/5 at one end moves the middle by 40
     expect(setEndForm(before, 'part', 1, 'dish').stick?.at).toEqual([440, 200]);
+    // but not when it stands in the middle of a box as well: it may be the box's
+    const both = {
+      ...before,
+      solids: [...before.solids, { ...blank('box'), id: 'box', length: 800 }],
+    };
+    expect(setEndForm(both, 'part', 1, 'dish').stick?.at).toEqual([400, 200]);
     expect(solidOf(tellFlatEnds(before, 'part'), 'cylinder').ends).toEqual([
       { form: 'flat' },
       { form: 'flat' },

@@ -2,7 +2,6 @@ import { useId, type Dispatch } from 'react';
 import { kindOf } from '~/domain/tank/kinds/registry';
 import type { Cylinder, End } from '~/domain/tank/kinds/cylinder/schema';
 import type { Size } from '~/domain/tank/kinds/kind';
-import { formatLengthWithUnit } from '~/domain/units/format-length';
 import type { LengthUnit } from '~/domain/units/length-unit';
 import { setEndForm, setEndInward, tellFlatEnds, type Which } from '~/scene/cylinder-ends';
 import type { SceneAction } from '~/scene/scene';
@@ -28,7 +27,7 @@ const forms: readonly { form: End['form']; words: string }[] = [
 
 const flat: End = { form: 'flat' };
 
-/** Both ends of a cylinder: their forms are asked, not assumed; and the length over both. */
+/** Both ends of a cylinder: their forms are asked, not assumed. */
 export function EndFields({ solid, dispatch, unit, faultAt }: EndFieldsProps) {
   const fault = faultAt('/ends');
   return (
@@ -43,7 +42,6 @@ export function EndFields({ solid, dispatch, unit, faultAt }: EndFieldsProps) {
           faultAt={faultAt}
         />
       ))}
-      <p className="label self-center">tip to tip {formatLengthWithUnit(overallOf(solid), unit)}</p>
       {solid.ends === undefined && (
         <p className="basis-full text-note">
           The ends are not told: both count as flat.{' '}
@@ -82,7 +80,7 @@ function OneEnd({ solid, which, dispatch, unit, faultAt }: EndFieldsProps & { wh
     .sizes(solid)
     .filter(({ path }) => path[0] === 'ends' && path[1] === String(which));
   return (
-    <fieldset className="min-w-0 flex-none" aria-describedby={fault ? `${id}-fault` : undefined}>
+    <fieldset className="max-w-full min-w-0" aria-describedby={fault ? `${id}-fault` : undefined}>
       <legend className="sr-only">{name}</legend>
       <div className="flex flex-wrap items-start gap-x-3 gap-y-1">
         <div className="w-44">
@@ -154,8 +152,4 @@ function OneEnd({ solid, which, dispatch, unit, faultAt }: EndFieldsProps & { wh
 /** Beside the end itself its size is plainly "depth". */
 function shortLabel({ path }: Size): string {
   return path.at(-1)!;
-}
-
-function overallOf(solid: Cylinder): number {
-  return kindOf(solid).extent(solid)[{ x: 0, y: 1, z: 2 }[solid.axis ?? 'x'] as 0 | 1 | 2];
 }

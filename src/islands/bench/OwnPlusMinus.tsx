@@ -66,7 +66,7 @@ export function OwnPlusMinus({ solid, settings, onSettings, unit }: OwnPlusMinus
           <legend className="sr-only">Own ± of sizes of {solid.id}</legend>
           <div className="flex flex-wrap items-start gap-x-4 gap-y-2">
             {fields.map(({ key, name, ownMm }) => (
-              <div key={key} className="min-w-24">
+              <div key={key} className={name.length > 12 ? 'w-44' : 'w-24'}>
                 <TypedNumber
                   wide
                   label={`± ${name}`}

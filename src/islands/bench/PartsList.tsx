@@ -59,7 +59,7 @@ export function PartsList(props: PartsListProps) {
                 unit={unit}
                 settings={settings}
                 onSettings={onSettings}
-                faults={faultsOf(faults, index)}
+                faults={faultsOf(faults, index, solid.id)}
               />
             ))}
           </tbody>
@@ -108,6 +108,7 @@ function Rows(props: {
   const kind = kindOf(solid);
   const at = solid.at ?? [0, 0, 0];
   const turn = solid.turn ?? [0, 0, 0];
+  const sizes = sizesInTheList(solid, unit);
   const choose = () => dispatch({ type: 'select', id: open ? null : solid.id });
   return (
     <>
@@ -134,7 +135,9 @@ function Rows(props: {
         </td>
         <td>{solid.role}</td>
         <td>{kind.label}</td>
-        <td className="figure min-w-36">{sizesInTheList(solid, unit)}</td>
+        <td className={`figure ${sizes.length > 32 ? 'min-w-64' : 'whitespace-nowrap'}`}>
+          {sizes}
+        </td>
         <td className="figure whitespace-nowrap">
           {at.map((value) => formatLength(value, unit)).join(', ')}
         </td>
@@ -215,12 +218,20 @@ function copy(document: TankDocument, dispatch: Dispatch<SceneAction>, solid: So
   });
 }
 
-function faultsOf(faults: readonly FieldFault[], index: number): FieldFault[] {
+/** Faults of one solid, to be said beside its fields: without the words that lead there. */
+function faultsOf(faults: readonly FieldFault[], index: number, id: string): FieldFault[] {
   const start = `/solids/${index}`;
   return faults
     .filter(({ pointer }) => pointer === start || pointer.startsWith(`${start}/`))
     .map(({ pointer, detail }) => ({
       pointer: pointer.slice(start.length),
-      detail,
+      detail: besideField(detail, `Solid "${id}"`),
     }));
+}
+
+/** `Solid "hull", profile, number 3: a radius …` → `A radius …` */
+function besideField(detail: string, named: string): string {
+  if (!detail.startsWith(named)) return detail;
+  const [, sentence] = /^(?:, [^:]*)?: (.+)$/s.exec(detail.slice(named.length)) ?? [];
+  return sentence ? sentence.charAt(0).toUpperCase() + sentence.slice(1) : detail;
 }

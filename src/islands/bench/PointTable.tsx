@@ -105,7 +105,7 @@ export function PointTable(props: PointTableProps) {
               <span className="sr-only">point</span>
             </th>
             {columns.map(({ label }) => (
-              <th key={label} className="figure px-2!">
+              <th key={label} className="figure px-1.5!">
                 {label}
               </th>
             ))}
@@ -134,10 +134,10 @@ export function PointTable(props: PointTableProps) {
                     const value = values[column] ?? null;
                     const faulty = faults.some((fault) => fault.column === column);
                     return (
-                      <td key={label} className="border-b-hair! px-2! py-0!">
+                      <td key={label} className="border-b-hair! px-1.5! py-0!">
                         <input
                           data-cell={key}
-                          className="typed min-h-7! w-18! border-b-transparent! py-0! text-right"
+                          className="typed min-h-7! w-16! border-b-transparent! py-0! text-right"
                           aria-label={`${name}, ${point}, ${label}`}
                           inputMode="text"
                           autoComplete="off"

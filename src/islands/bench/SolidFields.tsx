@@ -18,6 +18,7 @@ import { ShiftFields } from './ShiftFields';
 import { SizeField } from './SizeField';
 import { StationFields } from './StationFields';
 import { stepOf } from './step-of';
+import { TipToTip } from './TipToTip';
 import { TypedNumber } from './TypedNumber';
 
 interface SolidFieldsProps {
@@ -120,11 +121,14 @@ function SizesOf({ solid, ...rest }: Omit<Parameters<typeof SizeField>[0], 'size
   return (
     <fieldset className="flex min-w-0 flex-wrap items-start gap-x-7 gap-y-3">
       <legend className="sr-only">Sizes of {solid.id}</legend>
-      <div className="flex flex-wrap items-start gap-x-3 gap-y-2">
-        {plain.map((size) => (
-          <SizeField key={size.path.join('/')} solid={solid} size={size} {...rest} />
-        ))}
-      </div>
+      {plain.length > 0 && (
+        <div className="flex flex-wrap items-start gap-x-3 gap-y-2">
+          {plain.map((size) => (
+            <SizeField key={size.path.join('/')} solid={solid} size={size} {...rest} />
+          ))}
+          {solid.kind === 'cylinder' && <TipToTip solid={solid} unit={rest.unit} />}
+        </div>
+      )}
       {solid.kind === 'box' && <EdgeFields solid={solid} {...rest} />}
       {solid.kind === 'cylinder' && <EndFields solid={solid} {...rest} />}
       {solid.kind === 'taper' && <ShiftFields solid={solid} {...rest} />}

@@ -40,7 +40,9 @@ it('gives a chosen form usual sizes, types them, turns it inward, and says the l
     { form: 'ellipsoid', depth: 125 },
     { form: 'ellipsoid', depth: 125 },
   ]);
-  expect(screen.getByText(/^tip to tip/).textContent).toBe('tip to tip 1\u202f250\u00a0mm');
+  expect(screen.getByText(/tip to tip/).textContent).toBe(
+    'straight, tip to tip 1\u202f250\u00a0mm',
+  );
 
   const right = end('right end (high x)');
   type(right.getByLabelText('depth'), '9 cm');
@@ -50,7 +52,9 @@ it('gives a chosen form usual sizes, types them, turns it inward, and says the l
     depth: 90,
     inward: true,
   });
-  expect(screen.getByText(/^tip to tip/).textContent).toBe('tip to tip 1\u202f125\u00a0mm');
+  expect(screen.getByText(/tip to tip/).textContent).toBe(
+    'straight, tip to tip 1\u202f125\u00a0mm',
+  );
   expect(bench.undoNames().at(-1)).toBe('right end (high x) of part inward');
 });
 
