@@ -1,4 +1,5 @@
 import fc from 'fast-check';
+import { strainedTank } from './strained-tanks';
 import { plainTank, type PlainDesign } from './plain-tanks';
 
 /** Values that have no business in a design, or only just. */
@@ -26,7 +27,7 @@ const odd = fc.constantFrom<unknown>(
 );
 
 /** The text of a design that somebody broke: one to four fields changed, dropped or added, or the text cut. */
-export const brokenDesign: fc.Arbitrary<string> = fc
+const careless: fc.Arbitrary<string> = fc
   .record({
     tank: plainTank(4),
     breaks: fc.array(
@@ -50,11 +51,7 @@ export const brokenDesign: fc.Arbitrary<string> = fc
           { at: [100, 50], zero: -50 },
         ),
         outlet: fc.constantFrom<PlainDesign['outlet']>([0, 0, 0], [100, 100, 100], [-1e5, 0, 0]),
-        wall: fc.constantFrom(
-          { thickness: 5, sizes: 'outside' },
-          { thickness: 400, sizes: 'outside' },
-          { thickness: 0, sizes: 'inside' },
-        ),
+        wall: fc.constantFrom({ thickness: 0, sizes: 'inside' }, { thickness: -1, sizes: 'out' }),
       },
       { requiredKeys: [] },
     ),
@@ -78,6 +75,12 @@ export const brokenDesign: fc.Arbitrary<string> = fc
     const text = JSON.stringify(design);
     return text.slice(0, Math.round(cut * text.length));
   });
+
+/** The text of a design gone wrong: half of them by carelessness, half strained within what the schema takes. */
+export const brokenDesign: fc.Arbitrary<string> = fc.oneof(
+  careless,
+  strainedTank.map((tank) => JSON.stringify(tank)),
+);
 
 interface Place {
   holder: object;

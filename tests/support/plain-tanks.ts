@@ -1,4 +1,5 @@
 import fc from 'fast-check';
+import { between } from './between';
 import type { PlainSolid } from './membership';
 
 /** Designs as plain JSON, for properties and for what the command makes of anything. mm, degrees. */
@@ -14,7 +15,6 @@ export interface PlainDesign {
   wall?: { thickness: number; sizes: string };
 }
 
-const between = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 const size = between(80, 700);
 const axis = fc.constantFrom('x', 'y', 'z');
 
