@@ -28,8 +28,8 @@ function plate(n: number, thick: number): Mesh {
   return { positions: Float64Array.from(positions), triangles: Uint32Array.from(triangles) };
 }
 
-it('a plate in 80 000 triangles is thin or not, as one in 12', () => {
-  for (const n of [1, 200]) {
+it('a plate in 7 000 triangles is thin or not, as one in 12', () => {
+  for (const n of [1, 60]) {
     expect(thinPlace(plate(n, 0.005), 0.01)).toMatchObject({ what: 'film', gapMm: 0.005 });
     expect(thinPlace(plate(n, 0.02), 0.01)).toBeNull();
   }

@@ -6,7 +6,6 @@ import type { ComputedTable } from '~/domain/table/request';
 import { startingSettings } from '~/domain/tank/complete-settings';
 import type { TankDocument } from '~/domain/tank/document';
 import { hasMesh, loadedMesh, provideMesh } from '~/domain/tank/kinds/mesh/loaded-meshes';
-import { mesh as meshKind } from '~/domain/tank/kinds/mesh/mesh';
 import { namedMeshes } from '~/domain/tank/kinds/mesh/named-meshes';
 import type { Solid } from '~/domain/tank/kinds/registry';
 import { parseDesign } from '~/domain/tank/parse-design';
@@ -17,11 +16,9 @@ import {
   asBinaryStl,
   asObj,
   boxMesh,
-  fineBall,
   together,
   turnedOver,
 } from '../../../geometry/mesh-import/mesh-files';
-import { cpuSeconds } from '../../../geometry/mesh-import/cpu-seconds';
 
 const meshSolid = (upload: string, rest: Partial<Solid> = {}): Solid =>
   ({ id: 'shell', role: 'holds', kind: 'mesh', upload, ...rest }) as Solid;
@@ -329,55 +326,4 @@ it('a preview may be handed to another thread, and the next one is computed all 
     ]);
     structuredClone(transfer, { transfer });
   }
-});
-
-describe('half a million triangles', () => {
-  const ball = fineBall(500);
-  const document = tank([meshSolid('ball')], { stick: { at: [1000, 1000] } });
-
-  it('a table of 400 rows, and a preview', async () => {
-    provideMesh('ball', ball);
-    let table = null as ComputedTable | null;
-    const seconds = await cpuSeconds(async () => {
-      table = await computeTable(document, { stepMm: 5 });
-    });
-    const previewSeconds = await cpuSeconds(() => computePreview(document));
-    console.log(
-      `499 000 triangles: table of 401 rows ${seconds.toFixed(2)} s, preview ${previewSeconds.toFixed(2)} s`,
-    );
-    // inscribed in a ball of 1 m radius: 2/3·π²/n² of it is lost along meridians and as much again around
-    expect(table!.capacityL / ((4 / 3) * Math.PI * 1e3)).toBeCloseTo(1, 3);
-    expect(table!.capacityL).toBeLessThan((4 / 3) * Math.PI * 1e3);
-    expect(table!.heightMm).toBeCloseTo(2000, 3);
-    expect(table!.rows[200]!.volumeL / table!.capacityL).toBeCloseTo(0.5, 9);
-    expect(seconds).toBeLessThan(5);
-  });
-
-  it('joined with a box, in an attitude', async () => {
-    provideMesh('ball', ball);
-    const joined = tank([meshSolid('ball'), boxSolid({ at: [1500, 750, 900] })], {
-      attitude: { pitch: 3, roll: 1 },
-    });
-    const seconds = await cpuSeconds(() => computeTable(joined, { stepMm: 5 }));
-    console.log(`499 000 triangles joined with a box: table of 401 rows ${seconds.toFixed(2)} s`);
-    expect(seconds).toBeLessThan(10);
-  });
-
-  it('several hundred lines', async () => {
-    provideMesh('ball', ball);
-    const solid = meshSolid('ball') as Extract<Solid, { kind: 'mesh' }>;
-    let inside = 0;
-    const seconds = await cpuSeconds(() => {
-      for (let i = 0; i < 1000; i += 1) {
-        const [x, y] = [((i % 40) - 19.5) * 49, (Math.floor(i / 40) - 12) * 70];
-        const chords = meshKind.chords(solid, { origin: [x, y, 0], direction: [0, 0, 1] }, 2e-6);
-        for (const { from, to } of chords)
-          inside += (to - from) / 2 / Math.sqrt(1e6 - x * x - y * y);
-        expect(chords.length).toBe(Math.hypot(x, y) < 1000 ? 1 : 0);
-      }
-    });
-    console.log(`1000 lines through 499 000 triangles: ${seconds.toFixed(2)} s`);
-    expect(inside).toBeGreaterThan(700);
-    expect(seconds).toBeLessThan(3);
-  });
 });
