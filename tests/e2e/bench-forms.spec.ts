@@ -1,3 +1,4 @@
+import AxeBuilder from '@axe-core/playwright';
 import { expect, test, type Locator, type Page } from '@playwright/test';
 import { signInAs } from './people';
 import { typeSizes, typeValue, untilSaved } from './type-size';
@@ -78,6 +79,26 @@ test('at 360 px the list scrolls inside itself and the fields stay on the screen
     expect(box.x + box.width).toBeLessThanOrEqual(360);
   }
 });
+
+for (const kind of ['cylinder', 'taper', 'prism', 'stations']) {
+  test(`the fields of a ${kind} have no violation that axe can find`, async ({ page }) => {
+    await bareTank(page, `Axe ${kind}`, kind);
+    if (kind === 'cylinder') {
+      await page
+        .getByRole('combobox', { name: 'left end (low x)' })
+        .selectOption('dished (ball cap)');
+    }
+    await page.getByRole('button', { name: 'Give a size its own ±' }).click();
+    for (const colorScheme of ['light', 'dark'] as const) {
+      await page.emulateMedia({ colorScheme });
+      const { violations } = await new AxeBuilder({ page })
+        .withTags(['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice'])
+        .analyze();
+      const said = violations.flatMap(({ id, nodes }) => nodes.map(({ html }) => `${id}: ${html}`));
+      expect(said).toEqual([]);
+    }
+  });
+}
 
 /** A tank whose only solid is a new one of a kind: the box that a plain tank begins with is taken away. */
 async function bareTank(page: Page, name: string, kind: string): Promise<void> {
