@@ -1,5 +1,6 @@
 import { cutCaps } from '../../geometry/cut-caps';
 import type { PlacedShape } from '../../geometry/placed-shape';
+import { isJoints } from '../tank/joints';
 import { placedShape, type PlacedSolid } from '../tank/placed-solid';
 
 /** Facets to a turn that a table may be published at, finest first; half of each is a multiple of 16 too. */
@@ -9,15 +10,18 @@ const choices = [512, 384, 256, 192, 128] as const;
  * What joining and cutting may cost at the facets chosen, in triangles that go in (about 5 µs each, so a third of
  * a second), and what it may cost when the facets are doubled for the sake of the bound.
  */
-const usualTriangles = 70_000;
+const usualTriangles = 75_000;
 const mostTriangles = 260_000;
 
 /** Beyond this even the coarsest of them would take many seconds (dozens of balls): then coarser still, and the bound says so. */
 const heavyTriangles = 400_000;
 const coarser = [64, 32] as const;
 
-/** A triangle that nothing is joined to or cut from is only swept: it costs a quarter of the others. */
-const sweptShare = 0.25;
+/** A triangle that nothing is joined to or cut from is only swept: it costs a third of the others. */
+const sweptShare = 0.3;
+
+/** Where the wall is taken off joined solids each triangle near a joint is offset, joined and cut: so much dearer. */
+const jointsShare = 4;
 
 /**
  * 2N, the facets to a turn that a table is published at: the finest that takes a fraction of a second. A pair of
@@ -47,7 +51,8 @@ function cost(solids: readonly PlacedSolid[], facets: number): number {
   const swept = sweptShare * (trianglesOf(holds) + trianglesOf(displaces));
   if (holds.length === 1 && displaces.length === 0) return swept;
   const joined = cutCaps(holds, displaces) ?? { holds, displaces };
-  return swept + trianglesOf(joined.holds) + trianglesOf(joined.displaces);
+  const share = solids.some(isJoints) ? jointsShare : 1;
+  return swept + share * (trianglesOf(joined.holds) + trianglesOf(joined.displaces));
 }
 
 /** Triangles of all shapes; those of a prism count twice, since its long thin ones cross more of the others'. */

@@ -111,6 +111,11 @@ export function joints(
   return { solid: { ...drawn[0]!.solid, id: '' }, kind, place, drawn: drawn[0]! };
 }
 
+/** Whether a solid is what joints() made. */
+export function isJoints({ solid }: PlacedSolid): boolean {
+  return solid.id === '';
+}
+
 function boundsOf(one: PlacedSolid): Bounds {
   const reach = (direction: Vec3) => highestLevel(one, direction);
   return {
