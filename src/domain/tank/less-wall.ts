@@ -21,6 +21,8 @@ const lookUpFacetsTwice = 96;
  */
 export function lessWall(drawn: PlacedSolid, wallMm: number): PlacedSolid | null {
   const { kind, solid, place } = drawn;
+  // a ball of the wall's thickness about what is left reaches from face to face of the solid's box
+  if (2 * wallMm > Math.min(...kind.extent(solid))) return null;
   const left = kind.eroded?.(solid, wallMm);
   if (left === null) return null;
   if (left) {
