@@ -1,5 +1,6 @@
 import { loadManifold } from '../../geometry/manifold';
 import { shifted } from '../../geometry/mesh';
+import { extremes } from '../table/extremes';
 import { liquidSpace } from '../table/liquid-space';
 import { readingFrame } from '../table/reading-frame';
 import { refuseUncomputable } from '../table/refuse-uncomputable';
@@ -8,6 +9,12 @@ import type { TankDocument } from '../tank/document';
 import type { PlacedSolid } from '../tank/placed-solid';
 import { placedSolids } from '../tank/placed-solids';
 import { sketchOf, type Sketch } from './sketch';
+
+const axes = [
+  [1, 0, 0],
+  [0, 1, 0],
+  [0, 0, 1],
+] as const;
 
 /**
  * The sketch that a print shows of a design, mm, drawn in the tank's own frame. The mesh serves the eye only:
@@ -21,7 +28,9 @@ export async function sketchDesign(document: TankDocument): Promise<Sketch> {
   const space = liquidSpace(solids, facetsFor(solids));
   const { mesh, origin } = space;
   const frame = readingFrame(document, solids, space);
-  return sketchOf(shifted(mesh, origin), frame, stickNotices(solids, space, frame));
+  const [x, y, z] = axes.map((axis) => extremes(solids, space, axis));
+  const extent = { low: [x![0], y![0], z![0]], high: [x![1], y![1], z![1]] } as const;
+  return sketchOf(shifted(mesh, origin), frame, stickNotices(solids, space, frame), extent);
 }
 
 /**

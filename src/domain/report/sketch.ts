@@ -1,4 +1,4 @@
-import type { ReadingFrame, TankMesh } from '../table/preview';
+import type { Preview, ReadingFrame, TankMesh } from '../table/preview';
 import type { StickNotice } from '../table/stick-notice';
 import { elevation, type Elevation, type View } from './elevation';
 
@@ -20,17 +20,24 @@ export interface Sketch {
 /**
  * The sketch of a tank from its mesh: of the two elevations (from the side, along y; from the end,
  * along −x) the one that says more, which is the one that fills less of its frame.
- * Drawn in the tank's own frame, as if level.
+ * Drawn in the tank's own frame, as if level. `extent`: the space's true overall sizes; left out, those of the mesh.
  */
 export function sketchOf(
   space: TankMesh,
   frame: ReadingFrame,
   stickNotices: readonly StickNotice[] = [],
+  extent: Preview['extent'] | null = null,
 ): Sketch {
   const side = elevation(space, 'side');
   const end = elevation(space, 'end');
   const chosen = end.filled < side.filled - 0.02 ? end : side;
-  return { ...fromElevation(chosen, frame), stickNotices };
+  return { ...fromElevation(extent ? inExtent(chosen, extent) : chosen, frame), stickNotices };
+}
+
+/** Overall sizes as they are: the corners of a mesh stand a little outside a round surface. */
+function inExtent(view: Elevation, { low, high }: Preview['extent']): Elevation {
+  const across = view.view === 'side' ? 0 : 1;
+  return { ...view, minX: low[across], maxX: high[across], minY: low[2], maxY: high[2] };
 }
 
 function fromElevation(view: Elevation, frame: ReadingFrame): Omit<Sketch, 'stickNotices'> {

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { sketchDesign } from '~/domain/report/sketch-design';
-import { box, design, slopedCistern } from '../table/designs';
+import { box, cylinder, design, slopedCistern } from '../table/designs';
 
 const balls = (count: number) =>
   design(
@@ -45,4 +45,14 @@ describe('the sketch of a design', () => {
     expect(lines.length).toBeGreaterThan(50);
     expect(seconds).toBeLessThan(20);
   }, 40_000);
+});
+
+it('tells the overall sizes of round tanks as they are, not as their chords stand', async () => {
+  const ball = await sketchDesign(
+    design([{ id: 'ball', role: 'holds', kind: 'sphere', diameter: 400 }]),
+  );
+  expect([ball.widthMm, ball.heightMm]).toEqual([400, 400]);
+  const barrel = await sketchDesign(design([cylinder('barrel', 600, 900)]));
+  // seen from its end: a circle says more than a rectangle
+  expect([barrel.view, barrel.widthMm, barrel.heightMm]).toEqual(['end', 600, 600]);
 });
