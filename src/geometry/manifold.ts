@@ -105,6 +105,12 @@ export function spaceOf(
   return joinedSpace(holds, displaces, origin);
 }
 
+/**
+ * So many solids that displace are taken away one after another: where they cross each other outside of all that holds,
+ * joining them first can take twenty times as long.
+ */
+const mostOneByOne = 12;
+
 function joinedSpace(
   holds: readonly PlacedShape[],
   displaces: readonly PlacedShape[],
@@ -118,7 +124,10 @@ function joinedSpace(
   };
   try {
     let space = joined(holds);
-    if (displaces.length > 0) space = keep(Manifold.difference(space, joined(displaces)));
+    if (displaces.length <= mostOneByOne) {
+      for (const one of displaces)
+        space = keep(Manifold.difference(space, keep(make(one, origin))));
+    } else space = keep(Manifold.difference(space, joined(displaces)));
     return read(space);
   } finally {
     for (const one of bin) one.delete();

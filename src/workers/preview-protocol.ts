@@ -20,7 +20,7 @@ export type PreviewRequest = {
 
 /** Worker → page: one reply a request that was computed; superseded ones are never answered. */
 export type PreviewReply = { number: number } & (
-  | { preview: Preview }
+  | { preview: Preview; tookMs: number }
   | { plusMinus: PlusMinus }
   | { refusal: { code: ErrorCode; message: string; faults: readonly FieldFault[] } }
 );

@@ -24,8 +24,10 @@ const take = latestWins<PreviewRequest>(async (request) => {
       scope.postMessage({ number, plusMinus });
       return;
     }
+    const start = performance.now();
     const preview = await computePreview(design);
-    scope.postMessage({ number, preview }, buffersOf(preview));
+    const tookMs = performance.now() - start;
+    scope.postMessage({ number, preview, tookMs }, buffersOf(preview));
   } catch (error) {
     scope.postMessage({ number, refusal: refusalOf(error) });
   }

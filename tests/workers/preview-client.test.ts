@@ -25,8 +25,8 @@ describe('the preview client', () => {
     const second = client.compute(slopedCistern);
     expect(await first).toBeNull();
     // a late answer to the first is not taken for the second's
-    reply({ number: sent[0]!.number, preview: { capacityL: 1 } as Preview });
-    reply({ number: sent[1]!.number, preview: { capacityL: 2 } as Preview });
+    reply({ number: sent[0]!.number, preview: { capacityL: 1 } as Preview, tookMs: 1 });
+    reply({ number: sent[1]!.number, preview: { capacityL: 2 } as Preview, tookMs: 1 });
     expect((await second)?.capacityL).toBe(2);
   });
 

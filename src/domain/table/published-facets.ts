@@ -52,7 +52,33 @@ function cost(solids: readonly PlacedSolid[], facets: number): number {
   if (holds.length === 1 && displaces.length === 0) return swept;
   const joined = cutCaps(holds, displaces) ?? { holds, displaces };
   const share = solids.some(isJoints) ? jointsShare : 1;
-  return swept + share * (trianglesOf(joined.holds) + trianglesOf(joined.displaces));
+  const all = [...joined.holds, ...joined.displaces];
+  return swept + share * (trianglesOf(all) + crossings(all));
+}
+
+/**
+ * What long thin faces that stand askew cost, in triangles: the library looks for crossings by upright boxes, and the
+ * boxes of such faces meet nearly all others. Measured: about 1.5 µs for two of them, 0.15 µs for one and a small one.
+ */
+function crossings(shapes: readonly PlacedShape[]): number {
+  const counts = shapes.map((one) => ({ strips: stripsOf(one), all: trianglesOf([one]) }));
+  return counts.reduce(
+    (sum, one, i) =>
+      sum +
+      counts.slice(0, i).reduce((of, other) => {
+        const mixed =
+          one.strips * (other.all - other.strips) + other.strips * (one.all - one.strips);
+        return of + 0.3 * one.strips * other.strips + 0.03 * mixed;
+      }, 0),
+    0,
+  );
+}
+
+/** Faces as long as the solid and as narrow as a facet, where it is turned by other than right angles. */
+function stripsOf({ shape, place }: PlacedShape): number {
+  if (place.aligned) return 0;
+  if (shape.form === 'extrusion') return shape.outline.length > 16 ? 2 * shape.outline.length : 0;
+  return shape.form === 'revolution' && shape.profile.length <= 6 ? 2 * shape.facets : 0;
 }
 
 /** Triangles of all shapes; those of a prism count twice, since its long thin ones cross more of the others'. */
