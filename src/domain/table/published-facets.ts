@@ -20,15 +20,18 @@ const coarser = [64, 32] as const;
 /** A triangle that nothing is joined to or cut from is only swept: it costs a third of the others. */
 const sweptShare = 0.3;
 
-/** Where the wall is taken off joined solids each triangle near a joint is offset, joined and cut: so much dearer. */
-const jointsShare = 4;
+/** Where the wall is taken off as a mesh each triangle is offset, joined and cut: so much dearer. */
+const offsetShare = 4;
 
 /**
  * 2N, the facets to a turn that a table is published at: the finest that takes a fraction of a second. A pair of
  * formed ends has as many triangles at 256 as sixty plain cylinders, but counts little where nothing comes near.
  */
 export function publishedFacets(solids: readonly PlacedSolid[]): number {
-  const usual = choices.find((facets) => cost(solids, facets) <= usualTriangles);
+  const finest = solids.some(isOffsetMesh) ? finestOffset(solids) : choices[0];
+  const usual = choices.find(
+    (facets) => facets <= finest && cost(solids, facets) <= usualTriangles,
+  );
   if (usual !== undefined) return usual;
   const last = choices.at(-1)!;
   if (cost(solids, last) <= heavyTriangles) return last;
@@ -37,7 +40,20 @@ export function publishedFacets(solids: readonly PlacedSolid[]): number {
 
 /** Twice as many where that can be had in a second or so; null where it cannot, or where nothing finer is made. */
 export function doubledFacets(solids: readonly PlacedSolid[], facets: number): number | null {
+  if (solids.some(isOffsetMesh)) return null;
   return facets < choices[0] && cost(solids, 2 * facets) <= mostTriangles ? 2 * facets : null;
+}
+
+/** A joint of solids with outside sizes, or a solid without a closed form inside its wall (a hull by its stations). */
+function isOffsetMesh(one: PlacedSolid): boolean {
+  if (isJoints(one)) return true;
+  if (!one.drawn || one.kind === one.drawn.kind) return false;
+  return placedShape(one.drawn, choices.at(-1)!).shape.form === 'mesh';
+}
+
+/** The offset of bent surfaces grows dearer than its triangles tell: ten seconds at 256 for a hull and an egg. */
+function finestOffset(solids: readonly PlacedSolid[]): number {
+  return solids.some(({ kind, solid }) => kind.curved(solid) === 'twice') ? 128 : 256;
 }
 
 function cost(solids: readonly PlacedSolid[], facets: number): number {
@@ -51,7 +67,7 @@ function cost(solids: readonly PlacedSolid[], facets: number): number {
   const swept = sweptShare * (trianglesOf(holds) + trianglesOf(displaces));
   if (holds.length === 1 && displaces.length === 0) return swept;
   const joined = cutCaps(holds, displaces) ?? { holds, displaces };
-  const share = solids.some(isJoints) ? jointsShare : 1;
+  const share = solids.some(isOffsetMesh) ? offsetShare : 1;
   const all = [...joined.holds, ...joined.displaces];
   return swept + share * (trianglesOf(all) + crossings(all));
 }
