@@ -14,8 +14,9 @@ import { toTank } from './placing';
 import { prismMesh } from './prism-mesh';
 import { revolvedMesh } from './revolved-mesh';
 import { axisOrder, type Axis, type Shape, type Vec2 } from './shape';
+import type { Bounds } from './shape-bounds';
 import type { Vec3 } from './vec3';
-import type { Bounds, WallPiece } from './wall-pieces';
+import type { WallPiece } from './wall-pieces';
 
 /**
  * The only file that knows manifold-3d. Booleans of closed meshes; everything it hands out is plain

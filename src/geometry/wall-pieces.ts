@@ -2,15 +2,10 @@ import { flatFaces } from './flat-faces';
 import type { Mesh } from './mesh';
 import { fanAt, seamPiece } from './seam-piece';
 import { seamRuns } from './seam-runs';
+import type { Bounds } from './shape-bounds';
 import { shellPiece } from './shell-piece';
 import { unionFind } from './union-find';
 import { along, cross, dot, type Vec3 } from './vec3';
-
-/** An upright box of the mesh's frame, mm. */
-export interface Bounds {
-  low: Vec3;
-  high: Vec3;
-}
 
 /** An edge flatter than this is the rounding of places: whichever way it bends, its faces are offset together. Radians */
 const flat = 1e-4;
