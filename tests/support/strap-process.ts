@@ -53,7 +53,7 @@ async function answered(
 }
 
 async function started(): Promise<ChildProcess> {
-  const file = fileURLToPath(new URL('./strap-child.mjs', import.meta.url));
+  const file = fileURLToPath(new URL('./strap-answers.mjs', import.meta.url));
   const child = fork(file, {
     execArgv: ['--import', 'tsx'],
     stdio: ['ignore', 'inherit', 'inherit', 'ipc'],
