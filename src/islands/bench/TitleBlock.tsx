@@ -46,7 +46,7 @@ export function TitleBlock(props: TitleBlockProps) {
   const tilt = parseBetween(-60, 60, 'A slope lies within ± 60°.');
 
   return (
-    <section aria-label="Title block" className="grid grid-cols-1 sm:grid-cols-2">
+    <section aria-label="Title block" className="grid grid-cols-1 content-start sm:grid-cols-2">
       <Cell>
         <LiquidField settings={settings} onSettings={onSettings} />
         {settings.liquid === 'other' && (
