@@ -24,13 +24,16 @@ export const mesh: Kind<MeshSolid> = {
   sizes: () => [],
   measured: (solid) =>
     (['length', 'width', 'height'] as const).map((name, axis) => {
-      const sizeMm = extent(solid)[axis]!;
+      const lengthMm = () => extent(solid)[axis]!;
       return {
         path: [name],
-        sizeMm,
+        // asked only where the mesh is loaded: pages and prints want no more than the names
+        get sizeMm() {
+          return lengthMm();
+        },
         grown: (byMm: number): MeshSolid => {
           const stretch: [number, number, number] = [1, 1, 1];
-          stretch[axis] = (sizeMm + byMm) / sizeMm;
+          stretch[axis] = (lengthMm() + byMm) / lengthMm();
           const stretched: StretchedMesh = { ...solid, stretch };
           return stretched;
         },
