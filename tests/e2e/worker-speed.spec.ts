@@ -5,9 +5,9 @@ import { signInAs } from './people';
 /*
  * How long the worker of the bench takes from an edit to its table. The figures are printed; what they should be
  * on two quiet cores is 16 ms for three solids and 50 ms for six with formed ends (95th percentile). What fails
- * here is four times that: a machine that does other things too must not fail for it.
+ * here is six times that: a machine that does other things too must not fail for it. WORKER_RUNS=60 for a figure.
  */
-const runs = 40;
+const runs = Number(process.env.WORKER_RUNS ?? 15);
 
 for (const [name, wantedMs] of [
   ['three solids, tilted', 16],
@@ -21,7 +21,7 @@ for (const [name, wantedMs] of [
     console.log(
       `worker, ${name}: median ${at(0.5).toFixed(1)} ms, 95th percentile ${at(0.95).toFixed(1)} ms, wanted ${wantedMs}`,
     );
-    expect(at(0.95)).toBeLessThan(4 * wantedMs);
+    expect(at(0.95)).toBeLessThan(6 * wantedMs);
   });
 }
 
