@@ -1,7 +1,7 @@
 import { cutCaps } from '../../geometry/cut-caps';
 import type { PlacedShape } from '../../geometry/placed-shape';
 import { isJoints } from '../tank/joints';
-import { placedShape, type PlacedSolid } from '../tank/placed-solid';
+import { highestLevel, placedShape, type PlacedSolid } from '../tank/placed-solid';
 
 /** Facets to a turn that a table may be published at, finest first; half of each is a multiple of 16 too. */
 const choices = [512, 384, 256, 192, 128] as const;
@@ -22,6 +22,7 @@ const sweptShare = 0.3;
 
 /** Where the wall is taken off as a mesh each triangle is offset, joined and cut: so much dearer. */
 const offsetShare = 4;
+const heavyOffset = 8000;
 
 /**
  * 2N, the facets to a turn that a table is published at: the finest that takes a fraction of a second. A pair of
@@ -29,6 +30,7 @@ const offsetShare = 4;
  */
 export function publishedFacets(solids: readonly PlacedSolid[]): number {
   const finest = solids.some(isOffsetMesh) ? finestOffset(solids) : choices[0];
+  if (finest < choices.at(-1)!) return finest;
   const usual = choices.find(
     (facets) => facets <= finest && cost(solids, facets) <= usualTriangles,
   );
@@ -51,9 +53,28 @@ function isOffsetMesh(one: PlacedSolid): boolean {
   return placedShape(one.drawn, choices.at(-1)!).shape.form === 'mesh';
 }
 
-/** The offset of bent surfaces grows dearer than its triangles tell: ten seconds at 256 for a hull and an egg. */
+/**
+ * The offset of bent surfaces grows dearer than its triangles tell: ten seconds at 256 for a hull and an egg, as long
+ * at 128 where a formed end or a ball is joined to others under a thick wall.
+ */
 function finestOffset(solids: readonly PlacedSolid[]): number {
-  return solids.some(({ kind, solid }) => kind.curved(solid) === 'twice') ? 128 : 256;
+  if (!solids.some(({ kind, solid }) => kind.curved(solid) === 'twice')) return 256;
+  const coarsest = choices.at(-1)!;
+  const heavy = solids.some(
+    (one) =>
+      one.drawn &&
+      !isJoints(one) &&
+      hasThickWall(one) &&
+      trianglesOf([placedShape(one.drawn, coarsest)]) > heavyOffset,
+  );
+  return heavy ? coarser[0] : coarsest;
+}
+
+/** More than a twenty-fifth of the least size: no tank of sheet or moulding has one. */
+function hasThickWall(one: PlacedSolid): boolean {
+  const drawn = one.drawn!;
+  const wallMm = highestLevel(drawn, [0, 0, 1]) - highestLevel(one, [0, 0, 1]);
+  return 25 * wallMm > Math.min(...drawn.kind.extent(drawn.solid));
 }
 
 function cost(solids: readonly PlacedSolid[], facets: number): number {
