@@ -19,6 +19,12 @@ export function allSuites(checkout, server) {
     (name, ...args) =>
     () =>
       programSuite(checkout, name, args);
+  const browser = (folder) => (args) =>
+    browserSuite(checkout, server, [
+      '--config',
+      join('tests', folder, 'playwright.config.ts'),
+      ...args,
+    ]);
   return [
     { name: 'structure', usual: true, run: vitest('structure') },
     {
@@ -36,16 +42,8 @@ export function allSuites(checkout, server) {
     { name: 'dom', usual: true, run: vitest('dom') },
     { name: 'server', usual: true, run: vitest('server') },
     { name: 'browser', usual: true, run: (args) => browserSuite(checkout, server, args) },
-    {
-      name: 'pictures',
-      usual: false,
-      run: (args) =>
-        browserSuite(checkout, server, [
-          '--config',
-          join('tests', 'pictures', 'playwright.config.ts'),
-          ...args,
-        ]),
-    },
+    { name: 'pictures', usual: false, run: browser('pictures') },
+    { name: 'pace', usual: false, run: browser('pace') },
     {
       name: 'long',
       usual: false,

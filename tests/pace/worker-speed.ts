@@ -1,13 +1,13 @@
 import { expect, test, type Page } from '@playwright/test';
 import { benchDesigns } from '../bench/bench-designs';
-import { signInAs } from './people';
+import { signInAs } from '../e2e/people';
 
 /*
  * How long the worker of the bench takes from an edit to its table. The figures are printed; what they should be
  * on two quiet cores is 16 ms for three solids and 50 ms for six with formed ends (95th percentile). What fails
- * here is six times that: a machine that does other things too must not fail for it. WORKER_RUNS=60 for a figure.
+ * here is six times that: a machine that does other things too must not fail for it. Part of npm run test:long.
  */
-const runs = Number(process.env.WORKER_RUNS ?? 15);
+const runs = 60;
 
 for (const [name, wantedMs] of [
   ['three solids, tilted', 16],
