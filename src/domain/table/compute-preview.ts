@@ -17,8 +17,13 @@ import { stickNotices } from './stick-notices';
 import { wallNotices } from './wall-notices';
 import { tableRows } from './table-rows';
 
-/** Chords to a full turn in the live view; the bound compares with half as many. */
-const previewFacets = 64;
+/** Chords to a full turn in the live view: fewer where many solids are bent two ways. The bound compares with 32. */
+const usualFacets = 64;
+const heavyFacets = 48;
+const coarseFacets = 32;
+
+/** So many formed ends, balls or rounded boxes are heavy: at 64 facets their edit would take more than 50 ms. */
+const heavySolids = 3;
 
 const previewRows = 201;
 
@@ -29,7 +34,7 @@ const axes = [
 ] as const;
 
 /**
- * All that the bench shows of a design, at 64 facets a turn (1e-6 to 5e-5 of capacity). Solids are shown as drawn,
+ * All that the bench shows of a design, at 64 or 48 facets a turn (1e-6 to 5e-5 of capacity). Solids are shown as drawn,
  * the space less the wall where sizes are outside ones. A few solids take
  * some milliseconds once the WebAssembly is warm. Throws `invalid` like computeTable.
  */
@@ -37,6 +42,8 @@ export async function computePreview(document: TankDocument): Promise<Preview> {
   refuseUncomputable(document);
   await loadManifold();
   const solids = placedSolids(document);
+  const bent = solids.filter(({ kind, solid }) => kind.curved(solid) === 'twice').length;
+  const previewFacets = bent >= heavySolids ? heavyFacets : usualFacets;
   const space = liquidSpace(solids, previewFacets);
   const frame = readingFrame(document, solids, space);
   const depths = Array.from(
@@ -48,7 +55,7 @@ export async function computePreview(document: TankDocument): Promise<Preview> {
 
   let errorL = roundingOfCapacity * capacityL;
   if (solids.some(({ kind, solid }) => kind.curved(solid))) {
-    const coarse = liquidSpace(solids, previewFacets / 2);
+    const coarse = liquidSpace(solids, coarseFacets);
     tableRows(coarse, frame, depths).forEach(({ volumeL }, i) => {
       errorL = Math.max(errorL, Math.abs(rows[i]!.volumeL - volumeL));
     });
